@@ -1,0 +1,4 @@
+import { Houses } from '../../migrations/001-houses.ts';
+
+/** Every migration in order: named here, so that nothing has to be searched for when the server is compiled. */
+export const MIGRATIONS = [{ name: '001-houses', class: Houses }];
