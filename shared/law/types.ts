@@ -54,6 +54,8 @@ export interface Member {
   readonly cas?: readonly string[];
   /** False where the number is shared with other substances and cannot decide alone. */
   readonly casDecides?: boolean;
+  /** Further numbers of the entry that other preparations share: kept for the record, never decisive. */
+  readonly sharedCas?: readonly string[];
   /** Multiplies a share to express it on the row's basis ("as acid"): exact ratio of molar masses as two decimals. */
   readonly factor?: { readonly times: string; readonly over: string };
 }
@@ -78,6 +80,14 @@ export interface Provision {
   readonly until?: Dates;
   /** Interpretation chosen, in plain words. */
   readonly reading?: string;
+  /** `forbidden`: present in this field at all is a breach. Default `allowed`. */
+  readonly use?: 'allowed' | 'forbidden';
+  /** Why it is forbidden here, in our words. */
+  readonly words?: string;
+  /** Only these members (folded or printed names) are counted here; absent = all. */
+  readonly only?: readonly string[];
+  /** Counts each member alone although the row sums, or the other way round. */
+  readonly together?: 'each' | 'sum' | 'ratios';
   /** Condition of the law that cannot be computed from what the product knows, in our words. */
   readonly notComputable?: string;
 }
@@ -104,6 +114,10 @@ export interface LawRow {
   readonly from?: Dates;
   readonly until?: Dates;
   readonly sourcing: Sourcing;
+  /** Uses other than the list's own are lawful and stand elsewhere; without a stated purpose the limit is then uncertain. */
+  readonly otherUses?: boolean;
+  /** Members whose presence in the same product is itself forbidden together with this row (V/39 with V/57). */
+  readonly excludes?: readonly string[];
 }
 
 /** A group of fragrance allergens that a market wants named. */
@@ -119,6 +133,8 @@ export interface AllergenGroup {
   readonly markets: readonly { readonly market: Market; readonly from: Dates; readonly sourcing: Sourcing; readonly citation: string }[];
   readonly leaveOn: string;
   readonly rinseOff: string;
+  /** Interpretation chosen, in plain words. */
+  readonly reading?: string;
 }
 
 /** One product category of the category table. */

@@ -1,0 +1,73 @@
+import { foldName } from './fold.ts';
+import type { LawRow, Member } from './types.ts';
+
+/** A row that speaks of a substance, and as which of its members. */
+export interface RowHit {
+  readonly row: LawRow;
+  readonly member: Member;
+}
+
+/** What is asked about: a substance's names and numbers. */
+export interface Named {
+  readonly name: string;
+  readonly cas: readonly string[];
+}
+
+function put<T>(map: Map<string, T[]>, key: string, value: T): void {
+  const list = map.get(key);
+  if (list) list.push(value);
+  else map.set(key, [value]);
+}
+
+/**
+ * Look-up of rows by folded name and by CAS number. A name decides before a number: where a
+ * list knows the substance by name, rows of that list that share only a number are left out,
+ * because numbers are shared between substances that the law tells apart.
+ */
+export class RowIndex {
+  readonly #byName = new Map<string, RowHit[]>();
+  readonly #byCas = new Map<string, RowHit[]>();
+
+  constructor(rows: readonly LawRow[]) {
+    for (const row of rows) {
+      for (const member of row.members) this.#add(row, member);
+    }
+  }
+
+  #add(row: LawRow, member: Member): void {
+    const hit = { row, member };
+    const keys = new Set([member.name, ...(member.otherNames ?? [])].map(foldName));
+    for (const key of keys) if (key) put(this.#byName, key, hit);
+    if (member.casDecides === false) return;
+    for (const cas of member.cas ?? []) put(this.#byCas, cas, hit);
+  }
+
+  /** Every row of every list and market that speaks of the substance; each row once. */
+  find(substance: Named): readonly RowHit[] {
+    const named = this.#byName.get(foldName(substance.name));
+    let found: RowHit[] | undefined = named;
+    for (const cas of substance.cas) {
+      for (const hit of this.#byCas.get(cas) ?? []) {
+        if (named?.some((known) => isSameList(known.row, hit.row))) continue;
+        if (found?.some((known) => known.row === hit.row)) continue;
+        found = found === named ? [...(named ?? []), hit] : [...found!, hit];
+      }
+    }
+    return found ? dedupe(found) : [];
+  }
+
+  /** True where a name, as written, is a member of some row. */
+  knows(name: string): boolean {
+    return this.#byName.has(foldName(name));
+  }
+}
+
+function isSameList(a: LawRow, b: LawRow): boolean {
+  return a.list === b.list && a.instrument === b.instrument;
+}
+
+function dedupe(hits: readonly RowHit[]): readonly RowHit[] {
+  if (hits.length < 2) return hits;
+  const rows = new Set<LawRow>();
+  return hits.filter((hit) => !rows.has(hit.row) && rows.add(hit.row) !== undefined);
+}
