@@ -1,0 +1,31 @@
+/** Every address of the browser app, once. */
+export const paths = {
+  today: '/',
+  signIn: '/sign-in',
+  /** The server's own: begins the sign-in through the house's identity service and returns to `to`. */
+  signInStart: (to: string) => `/auth/sign-in?to=${encodeURIComponent(to)}`,
+  /** A blank page that says one may go back, for signing in again beside unsaved work. */
+  signedIn: '/signed-in',
+  products: '/products',
+  newProduct: '/products/new',
+  product: (id: string) => `/products/${id}`,
+  declaration: (id: string) => `/products/${id}/declaration`,
+  verdicts: (id: string) => `/products/${id}/verdicts`,
+  label: (id: string) => `/products/${id}/label`,
+  report: (id: string) => `/products/${id}/report`,
+  materials: '/materials',
+  newMaterial: '/materials/new',
+  material: (id: string) => `/materials/${id}`,
+  dictionary: '/dictionary',
+  entry: (id: string) => `/dictionary/${encodeURIComponent(id)}`,
+  house: '/house',
+} as const;
+
+/** Rooms as they stand in the bar. */
+export const rooms: readonly { readonly word: string; readonly to: string; readonly end?: boolean }[] = [
+  { word: 'Today', to: paths.today, end: true },
+  { word: 'Products', to: paths.products },
+  { word: 'Materials', to: paths.materials },
+  { word: 'Dictionary', to: paths.dictionary },
+  { word: 'House', to: paths.house },
+];

@@ -1,0 +1,1 @@
+export function Component() { return null; }

@@ -1,0 +1,64 @@
+import { useEffect } from 'react';
+import type { ReactNode } from 'react';
+import { NavLink } from 'react-router-dom';
+
+export interface DeckProps {
+  readonly title: string;
+  /** Short facts above the title, parted by hairlines. */
+  readonly facts?: readonly ReactNode[];
+  /** Saved state and buttons at the right. */
+  readonly acts?: ReactNode;
+  /** Between the head and the tabs: the as-of sentence of a product. */
+  readonly children?: ReactNode;
+  readonly tabs?: ReactNode;
+  /** The title of the browser's window; the title itself when absent. */
+  readonly windowTitle?: string;
+}
+
+/** The page head, etched on the glass. Its title takes the focus when the page is entered. */
+export function Deck({ title, facts = [], acts, children, tabs, windowTitle = title }: DeckProps) {
+  return (
+    <div className={`deck ${tabs ? 'has-tabs' : ''}`}>
+      <WindowTitle title={windowTitle} />
+      <div className="wrap deck-head">
+        <div className="deck-line">
+          <div>
+            {facts.length > 0 ? <p className="facts">{facts.map((fact, index) => <span key={index}>{fact}</span>)}</p> : null}
+            <h1 tabIndex={-1} data-page-title>{title}</h1>
+          </div>
+          {acts ? <div className="acts">{acts}</div> : null}
+        </div>
+      </div>
+      {children}
+      {tabs ? <div className="wrap">{tabs}</div> : null}
+    </div>
+  );
+}
+
+function WindowTitle({ title }: { title: string }) {
+  useEffect(() => {
+    document.title = `${title} · Colophon`;
+  }, [title]);
+  return null;
+}
+
+export interface TabLink {
+  readonly to: string;
+  readonly word: string;
+  readonly mark?: ReactNode;
+  /** Only this very address, not what lies below it. */
+  readonly end?: boolean;
+}
+/** Words on the sheet's own edge, each its own address. */
+export function TabLinks({ tabs, label }: { tabs: readonly TabLink[]; label: string }) {
+  return (
+    <nav className="tabs" aria-label={label}>
+      {tabs.map((tab) => (
+        <NavLink key={tab.to} to={tab.to} end={tab.end} preventScrollReset>
+          {tab.word}
+          {tab.mark}
+        </NavLink>
+      ))}
+    </nav>
+  );
+}
