@@ -54,6 +54,7 @@ export function divide(a: Rational, b: Rational): Rational {
 }
 /** Negative, zero or positive as `a` is less than, equal to or greater than `b`. */
 export function compare(a: Rational, b: Rational): -1 | 0 | 1 {
+  if (a.d === b.d) return a.n < b.n ? -1 : a.n > b.n ? 1 : 0;
   const left = a.n * b.d;
   const right = b.n * a.d;
   return left < right ? -1 : left > right ? 1 : 0;
