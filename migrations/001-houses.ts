@@ -42,7 +42,7 @@ const TABLES = [
      declare_as text not null check (declare_as in ('ingredients', 'parfum', 'aroma')),
      composition jsonb not null,
      constituents jsonb not null,
-     price_per_kg numeric(40, 12) check (price_per_kg >= 0),
+     price_per_kg numeric check (price_per_kg >= 0),
      currency text not null,
      notes text not null,
      handling jsonb not null,

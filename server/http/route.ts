@@ -9,7 +9,8 @@ import { AppError } from './app-error.ts';
 import { FileAnswer, sendFile } from './file-answer.ts';
 import { plainWords, toIssues } from './issues.ts';
 import { readUpload, type Upload } from './read-upload.ts';
-import { actorOf, findSession, type Actor, type RequestSession } from './session.ts';
+import type { AppSession } from '#server/auth/session.types.ts';
+import { actorOf, findSession, type Actor } from './session.ts';
 import { cleanTexts } from './text-hygiene.ts';
 
 /** What a route asks of its caller: a right of the policy table, a session alone, or nothing. */
@@ -19,8 +20,6 @@ interface Rule {
   readonly may: May;
   /** Bytes of a JSON body; 256 KB unless told. */
   readonly bodyLimit?: number;
-  /** Lets the browser keep an answer that holds nothing of a house. */
-  readonly isPublicData?: boolean;
 }
 
 /** What a handler is given: everything parsed, and the house's own database. */
@@ -29,7 +28,7 @@ export interface Call<Params, Query, Body> {
   readonly query: Query;
   readonly body: Body;
   readonly actor: Actor;
-  readonly session: RequestSession;
+  readonly session: AppSession;
   readonly upload: Upload;
   readonly req: Request;
   readonly res: Response;
@@ -94,7 +93,7 @@ function bodyReaders({ endpoint, rule }: Route): RequestHandler[] {
 
 function answer(one: Route, em: EntityManager): RequestHandler {
   return async (req, res) => {
-    const { endpoint, rule } = one;
+    const { endpoint } = one;
     const params = parseParams(endpoint, req);
     const query = parsePart(endpoint.query, req.query);
     const upload = endpoint.accepts === 'multipart' ? await readUpload(req) : undefined;
@@ -118,7 +117,6 @@ function answer(one: Route, em: EntityManager): RequestHandler {
       inHouse: <T>(work: (em: EntityManager) => Promise<T>) => inHouse(em, (session ?? refuse()).houseId, work),
     };
     const result = await one.handle(call);
-    if (!rule.isPublicData) res.set('Cache-Control', 'no-store');
     if (result instanceof FileAnswer) sendFile(res, result);
     else if (!res.headersSent) res.json(endpoint.response.parse(result));
   };

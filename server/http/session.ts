@@ -1,15 +1,6 @@
 import type { Request } from 'express';
+import type { AppSession } from '#server/auth/session.types.ts';
 import type { Role } from '#shared/contracts/session.contract.ts';
-
-/** What a request knows of its signed-in person; set by the sign-in room's session middleware. */
-export interface RequestSession {
-  readonly id: string;
-  readonly person: { readonly id: string; readonly name: string; readonly email: string };
-  readonly houseId: string;
-  readonly roles: readonly Role[];
-  readonly csrfToken: string;
-  readonly authTime: Date;
-}
 
 /** Who acts, in which house: what every service takes. */
 export interface Actor {
@@ -19,10 +10,10 @@ export interface Actor {
   readonly roles: readonly Role[];
 }
 
-export function findSession(req: Request): RequestSession | undefined {
-  return (req as Request & { session?: RequestSession }).session;
+export function findSession(req: Request): AppSession | undefined {
+  return req.session;
 }
 
-export function actorOf(session: RequestSession): Actor {
+export function actorOf(session: AppSession): Actor {
   return { personId: session.person.id, name: session.person.name, houseId: session.houseId, roles: session.roles };
 }

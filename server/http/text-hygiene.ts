@@ -5,7 +5,6 @@ const DEEPEST = 40;
 
 // Line feed, tab and carriage return stay; NUL and lone surrogates cannot be stored, the
 // others (C0, C1, direction overrides and isolates) could make a label read as it is not.
-// eslint-disable-next-line no-control-regex
 const HIDDEN = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u200e\u200f\u202a-\u202e\u2066-\u2069\ufeff]/;
 
 const LONE_SURROGATE = /\p{Surrogate}/u;

@@ -16,7 +16,7 @@ export const Material = defineEntity({
     composition: p.json<CompositionLine[]>(),
     constituents: p.json<ConstituentLine[]>(),
     /** Money per kilogram, exact, in `currency`. */
-    pricePerKg: p.decimal('string').precision(40).scale(12).nullable(),
+    pricePerKg: p.decimal('string').columnType('numeric').nullable(),
     currency: p.text(),
     notes: p.text(),
     handling: p.json<MaterialFields['handling']>(),

@@ -1,0 +1,20 @@
+import { seedDemo } from './demo/seed-demo.ts';
+import { openOrm } from './orm.ts';
+
+export interface SeedOptions {
+  /** Who vouches for the demo people; without it no invented house is added. */
+  readonly demoIssuer: string | undefined;
+}
+
+/**
+ * Fills a migrated database with the dictionary and, where asked, the demo. Idempotent: what
+ * stands is left as it is, so a demo that someone has worked in keeps that work.
+ */
+export async function seed(ownerUrl: string, { demoIssuer }: SeedOptions): Promise<void> {
+  const orm = await openOrm(ownerUrl, { max: 2 });
+  try {
+    if (demoIssuer !== undefined) await seedDemo(orm.em, demoIssuer);
+  } finally {
+    await orm.close(true);
+  }
+}
