@@ -36,8 +36,7 @@ export function tally(paper: Paper, model: ReportModel): Piece {
 
 /** One declaration: its market, then the list broken between names, never inside one. */
 export function declaration(paper: Paper, entry: ReportModel['declarations'][number]): Piece {
-  const bound = entry.names.map((name) => name.replaceAll(' ', '\u00a0'));
-  const body = bound.length > 0 ? `${bound.join(', ')}.` : entry.text;
+  const body = `${entry.names.map((name) => name.replaceAll(' ', '\u00a0')).join(', ')}.`;
   const lead = `${entry.heading}: `;
   const type = { size: 13 };
   const leadWidth = paper.width(lead, { ...type, face: 'SemiBold' });

@@ -37,7 +37,7 @@ export interface ReportModel {
   readonly markets: readonly Market[];
   readonly counts: Readonly<Record<Severity, number>>;
   readonly finding: string;
-  readonly declarations: readonly { readonly label: string; readonly heading: string; readonly names: readonly string[]; readonly text: string }[];
+  readonly declarations: readonly { readonly label: string; readonly heading: string; /** Each is kept whole when lines are broken. */ readonly names: readonly string[]; readonly text: string }[];
   readonly requiredWording: readonly { readonly market: Market; readonly text: string; readonly lang: string; readonly citation: string; readonly isOfficialText: boolean }[];
   readonly verdicts: Readonly<Record<Severity, readonly MergedFinding[]>>;
   /** Absent where exact shares are withheld. */
