@@ -1,0 +1,61 @@
+import type { Cmyk, Micrometres, PathStep, Text } from '#shared/artwork/scene.ts';
+
+/** Points per micrometre: 72 to the inch of 25 400. */
+const POINTS = 72 / 25_400;
+
+/** Points with six decimals: finer than a nanometre, so a trim read back is the trim that was set. */
+export function points(length: Micrometres): string {
+  return String(Math.round(length * POINTS * 1e6) / 1e6);
+}
+
+/** Turns label coordinates (0 0 upper left of the trim, y down) into page text (0 0 lower left of the sheet). */
+export interface Sheet {
+  x(x: Micrometres): string;
+  y(y: Micrometres): string;
+  length(length: Micrometres): string;
+}
+export function sheetOf(origin: Micrometres, height: Micrometres): Sheet {
+  return { x: (x) => points(x + origin), y: (y) => points(height - origin - y), length: points };
+}
+
+const tint = (percent: number): string => String(percent / 100);
+
+/** Fill colour in process inks. */
+export function fill(cmyk: Cmyk): string {
+  return `${cmyk.map(tint).join(' ')} k`;
+}
+/** Stroke colour in process inks. */
+export function stroke(cmyk: Cmyk): string {
+  return `${cmyk.map(tint).join(' ')} K`;
+}
+
+export function pathOf(steps: readonly PathStep[], sheet: Sheet): string {
+  return steps
+    .map((step) => {
+      if (step[0] === 'Z') return 'h';
+      const [command, ...figures] = step;
+      const out = figures.map((figure, i) => (i % 2 === 0 ? sheet.x(figure) : sheet.y(figure)));
+      return `${out.join(' ')} ${command === 'M' ? 'm' : command === 'L' ? 'l' : 'c'}`;
+    })
+    .join('\n');
+}
+
+export function boxOf(box: { x: Micrometres; y: Micrometres; width: Micrometres; height: Micrometres }, sheet: Sheet): string {
+  return `${sheet.x(box.x)} ${sheet.y(box.y + box.height)} ${sheet.length(box.width)} ${sheet.length(box.height)} re`;
+}
+
+/**
+ * One run of text: its glyph numbers with the kerning between them as TJ writes it, the
+ * distance taken away in thousandths of the em.
+ */
+export function textOf(item: Text, glyphs: readonly { readonly code: string; readonly advance: number }[], font: string, sheet: Sheet): string {
+  const turn = { 0: '1 0 0 1', 90: '0 -1 1 0', 270: '0 1 -1 0' }[item.turn];
+  let array = '<';
+  glyphs.forEach(({ code, advance }, i) => {
+    array += code;
+    const next = item.offsets[i + 1];
+    const closer = next === undefined ? 0 : item.offsets[i]! + advance - next;
+    if (closer !== 0) array += `>${closer}<`;
+  });
+  return `BT /${font} ${sheet.length(item.size)} Tf ${turn} ${sheet.x(item.x)} ${sheet.y(item.y)} Tm [${array}>] TJ ET`;
+}

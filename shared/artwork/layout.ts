@@ -1,0 +1,141 @@
+import { barcodeFault } from './barcode.ts';
+import { checkLabel, type Check } from './checks.ts';
+import { readContainer, type Sheet } from './container.ts';
+import { contentOf, textsOf } from './content.ts';
+import { fitLabel } from './fit.ts';
+import { heightAt, minimumsFor, sizeForHeight } from './heights.ts';
+import { BLACK, DIE_LINE, paletteOf } from './inks.ts';
+import type { LabelInput } from './label-input.ts';
+import { inMillimetres, readMillimetres } from './lengths.ts';
+import type { FontMetrics } from './metrics.ts';
+import { misfitOf, type Misfit } from './misfits.ts';
+import type { Box, ElementName, Item, Micrometres, Scene } from './scene.ts';
+import { strongWeight, type Job, type TemplateName } from './setting.ts';
+
+export interface Layout {
+  /** `null` only where the measures themselves cannot be read. */
+  readonly scene: Scene | null;
+  /** Empty when everything has its place. */
+  readonly misfits: readonly Misfit[];
+  readonly checks: readonly Check[];
+}
+
+export const TEMPLATES: readonly { readonly slug: TemplateName; readonly name: string; readonly temper: string }[] = [
+  { slug: 'galley', name: 'Galley', temper: 'Hung from one line, like a proof drying.' },
+  { slug: 'versal', name: 'Versal', temper: 'One great letter; the particulars answer in a ledger.' },
+];
+
+/** The template asked for, or the one drawn for this shape. */
+export function templateFor(input: Pick<LabelInput, 'template' | 'container'>): TemplateName {
+  const asked = TEMPLATES.find((template) => template.slug === input.template);
+  return asked?.slug ?? (input.container.shape === 'flat' ? 'versal' : 'galley');
+}
+
+const READING_ORDER: readonly ElementName[] = [
+  'ground', 'rule', 'brand', 'name', 'function', 'claim', 'net content', 'directions', 'warnings', 'ingredients', 'responsible person', 'batch', 'durability', 'barcode',
+];
+
+/** Paint order is reading order: grounds first, then texts as the law lists them. Stable, so lines keep theirs. */
+function inReadingOrder(items: readonly Item[]): Item[] {
+  const rank = new Map(READING_ORDER.map((name, i) => [name, i]));
+  return [...items].sort((a, b) => rank.get(a.element)! - rank.get(b.element)!);
+}
+
+function cutBox(box: Box, to: Box): Box {
+  const x = Math.max(box.x, to.x);
+  const y = Math.max(box.y, to.y);
+  return { x, y, width: Math.max(0, Math.min(box.x + box.width, to.x + to.width) - x), height: Math.max(0, Math.min(box.y + box.height, to.y + to.height) - y) };
+}
+
+/** Grounds and rules end with the bleed. */
+function cutToBleed(item: Item, sheet: Box): Item {
+  const clip = item.clip ? { clip: cutBox(item.clip, sheet) } : {};
+  return item.kind === 'boxes' ? { ...item, ...clip, boxes: item.boxes.map((box) => cutBox(box, sheet)) } : { ...item, ...clip };
+}
+
+function jobOf(input: LabelInput, sheet: Sheet, metrics: FontMetrics): Job {
+  const content = contentOf(input);
+  const minimums = minimumsFor(input.market, sheet, content.net?.quantity ?? null);
+  const isNorthAmerican = input.market === 'US' || input.market === 'CA';
+  const isWrap = sheet.shape === 'cylinder';
+  const scale = Math.max(0.5, Math.min(1.45, isWrap ? Math.min(sheet.round / 182_400, sheet.height / 82_000) : Math.min(Math.max(sheet.width, sheet.height * 0.66) / 66_000, Math.max(sheet.height, sheet.width * 0.6) / 84_000)));
+  const strong = metrics.face(strongWeight({ isNorthAmerican } as Job));
+  const netShare = minimums.netContent.of === 'figures' ? strong.capHeight : strong.xHeight;
+  const eShare = content.eMark ? 722 : 1e9;
+  const netLeast = Math.max(sizeForHeight(minimums.netContent.height, netShare), sizeForHeight(minimums.text.height, strong.xHeight), content.eMark ? Math.min(4500, sizeForHeight(minimums.eMark, eShare)) : 0);
+  return {
+    content, sheet, minimums, metrics, isNorthAmerican, scale,
+    template: templateFor(input),
+    barcode: input.barcode && input.barcode.digits !== '' && !barcodeFault(input.barcode) ? input.barcode : null,
+    floor: sizeForHeight(minimums.text.height, metrics.face(400).xHeight),
+    netSize: Math.max(netLeast, Math.round(Math.min(6200, 6200 * scale))),
+    memo: new Map(),
+  };
+}
+
+/** Fallback when the drawn net content does not fit: the least lawful size. */
+function withLeastNet(job: Job): Job {
+  const strong = job.metrics.face(strongWeight(job));
+  const { netContent, text, eMark } = job.minimums;
+  const least = Math.max(
+    sizeForHeight(netContent.height, netContent.of === 'figures' ? strong.capHeight : strong.xHeight),
+    sizeForHeight(text.height, strong.xHeight), job.content.eMark ? sizeForHeight(eMark, 722) : 0,
+  );
+  return least < job.netSize ? { ...job, netSize: least, memo: new Map() } : job;
+}
+
+/** Characters that the type lacks, by element: they are reported and never printed as empty boxes. */
+function missingCharacters(input: LabelInput, metrics: FontMetrics): Misfit[] {
+  const face = metrics.face(400);
+  return textsOf(input).flatMap(({ element, text }): Misfit[] => {
+    const lacking = [...new Set(Array.from(text))].filter((char) => !/\s/.test(char) && !face.has(char));
+    return lacking.length === 0 ? [] : [{ element, missing: 0, direction: 'character', message: `The label type has no ${lacking.map((char) => `“${char}”`).join(', ')} (in the ${element}). Write it with other letters.` }];
+  });
+}
+
+function legendOf(input: LabelInput, sheet: Sheet, bleed: Micrometres): string {
+  const wrap = sheet.shape === 'cylinder' ? `wrap Ø ${sheet.diameter / 1000}, overlap ${sheet.overlap / 1000}` : 'flat';
+  const content = input.netContent ? ` ${input.netContent.value} ${input.netContent.unit}` : '';
+  return `${input.name}${content} · ${input.market} · ${wrap} · trim ${sheet.width / 1000} × ${sheet.height / 1000} mm · bleed ${bleed / 1000} mm`;
+}
+
+/**
+ * Lays out a label: the one scene that screen and press file are painted from, what would not
+ * fit (element by element, in millimetres), and the list of checks before the press.
+ */
+export function layOutLabel(input: LabelInput, metrics: FontMetrics): Layout {
+  const sheet = readContainer(input.container);
+  if ('faults' in sheet) return { scene: null, checks: [], misfits: sheet.faults.map((fault) => ({ element: 'container', missing: 0, direction: 'measure', message: fault.message })) };
+  const bleed = input.bleedMm === undefined ? 3000 : readMillimetres(input.bleedMm);
+  if (bleed === null || bleed < 0 || bleed > 20_000) return { scene: null, checks: [], misfits: [{ element: 'container', missing: 0, direction: 'measure', message: 'The bleed lies between 0 and 20 mm.' }] };
+  const lacking = missingCharacters(input, metrics);
+  const drawn = jobOf(input, sheet, metrics);
+  let job = drawn;
+  let fitted = fitLabel(job);
+  if (fitted.overflows.length > 0) {
+    const leaner = withLeastNet(drawn);
+    if (leaner !== drawn) {
+      const again = fitLabel(leaner);
+      if (again.overflows.length === 0) [job, fitted] = [leaner, again];
+    }
+  }
+  const palette = paletteOf(input.ink);
+  const full: Box = { x: -bleed, y: -bleed, width: sheet.width + 2 * bleed, height: sheet.height + 2 * bleed };
+  const edge = sheet.shape === 'cylinder' ? Math.max(2000, sheet.overlap + 3000) : 2000;
+  const scene: Scene = {
+    trim: { width: sheet.width, height: sheet.height }, bleed, shape: sheet.shape, overlap: sheet.overlap,
+    safe: { x: edge, y: 2000, width: sheet.width - 2 * edge, height: sheet.height - 4000 },
+    panels: fitted.panels,
+    inks: { black: BLACK, ink: palette.ink, tint: palette.tint, light: palette.light },
+    items: inReadingOrder(fitted.items).map((item) => cutToBleed(item, full)),
+    dieLine: { ink: DIE_LINE, stroke: 250, steps: [['M', 0, 0], ['L', sheet.width, 0], ['L', sheet.width, sheet.height], ['L', 0, sheet.height], ['Z']] },
+    legend: legendOf(input, sheet, bleed), template: job.template,
+  };
+  const misfits = [...lacking, ...fitted.overflows.map(misfitOf)];
+  return { scene, misfits, checks: checkLabel({ input, job, scene, setting: fitted.setting, misfits }) };
+}
+
+/** For people: the height of a share of an em, in millimetres cut to two decimals. */
+export function letterHeight(size: Micrometres, share: number): string {
+  return inMillimetres(Math.floor(heightAt(size, share) / 1000));
+}

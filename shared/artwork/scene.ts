@@ -1,0 +1,103 @@
+/**
+ * The scene: a label as positioned shapes, computed once and painted by whoever shows it.
+ * Every length is a whole number of micrometres; 0 0 is the upper left corner of the trim,
+ * x to the right and y downwards. Nothing in a scene knows of a screen or a page.
+ */
+export type Micrometres = number;
+export type Weight = 300 | 400 | 500 | 600 | 700;
+export type Turn = 0 | 90 | 270;
+
+/** C, M, Y, K in whole percent. */
+export type Cmyk = readonly [number, number, number, number];
+
+export interface Ink {
+  readonly name: string;
+  readonly cmyk: Cmyk;
+  /** Screen stand-in; the CMYK figures decide. */
+  readonly screen: string;
+  /** A plate of its own, under this name. */
+  readonly spot?: string;
+}
+
+export interface Box {
+  readonly x: Micrometres;
+  readonly y: Micrometres;
+  readonly width: Micrometres;
+  readonly height: Micrometres;
+}
+
+/** M, L, C take end points as in SVG; Z closes. */
+export type PathStep =
+  | readonly ['M' | 'L', Micrometres, Micrometres]
+  | readonly ['C', Micrometres, Micrometres, Micrometres, Micrometres, Micrometres, Micrometres]
+  | readonly ['Z'];
+
+/** What an item is for: used by checks, misfits and the studio's inspector. */
+export type ElementName =
+  | 'ground' | 'brand' | 'name' | 'function' | 'claim' | 'net content' | 'directions' | 'warnings' | 'ingredients'
+  | 'responsible person' | 'batch' | 'durability' | 'barcode' | 'rule';
+
+interface Common {
+  readonly element: ElementName;
+  /** Key into `Scene.inks`. */
+  readonly ink: string;
+  readonly clip?: Box;
+}
+export interface Boxes extends Common {
+  readonly kind: 'boxes';
+  readonly boxes: readonly Box[];
+}
+export interface Path extends Common {
+  readonly kind: 'path';
+  readonly steps: readonly PathStep[];
+  /** Stroke width; filled when absent. */
+  readonly stroke?: Micrometres;
+}
+export interface Text extends Common {
+  readonly kind: 'text';
+  readonly text: string;
+  readonly weight: Weight;
+  /** The em. */
+  readonly size: Micrometres;
+  /** Start of the base line. */
+  readonly x: Micrometres;
+  readonly y: Micrometres;
+  /** Clockwise; 90 reads downwards. */
+  readonly turn: Turn;
+  /** Start of each character in thousandths of the em, kerning included. */
+  readonly offsets: readonly number[];
+  /** Full advance in thousandths of the em. */
+  readonly advance: number;
+}
+export type Item = Boxes | Path | Text;
+
+export interface Panel extends Box {
+  readonly name: string;
+}
+
+export interface Scene {
+  readonly trim: { readonly width: Micrometres; readonly height: Micrometres };
+  readonly bleed: Micrometres;
+  readonly shape: 'cylinder' | 'flat' | 'taper';
+  /** Width of the covered and of the covering strip at either end of a wrap. */
+  readonly overlap: Micrometres;
+  /** Text and symbols stay inside. */
+  readonly safe: Box;
+  readonly panels: readonly Panel[];
+  readonly inks: Readonly<Record<string, Ink>>;
+  /** Painted in this order, which is also the order in which text is read. */
+  readonly items: readonly Item[];
+  readonly dieLine: { readonly ink: Ink; readonly stroke: Micrometres; readonly steps: readonly PathStep[] };
+  /** One line for the slug, outside the bleed. */
+  readonly legend: string;
+  readonly template: string;
+}
+
+/** The box of the letters of a text item: cap height above the base line, nothing below. */
+export function textBox(item: Text, capHeight: number): Box {
+  const length = Math.ceil((item.advance * item.size) / 1000);
+  const rise = Math.ceil((capHeight * item.size) / 1000);
+  if (item.turn === 0) return { x: item.x, y: item.y - rise, width: length, height: rise };
+  if (item.turn === 90) return { x: item.x, y: item.y, width: rise, height: length };
+  return { x: item.x - rise, y: item.y - length, width: rise, height: length };
+}
