@@ -18,8 +18,10 @@ export interface DictionaryEntry {
     readonly usColours?: readonly string[];
   };
   readonly synonyms: readonly string[];
-  /** Common, trade-neutral and misspelt forms that lead here. */
+  /** Common and trade-neutral forms that lead here. */
   readonly commonNames: readonly string[];
+  /** Frequent misspellings of the names above. */
+  readonly misspellings?: readonly string[];
   /** INCI name of the successor where this name is a former one. */
   readonly supersededBy?: string;
   /** `botanical`, `colourant`, `essential-oil`, `animal`, `silicone`, `paraben`, `sulfate-surfactant`, `alcohol` … */
