@@ -50,6 +50,7 @@ export const materialFields = z.strictObject({
   handling: handlingLimits,
 });
 export type MaterialFields = z.infer<typeof materialFields>;
+export type HandlingLimits = z.infer<typeof handlingLimits>;
 export type CompositionLine = z.infer<typeof compositionLine>;
 export type ConstituentLine = z.infer<typeof constituentLine>;
 

@@ -1,9 +1,9 @@
 import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
-import type { Finding, RequiredWording, Severity } from '#shared/engine/types.ts';
+import type { RequiredWording, Severity } from '#shared/engine/types.ts';
 import { weighLines } from '#shared/engine/weigh-lines.ts';
 import { toDecimal, type Rational } from '#shared/kernel/rational.ts';
 import type { Exposure, Market } from '#shared/law/types.ts';
-import { mergeFindings, withholdFigures } from './merge-findings.ts';
+import { mergeFindings, withholdFigures, type ToldFinding } from './merge-findings.ts';
 import { particularRows } from './particulars.ts';
 import type { LadderRow, MergedFinding, ReportModel } from './report-model.ts';
 import { countInWords, dayInWords, listInWords, MARKET_NAMES, shareAsBand } from './words.ts';
@@ -26,7 +26,7 @@ export interface ReportedResult {
     readonly entries: readonly { readonly name: string; readonly inci: string; readonly zone: string; readonly share?: Share }[];
   };
   readonly allergens: readonly { readonly name: string; readonly total: Share; readonly threshold: string; readonly disclose: boolean }[];
-  readonly findings: readonly Finding[];
+  readonly findings: readonly ToldFinding[];
   readonly requiredWording: readonly RequiredWording[];
 }
 

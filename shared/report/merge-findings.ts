@@ -2,10 +2,13 @@ import type { Finding } from '#shared/engine/types.ts';
 import type { Market } from '#shared/law/types.ts';
 import type { MergedFinding } from './report-model.ts';
 
-/** The findings of one market, as a result document lists them. */
+/** A finding as the engine gives it or as a result document carries it. */
+export type ToldFinding = Omit<Finding, 'kind'> & { readonly kind: string };
+
+/** The findings of one market. */
 export interface MarketFindings {
   readonly market: Market;
-  readonly findings: readonly Finding[];
+  readonly findings: readonly ToldFinding[];
 }
 
 /** One point told once: findings of several markets that say the same are joined, citations kept in order. */
