@@ -2,7 +2,7 @@ import { DomainError } from '#shared/kernel/errors.ts';
 import { plainDate, type PlainDate } from '#shared/kernel/plain-date.ts';
 import { readAllergens, readDates, readRows } from './read-rows.ts';
 import { RowIndex, type Named, type RowHit } from './row-index.ts';
-import type { InstrumentJson, LawTables, ProductWarningJson, UsColourJson, WordingJson } from './tables.types.ts';
+import type { FormaldehydeJson, InstrumentJson, LawTables, ProductWarningJson, UsColourJson, WordingJson } from './tables.types.ts';
 import type { AllergenGroup, Category, Dates, LawRow, Market, Sourcing } from './types.ts';
 
 /** One step of the law calendar. */
@@ -45,6 +45,7 @@ export interface LawBook {
   readonly changes: readonly LawChange[];
   readonly warnings: readonly ProductWarning[];
   readonly usColours: readonly UsColourJson[];
+  readonly formaldehyde: FormaldehydeJson;
   /** Rows of every list and market that speak of a substance, by name first, then by CAS number. */
   rowsFor(substance: Named): readonly RowHit[];
   /** The row of this id. @throws DomainError when there is none. */
@@ -87,6 +88,7 @@ export function openLawBook(tables: LawTables): LawBook {
     changes,
     warnings: tables.warnings.map(readWarning),
     usColours: tables.usColours,
+    formaldehyde: tables.formaldehyde,
     rowsFor: (substance) => index.find(substance),
     row(id) {
       const row = byId.get(id);

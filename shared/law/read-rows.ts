@@ -65,7 +65,7 @@ export function readRows(file: RowFileJson): LawRow[] {
       ...(until ? { until } : {}),
       sourcing: row.sourcing ?? file.sourcing,
       ...(row.otherUses ? { otherUses: true } : {}),
-      ...(row.excludes ? { excludes: row.excludes } : {}),
+      ...(row.covers ? { covers: row.covers } : {}),
     };
   });
 }

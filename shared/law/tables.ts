@@ -2,9 +2,22 @@ import changes from '#data/law/changes.json' with { type: 'json' };
 import instruments from '#data/law/instruments.json' with { type: 'json' };
 import release from '#data/law/release.json' with { type: 'json' };
 import categories from '#data/parameters/categories.json' with { type: 'json' };
+import annexII1 from '#data/parameters/eu-annex-ii-0001-0600.json' with { type: 'json' };
+import annexII2 from '#data/parameters/eu-annex-ii-0601-1200.json' with { type: 'json' };
+import annexII3 from '#data/parameters/eu-annex-ii-1201-1767.json' with { type: 'json' };
+import annexIII1 from '#data/parameters/eu-annex-iii-001-100.json' with { type: 'json' };
+import annexIII2 from '#data/parameters/eu-annex-iii-101-200.json' with { type: 'json' };
+import annexIII3 from '#data/parameters/eu-annex-iii-201-300.json' with { type: 'json' };
+import annexIII4 from '#data/parameters/eu-annex-iii-301-386.json' with { type: 'json' };
+import annexIIICommon from '#data/parameters/eu-annex-iii-common.json' with { type: 'json' };
+import annexIV from '#data/parameters/eu-annex-iv.json' with { type: 'json' };
+import annexV from '#data/parameters/eu-annex-v.json' with { type: 'json' };
+import annexVI from '#data/parameters/eu-annex-vi.json' with { type: 'json' };
+import formaldehyde from '#data/parameters/formaldehyde-releasers.json' with { type: 'json' };
 import allergens from '#data/parameters/fragrance-allergens.json' with { type: 'json' };
 import warnings from '#data/parameters/product-warnings.json' with { type: 'json' };
 import usColours from '#data/parameters/us-colours.json' with { type: 'json' };
+import wordingAnnexIII from '#data/parameters/wording-annex-iii.json' with { type: 'json' };
 import wording from '#data/parameters/wording.json' with { type: 'json' };
 import type { LawTables } from './tables.types.ts';
 
@@ -17,9 +30,10 @@ export const lawTables = {
   instruments,
   categories: categories.categories,
   allergens,
-  rows: [],
-  wording,
+  rows: [annexII1, annexII2, annexII3, annexIIICommon, annexIII1, annexIII2, annexIII3, annexIII4, annexIV, annexV, annexVI],
+  wording: [...wording, ...wordingAnnexIII],
   warnings,
   changes,
   usColours,
+  formaldehyde,
 } as unknown as LawTables;

@@ -45,7 +45,7 @@ export interface RowJson {
   readonly sourcing?: Sourcing;
   readonly citation?: string;
   readonly otherUses?: boolean;
-  readonly excludes?: readonly string[];
+  readonly covers?: 'nano' | 'both';
 }
 
 /** One file of rows of one list. `{entry}` in the citation and id stands for the entry's number. */
@@ -144,6 +144,24 @@ export interface UsColourJson {
   readonly from?: DatesJson;
 }
 
+/** Preservatives that release formaldehyde, with the greatest release that their molar mass allows. */
+export interface FormaldehydeJson {
+  readonly citation: string;
+  readonly sourcing: Sourcing;
+  readonly note: string;
+  readonly rules: readonly {
+    readonly id: string;
+    readonly market: Market;
+    /** Strictly above this share of released formaldehyde, in percent. */
+    readonly threshold: string;
+    readonly wording: string;
+    readonly citation: string;
+    readonly from?: DatesJson;
+    readonly until?: DatesJson;
+  }[];
+  readonly members: readonly (Member & { readonly entry: string })[];
+}
+
 export interface LawTables {
   readonly release: { readonly release: string; readonly readOn: string; readonly coveredFrom: string };
   readonly instruments: readonly InstrumentJson[];
@@ -154,4 +172,5 @@ export interface LawTables {
   readonly warnings: readonly ProductWarningJson[];
   readonly changes: readonly ChangeJson[];
   readonly usColours: readonly UsColourJson[];
+  readonly formaldehyde: FormaldehydeJson;
 }

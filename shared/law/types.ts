@@ -84,8 +84,12 @@ export interface Provision {
   readonly use?: 'allowed' | 'forbidden';
   /** Why it is forbidden here, in our words. */
   readonly words?: string;
-  /** Only these members (folded or printed names) are counted here; absent = all. */
+  /** Only these members (by name) are counted here; absent = all. */
   readonly only?: readonly string[];
+  /** Speaks only where one of these members is present in the product. */
+  readonly with?: readonly string[];
+  /** Speaks only where none of these substances is present in the product. */
+  readonly without?: readonly string[];
   /** Counts each member alone although the row sums, or the other way round. */
   readonly together?: 'each' | 'sum' | 'ratios';
   /** Condition of the law that cannot be computed from what the product knows, in our words. */
@@ -116,8 +120,8 @@ export interface LawRow {
   readonly sourcing: Sourcing;
   /** Uses other than the list's own are lawful and stand elsewhere; without a stated purpose the limit is then uncertain. */
   readonly otherUses?: boolean;
-  /** Members whose presence in the same product is itself forbidden together with this row (V/39 with V/57). */
-  readonly excludes?: readonly string[];
+  /** Which form the entry covers; absent = the form that is not nano. */
+  readonly covers?: 'nano' | 'both';
 }
 
 /** A group of fragrance allergens that a market wants named. */
