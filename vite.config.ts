@@ -9,6 +9,7 @@ export default defineConfig({
     include: ['tests/**/*.test.{ts,tsx}'],
     exclude: ['tests/journeys/**', 'tests/bench/**', 'node_modules/**'],
     environment: 'node',
+    globalSetup: ['tests/support/global-setup.ts'],
     restoreMocks: true,
   },
 });
