@@ -33,3 +33,6 @@ export const RHEA: DemoPerson = { id: '8f2e6c40-1d3b-4e8a-b7c5-90a1d2e3f405', na
 export const BRAM: DemoPerson = { id: '8f2e6c40-1d3b-4e8a-b7c5-90a1d2e3f406', name: 'Bram Otter', email: 'bram@otterby.example', work: 'Owner', roles: ['owner'], ...at(OTTERBY, 'otterby') };
 
 export const DEMO_PEOPLE: readonly DemoPerson[] = [INES, MAUD, ODILE, PIET, RHEA, BRAM];
+
+/** Known to the built-in identity service and member of no house: shows what a newcomer meets. Not seeded. */
+export const NEWCOMER = { id: '8f2e6c40-1d3b-4e8a-b7c5-90a1d2e3f407', name: 'Wilf Aske', email: 'wilf@newcomer.example', work: 'No house yet', password: 'newcomer' } as const;
