@@ -63,7 +63,7 @@ export async function createMaterial(em: EntityManager, actor: Actor, fields: Ma
 export async function addMaterial(em: EntityManager, actor: Actor, fields: MaterialFields, now: Date): Promise<Material> {
   const material = em.create(Material, {
     houseId: actor.houseId,
-    ...toColumns(fields),
+    ...toMaterialColumns(fields),
     savedAt: now,
     savedById: actor.personId,
     savedBy: actor.name,
@@ -80,7 +80,7 @@ export async function updateMaterial(
 ): Promise<MaterialView> {
   requireSound(input.fields);
   const material = await lockMaterial(em, actor, input);
-  Object.assign(material, toColumns(input.fields));
+  Object.assign(material, toMaterialColumns(input.fields));
   return save(em, actor, material, input.now);
 }
 
@@ -123,7 +123,8 @@ function requireSound(fields: MaterialFields): void {
   if (issues.length > 0) throw new AppError('invalid', { issues });
 }
 
-function toColumns(fields: MaterialFields) {
+/** The columns of a material's fields, with the text that the list searches. */
+export function toMaterialColumns(fields: MaterialFields) {
   const { tradeName, supplier, declareAs, composition, constituents, pricePerKg, currency, notes, handling } = fields;
   const searchText = toSearchText([tradeName, supplier, ...composition.map((line) => line.inci)]);
   return { tradeName, supplier, declareAs, composition, constituents, pricePerKg, currency, notes, handling, searchText };

@@ -12,7 +12,7 @@ const FIRST_LABEL: Omit<LabelSettings, 'market'> = {
   barcode: null,
   press: { standard: 'PDF/X-1a:2003', condition: 'FOGRA39' },
   template: 'galley',
-  ink: '',
+  ink: 'juniper',
 };
 
 /** A product with nothing in it yet but what the house prints on all of its labels. */

@@ -64,7 +64,7 @@ export async function addProduct(em: EntityManager, actor: Actor, draft: Product
   await requireSound(em, actor, draft, context, at);
   const product = em.create(Product, {
     houseId: actor.houseId,
-    ...toColumns(draft),
+    ...toProductColumns(draft),
     version: 1,
     savedAt: context.now,
     savedById: actor.personId,
@@ -88,7 +88,7 @@ export async function updateProduct(
   const product = await lockProduct(em, actor, input);
   if (!can(actor, 'edit', 'products')) requireLabelPartOnly(product.draft, input.draft);
   await requireSound(em, actor, input.draft, context, '/draft');
-  Object.assign(product, toColumns(input.draft));
+  Object.assign(product, toProductColumns(input.draft));
   return save(em, actor, product, context.now);
 }
 
@@ -168,6 +168,7 @@ async function requireSound(em: EntityManager, actor: Actor, draft: ProductDraft
   if (issues.length > 0) throw new AppError('invalid', { issues });
 }
 
-function toColumns(draft: ProductDraft) {
+/** The columns of a draft, with the text that the list searches. */
+export function toProductColumns(draft: ProductDraft) {
   return { name: draft.name, markets: [...draft.markets], draft, searchText: toSearchText([draft.name, draft.brand, draft.category.replaceAll('-', ' ')]) };
 }
