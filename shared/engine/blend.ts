@@ -53,9 +53,11 @@ interface Gathering {
   occurrences: Occurrence[];
 }
 
-/** Mixes the formula's lines. Materials that no line uses, or that weigh nothing, take no part. */
-export function blendFormula(document: FormulaDocument, dictionary: Dictionary): Blend {
-  const weighed = weighLines(document);
+/**
+ * Mixes the formula's lines (or the same lines with other masses). Materials that no line
+ * uses, or that weigh nothing, take no part.
+ */
+export function blendFormula(document: FormulaDocument, dictionary: Dictionary, weighed: WeighedLines = weighLines(document)): Blend {
   const materials = blendMaterials(document, dictionary, weighed);
   const common = materials.reduce((least, one) => lcm(least, one.prepared.den), 1n);
   const den = weighed.total * common;

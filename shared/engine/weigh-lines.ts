@@ -54,3 +54,11 @@ export function weighLines(document: FormulaDocument, amounts?: readonly string[
 export function totalMass(weighed: WeighedLines): Rational {
   return { n: weighed.total, d: weighed.den };
 }
+
+/** The same lines with one at another share of the sum (in percent), all others in proportion. */
+export function withShare(weighed: WeighedLines, line: number, share: Rational): WeighedLines {
+  const others = weighed.total - weighed.masses[line]!;
+  const rest = 100n * share.d - share.n;
+  const masses = weighed.masses.map((mass, index) => (index === line ? share.n * others : mass * rest));
+  return { ...weighed, masses, total: 100n * share.d * others };
+}

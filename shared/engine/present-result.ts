@@ -1,0 +1,63 @@
+import type { MarketResult, ResultDocument } from '#shared/contracts/result-document.ts';
+import { toDecimal } from '#shared/kernel/rational.ts';
+import type { AllergenVerdict } from './allergens.ts';
+import type { Assessment, DeclarationEntry, EntrySource, MarketAssessment } from './assessment.ts';
+import { rangeText } from './list-findings.ts';
+
+/**
+ * The result document of an assessment: exact decimals where they end within 12 places,
+ * otherwise rounded half-even to 12.
+ */
+export function presentResult(assessment: Assessment): ResultDocument {
+  const totalMass = toDecimal(assessment.totalMass);
+  return {
+    document: 'result/1',
+    dataRelease: assessment.dataRelease,
+    results: assessment.results.map((result) => presentMarket(result, totalMass)),
+  };
+}
+
+function presentMarket(result: MarketAssessment, totalMass: string): MarketResult {
+  const { market, placedOnMarket, availableOn, exposure, declaration } = result;
+  return {
+    market,
+    placedOnMarket,
+    availableOn,
+    exposure,
+    totalMass,
+    declaration: { heading: declaration.heading, text: declaration.text, entries: declaration.entries.map(presentEntry) },
+    allergens: result.allergens.map(presentAllergen),
+    findings: result.findings as MarketResult['findings'],
+    requiredWording: result.requiredWording as MarketResult['requiredWording'],
+    headroom: [...result.headroom()],
+  };
+}
+
+function presentEntry(entry: DeclarationEntry): MarketResult['declaration']['entries'][number] {
+  return {
+    name: entry.name,
+    inci: entry.inci,
+    zone: entry.zone,
+    share: rangeText(entry.share),
+    sources: entry.sources.map(presentSource),
+    ...(entry.certainty && { certainty: entry.certainty }),
+    ...(entry.members && { members: [...entry.members] }),
+  };
+}
+
+function presentAllergen(verdict: AllergenVerdict): MarketResult['allergens'][number] {
+  return {
+    name: verdict.name,
+    total: rangeText(verdict.total),
+    threshold: verdict.threshold,
+    disclose: verdict.disclose,
+    ...(verdict.certainty && { certainty: verdict.certainty }),
+    sources: verdict.sources.map(presentSource),
+    members: verdict.substances.map(({ name }) => name),
+    citation: verdict.citation,
+  };
+}
+
+function presentSource(source: EntrySource): { material: string; share: string } {
+  return { material: source.materialId, share: toDecimal(source.share.typical) };
+}

@@ -1,0 +1,37 @@
+import type { Rational } from '#shared/kernel/rational.ts';
+import type { EntrySource } from './assessment.ts';
+import type { Blend, BlendedSubstance } from './blend.ts';
+import type { Way } from './prepare-material.ts';
+
+/** Where a set of substances comes from, one row for each material, largest share first. */
+export function sourcesOf(blend: Blend, substances: readonly BlendedSubstance[], ways: 'ingredient' | 'all'): EntrySource[] {
+  const found = new Map<number, { lo: bigint; typ: bigint; hi: bigint; names: string[]; ways: Set<Way> }>();
+  for (const { occurrences, name } of substances) {
+    for (const { at, group } of occurrences) {
+      if (ways === 'ingredient' && group.way !== 'ingredient') continue;
+      let source = found.get(at);
+      if (!source) found.set(at, (source = { lo: 0n, typ: 0n, hi: 0n, names: [], ways: new Set() }));
+      source.lo += group.lo;
+      source.typ += group.typ;
+      source.hi += group.hi;
+      source.ways.add(group.way);
+      if (!source.names.includes(name)) source.names.push(name);
+    }
+  }
+  const rows = [...found].map(([at, { lo, typ, hi, names, ways: present }]): EntrySource => {
+    const { prepared, weight, lines, mass } = blend.materials[at]!;
+    const ofMaterial = (figure: bigint): Rational => ({ n: figure, d: prepared.den });
+    return {
+      materialId: prepared.material.id,
+      tradeName: prepared.material.tradeName,
+      lines,
+      mass: { n: mass, d: blend.weighed.den },
+      materialShare: { n: mass * 100n, d: blend.weighed.total },
+      ofMaterial: { min: ofMaterial(lo), typical: ofMaterial(typ), max: ofMaterial(hi) },
+      share: { min: blend.share(weight * lo), typical: blend.share(weight * typ), max: blend.share(weight * hi) },
+      names,
+      ways: [...present],
+    };
+  });
+  return rows.sort((a, b) => (a.share.typical.n > b.share.typical.n ? -1 : a.share.typical.n < b.share.typical.n ? 1 : 0));
+}
