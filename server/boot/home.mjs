@@ -3,7 +3,7 @@ import { createHash } from 'node:crypto';
 import { mkdirSync, readFileSync, renameSync, statfsSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
-import { canEnter, postgresAccount } from './postgres.mjs';
+import { canEnter, findPostgres, postgresAccount } from './postgres.mjs';
 import { Stop } from './say.mjs';
 
 /** The checkout this file belongs to. */
@@ -14,7 +14,8 @@ export const CHECKOUT = resolve(dirname(fileURLToPath(import.meta.url)), '../..'
  * @param {string} [checkout]
  * @param {string} [wanted] */
 export function openHome(checkout = CHECKOUT, wanted = process.env['COLOPHON_DATA']) {
-  const account = postgresAccount();
+  // With a database from elsewhere there may be no account to ask about.
+  const account = findPostgres() ? postgresAccount() : {};
   if (wanted) {
     const home = resolve(wanted);
     mkdirSync(home, { recursive: true });

@@ -1,0 +1,78 @@
+/** The product's own processes: the server, and the stand-ins for services that are not given. */
+import { spawn } from 'node:child_process';
+import { closeSync, existsSync, openSync, readFileSync, renameSync, statSync } from 'node:fs';
+import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { endProcess, pause } from './run.mjs';
+import { Stop } from './say.mjs';
+
+/** @typedef {{ pid: number, ended: Promise<number | null>, child: import('node:child_process').ChildProcess, words: () => string, stop: () => Promise<void> }} Running */
+
+/** Starts one program in a group of its own, so that Ctrl-C reaches the starter alone. Its words go to a file.
+ * @param {{ file: string, cwd: string, log: string, env: NodeJS.ProcessEnv }} options
+ * @returns {Running} */
+export function startProgram({ file, cwd, log, env }) {
+  if (existsSync(log) && statSync(log).size > 4 * 1024 * 1024) renameSync(log, `${log}.1`);
+  const from = existsSync(log) ? statSync(log).size : 0;
+  const out = openSync(log, 'a', 0o600);
+  const leash = fileURLToPath(new URL('./with-parent.mjs', import.meta.url));
+  const child = spawn(process.execPath, ['--enable-source-maps', '--import', leash, file], { cwd, env, detached: true, stdio: ['ignore', out, out, 'ipc'] });
+  closeSync(out);
+  const ended = new Promise((/** @type {(status: number | null) => void} */ resolve) => {
+    child.once('error', () => resolve(null));
+    child.once('exit', (status) => resolve(status));
+  });
+  return {
+    pid: child.pid ?? 0,
+    child,
+    ended,
+    words: () => readFileSync(log).subarray(from).toString('utf8').trim(),
+    stop: async () => {
+      if (child.pid !== undefined && child.exitCode === null && child.signalCode === null) await endProcess(child.pid, [['SIGTERM', 10_000], ['SIGKILL', 2_000]]);
+    },
+  };
+}
+
+/** Starts the stand-ins that are wished for.
+ * @param {{ file: string, checkout: string, home: string, wish: Record<string, unknown> }} options
+ * @returns {Promise<Running & { urls: { identity?: string, mail?: string, storage?: string } }>} */
+export async function startLocalServices({ file, checkout, home, wish }) {
+  const running = startProgram({ file, cwd: checkout, log: join(home, 'services.log'), env: { PATH: process.env['PATH'], NODE_ENV: String(wish['mode']) } });
+  running.child.send(wish);
+  const answer = await Promise.race([
+    new Promise((resolve) => running.child.once('message', resolve)),
+    running.ended.then(() => ({ failed: running.words() })),
+    pause(30_000).then(() => ({ failed: 'no answer within half a minute' })),
+  ]);
+  if ('failed' in answer) {
+    await running.stop();
+    throw new Stop(`The local stand-ins for sign-in, mail and files did not start: ${answer.failed}`);
+  }
+  return { ...running, urls: answer };
+}
+
+/** Waits until the server answers.
+ * @param {Running} server @param {URL} address */
+export async function waitForServer(server, address) {
+  const until = Date.now() + 60_000;
+  let ended = false;
+  void server.ended.then(() => (ended = true));
+  while (!ended && Date.now() < until) {
+    try {
+      const answer = await fetch(new URL('/healthz', address), { signal: AbortSignal.timeout(2000) });
+      if (answer.ok) return;
+    } catch {
+      // It does not listen yet.
+    }
+    await pause(40);
+  }
+  await server.stop();
+  throw whyNot(server.words());
+}
+
+/** @param {string} words */
+function whyNot(words) {
+  if (/EADDRINUSE/.test(words)) return new Stop('The port was taken by another program just now. Start again, or set PORT to a free one.');
+  if (/ENOSPC|No space left/.test(words)) return new Stop('The disk is full. Free about 1 GB and start again; nothing that was saved is lost.');
+  return new Stop(`The server did not start. Its last words:\n${words.split('\n').slice(-30).join('\n')}`);
+}
