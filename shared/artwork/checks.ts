@@ -3,8 +3,9 @@ import { heightAt } from './heights.ts';
 import type { LabelInput } from './label-input.ts';
 import { exactMillimetres, inMillimetres } from './lengths.ts';
 import type { Misfit } from './misfits.ts';
-import { textBox, type Box, type Item, type Scene, type Text } from './scene.ts';
+import { textBox, type Scene, type Text } from './scene.ts';
 import type { Job, Setting } from './setting.ts';
+import { inkBox } from './verify.ts';
 
 /** One line of the list before the press. */
 export interface Check {
@@ -25,20 +26,6 @@ interface Subject {
 }
 
 const mm = (nanometres: number): string => String(Math.floor(nanometres / 10_000) / 100);
-
-/** Box around an item's ink, or `null` for grounds and rules, which may run off. */
-export function inkBox(item: Item, job: Pick<Job, 'metrics'>): Box | null {
-  if (item.element === 'ground' || item.element === 'rule') return null;
-  if (item.kind === 'text') return textBox(item, job.metrics.face(item.weight).capHeight);
-  const points = item.kind === 'boxes'
-    ? item.boxes.flatMap((box) => [[box.x, box.y], [box.x + box.width, box.y + box.height]])
-    : item.steps.flatMap(([, ...figures]) => Array.from({ length: figures.length / 2 }, (_, i) => [figures[2 * i]!, figures[2 * i + 1]!]));
-  const xs = points.map(([x]) => x!);
-  const ys = points.map(([, y]) => y!);
-  const x = Math.min(...xs);
-  const y = Math.min(...ys);
-  return { x, y, width: Math.max(...xs) - x, height: Math.max(...ys) - y };
-}
 
 function textCheck({ job, scene }: Subject): Check {
   const { text } = job.minimums;
@@ -116,10 +103,10 @@ function barcodeChecks({ input, job, scene, setting }: Subject): Check[] {
   ];
 }
 
-function pressChecks({ scene, input, job }: Subject): Check[] {
+function pressChecks({ scene, input }: Subject): Check[] {
   const inks = new Set(scene.items.map((item) => item.ink));
   const totals = [...inks].map((ink) => scene.inks[ink]!.cmyk.reduce((a, b) => a + b, 0));
-  const most = Math.max(0, ...totals) + (job.template === 'versal' ? 0 : 0);
+  const most = Math.max(0, ...totals);
   const texts = scene.items.filter((item): item is Text => item.kind === 'text');
   const jar = scene.items.some((item) => item.element === 'durability');
   return [

@@ -65,7 +65,7 @@ export function ledgerWidth(job: Job, blocks: readonly Block[], setting: Setting
 export function placeColumn(job: Job, setting: Setting, blocks: readonly Block[], box: ColumnBox, heads: Heads): PlacedColumn {
   const { size } = setting;
   const leading = leadingOf(setting);
-  const label = heads === 'ledger' ? ledgerWidth(job, blocks, setting, box.width) : 0;
+  const label = heads === 'ledger' && setting.tight < 2 ? ledgerWidth(job, blocks, setting, box.width) : 0;
   const cap = Math.round((CAP * size) / 1000);
   const ruleGap = Math.round(size * (setting.tight === 0 ? 0.54 : 0.44));
   const rowGap = Math.round(leading * (setting.tight === 2 ? 1.35 : setting.tight === 1 ? 1.45 : 1.6));
@@ -90,7 +90,7 @@ export function placeColumn(job: Job, setting: Setting, blocks: readonly Block[]
       if (tooWide) overflows.push({ element: block.name, direction: 'width', missing: tooWide.by, room: box.width - label, word: tooWide.text });
       lines.forEach((line, l) => {
         y += leading;
-        items.push(...lineItems(job, line, l === lines.length - 1 && p === block.paragraphs.length - 1, { x, y, size, block, strongInk: 'ink' }));
+        if (!job.dry) items.push(...lineItems(job, line, l === lines.length - 1 && p === block.paragraphs.length - 1, { x, y, size, block, strongInk: 'ink' }));
       });
     });
     if (y > box.limit && (overflows.every((o) => o.direction === 'width'))) {

@@ -1,5 +1,5 @@
 import { placeColumn, type Heads } from './column.ts';
-import { barsFoot, markFoot, netFoot, placeFeet, type Foot } from './feet.ts';
+import { barsFoot, markFoot, netFoot, placeFeet, placeRows, type Foot, type PlacedFeet } from './feet.ts';
 import { fitBrand, galleyFront, greatLetter, versalFront } from './front.ts';
 import { lengthOf } from './metrics.ts';
 import type { Box, Item, Micrometres, Panel } from './scene.ts';
@@ -32,7 +32,7 @@ function feetOf(job: Job, setting: Setting, names: readonly FootName[], room: Mi
 function fillSlot(job: Job, setting: Setting, plan: ColumnPlan, slot: Slot, heights: Heights, heads: Heads): { items: Item[]; overflows: Overflow[] } {
   const gap = setting.tight === 0 ? 4500 : setting.tight === 1 ? 3200 : 2200;
   const beside = feetOf(job, setting, plan.beside, slot.width);
-  const slice = Math.max(0, ...beside.map((foot) => foot.width + (foot.name === 'bars' ? Math.max(0, foot.clear[1] - slot.hang) + Math.max(2500, foot.clear[0]) : 2500)));
+  const slice = Math.max(0, ...beside.map((foot) => foot.width + (foot.name === 'bars' ? Math.max(0, foot.clear[1] - slot.hang) + foot.clear[0] + 1500 : 2500)));
   const width = slot.width - slice;
   const feet = placeFeet(feetOf(job, setting, plan.feet, width), { x: slot.x, width, foot: heights.foot, hang: slot.hang, toEdge: slice === 0 }, gap);
   const blocks = plan.texts.flatMap((name) => job.content.blocks[name] ?? []);
@@ -94,7 +94,7 @@ function wrapSlots(job: Job, setting: Setting): Slots {
   const px = Math.round((W - panel) / 2);
   return {
     front: { x: fx, width: front, hang: gutter },
-    columns: [{ x: left, width: fx - gutter - left, hang: edge - SAFE }, { x: fx + front + gutter, width: W - edge - fx - front - gutter, hang: Math.min(edge - 1000, gutter - 700) }],
+    columns: [{ x: left, width: fx - gutter - left, hang: overlap > 0 ? edge - overlap - 300 : 300 }, { x: fx + front + gutter, width: W - edge - fx - front - gutter, hang: Math.min(overlap > 0 ? edge - overlap - 100 : 300, gutter - 700) }],
     panels: [
       { name: 'Left', x: overlap, y: 0, width: px - overlap, height: H },
       { name: 'Front', x: px, y: 0, width: panel, height: H },
@@ -118,7 +118,7 @@ function splitSlots(job: Job, setting: Setting): Slots {
   const edge = isVersal ? margin + front + Math.round(gutter / 2) : margin + front + Math.round(gutter / 2);
   return {
     front: { x: margin, width: front, hang: margin },
-    columns: setting.columns.map((_, i) => ({ x: margin + front + gutter + i * (each + between), width: each, hang: Math.min(margin - 200, (isVersal && i === 0 ? gutter / 2 : gutter) - 600) })),
+    columns: setting.columns.map((_, i) => ({ x: margin + front + gutter + i * (each + between), width: each, hang: Math.max(0, Math.min(edgeHang(job, margin), (isVersal && i === 0 ? gutter / 2 : gutter) - 600)) })),
     panels: [{ name: 'Front', x: 0, y: 0, width: edge, height: H }, { name: 'Particulars', x: edge, y: 0, width: W - edge, height: H }],
   };
 }
@@ -127,7 +127,13 @@ function splitSlots(job: Job, setting: Setting): Slots {
 function marginOf(job: Job, setting: Setting): Micrometres {
   const short = Math.min(job.sheet.width, job.sheet.height);
   const drawn = Math.min(7000, Math.round(short / 14));
-  return Math.max(SAFE, [drawn, Math.round(drawn * 0.75), 0][setting.tight]!);
+  // A little over the safe margin: letters such as A and w hang over the edge of their column.
+  return Math.max(SAFE + 200, [drawn, Math.round(drawn * 0.75), 0][setting.tight]!);
+}
+
+/** How far the quiet zone of bars may reach over the margin: its digit keeps the safe margin and the seam. */
+function edgeHang(job: Job, margin: Micrometres): Micrometres {
+  return Math.max(0, margin - Math.max(SAFE, job.sheet.overlap) + 300);
 }
 
 function hungHead(job: Job, setting: Setting, plan: ColumnPlan, slot: Slot, y: Micrometres): Item[] {
@@ -210,19 +216,20 @@ function stack(job: Job, setting: Setting): Attempt {
   const count = setting.columns.length;
   const between = Math.max(4000, Math.round(inner * 0.05));
   const each = Math.floor((inner - (count - 1) * between) / count);
-  const feetNames: FootName[] = ['net', ...setting.columns.flatMap((plan) => plan.feet)];
-  const feet = placeFeet(feetOf(job, setting, feetNames, inner), { x: margin, width: inner, foot, hang: margin - 200, toEdge: true }, gap);
+  // Where the law wants net content in the lower part of the panel it stands with the feet, else on the front.
+  const isNetLow = job.minimums.netContentZone > 0;
+  const feet = stackFeet(job, setting, { margin, inner, foot, gap, isNetLow });
   const heads: Heads = job.template === 'versal' ? 'ledger' : 'inline';
   const trial = setting.columns.map((plan) => placeColumn(job, setting, plan.texts.flatMap((name) => job.content.blocks[name] ?? []), { x: 0, width: each, top: 0, limit: 9e9 }, heads));
   const textHeight = Math.max(0, ...trial.map((column) => column.bottom));
   const ruleRoom = heads === 'ledger' ? Math.round(setting.size * 0.5) : 0;
   const top = feet.limit - textHeight - ruleRoom;
-  const headRoom = top - Math.round(setting.size * (heads === 'ledger' ? 1.1 : 1.2)) - (heads === 'ledger' ? 0 : 0);
+  const headRoom = top - Math.round(setting.size * 1.15);
   const heights: Heights = { top, foot: feet.limit };
   const columns = setting.columns.map((plan, i) => placeColumn(job, setting, plan.texts.flatMap((name) => job.content.blocks[name] ?? []), { x: margin + i * (each + between), width: each, top: heights.top, limit: 9e9 }, heads));
   const frontWidth = shape === 'cylinder' ? Math.min(inner, Math.round(round * 0.4)) : inner;
   const panels: Panel[] = [{ name: 'Front', x: 0, y: 0, width: W, height: Math.max(0, headRoom) }, { name: 'Particulars', x: 0, y: Math.max(0, headRoom), width: W, height: H - Math.max(0, headRoom) }];
-  const head = job.template === 'versal' ? versalHead(job, setting, { margin, frontWidth, bottom: headRoom }) : galleyHead(job, setting, { margin, frontWidth, bottom: headRoom });
+  const head = job.template === 'versal' ? versalHead(job, setting, { margin, frontWidth, bottom: headRoom, isNetLow }) : galleyHead(job, setting, { margin, frontWidth, bottom: headRoom, isNetLow });
   return {
     items: [...head.items, ...columns.flatMap((column) => column.items), ...feet.items],
     overflows: [...head.overflows, ...columns.flatMap((column) => column.overflows), ...feet.overflows],
@@ -230,11 +237,26 @@ function stack(job: Job, setting: Setting): Attempt {
   };
 }
 
-function versalHead(job: Job, setting: Setting, at: { margin: Micrometres; frontWidth: Micrometres; bottom: Micrometres }): { items: Item[]; overflows: readonly Overflow[] } {
+/** The feet of a stacked label across its whole width; low net content takes the last row where one row is too short for all. */
+function stackFeet(job: Job, setting: Setting, at: { margin: Micrometres; inner: Micrometres; foot: Micrometres; gap: Micrometres; isNetLow: boolean }): PlacedFeet {
+  const names = setting.columns.flatMap((plan) => plan.feet);
+  const box = { x: at.margin, width: at.inner, foot: at.foot, hang: edgeHang(job, at.margin), toEdge: true };
+  const feet = feetOf(job, setting, names, at.inner);
+  if (!at.isNetLow) return placeFeet(feet, box, at.gap);
+  const ways = [at.inner, Math.round(at.inner * 0.48)].flatMap((room) => {
+    const net = feetOf(job, setting, ['net'], room);
+    const [mark, bars] = ['mark', 'bars'].map((name) => feet.filter((foot) => foot.name === name)) as [Foot[], Foot[]];
+    const rows = [[[...net, ...mark, ...bars]], [[...mark, ...bars], net], [mark, [...net, ...bars]], [[...net, ...mark], bars], [mark, bars, net]];
+    return rows.map((way) => placeRows(way.filter((row) => row.length > 0), box, at.gap));
+  });
+  return ways.reduce((best, way) => (way.overflows.length < best.overflows.length || (way.overflows.length === best.overflows.length && way.limit > best.limit) ? way : best));
+}
+
+function versalHead(job: Job, setting: Setting, at: { margin: Micrometres; frontWidth: Micrometres; bottom: Micrometres; isNetLow: boolean }): { items: Item[]; overflows: readonly Overflow[] } {
   const ground: Box = { x: -20_000, y: -20_000, width: job.sheet.width + 40_000, height: Math.max(1, at.bottom) + 20_000 };
   const pad = setting.tight === 2 ? 1600 : Math.round(Math.min(at.margin, 4500) * 0.85);
   const top = Math.max(SAFE, Math.min(at.margin, 6500));
-  const front = versalFront(job, setting, { x: at.margin, width: at.frontWidth, top, foot: at.bottom - pad, holdsNet: false });
+  const front = versalFront(job, setting, { x: at.margin, width: at.frontWidth, top, foot: at.bottom - pad, holdsNet: !at.isNetLow });
   return {
     items: [
       { kind: 'boxes', element: 'ground', ink: 'ink', boxes: [ground] },
@@ -245,7 +267,7 @@ function versalHead(job: Job, setting: Setting, at: { margin: Micrometres; front
   };
 }
 
-function galleyHead(job: Job, setting: Setting, at: { margin: Micrometres; frontWidth: Micrometres; bottom: Micrometres }): { items: Item[]; overflows: readonly Overflow[] } {
+function galleyHead(job: Job, setting: Setting, at: { margin: Micrometres; frontWidth: Micrometres; bottom: Micrometres; isNetLow: boolean }): { items: Item[]; overflows: readonly Overflow[] } {
   const brand = fitBrand(job, at.frontWidth, Math.max(leastText(job, 500), Math.round(4200 * job.scale)));
   const { line, weight, head } = galleyLine(job, setting, brand);
   const y = Math.min(line, Math.max(galleyLine(job, { ...setting, tight: 2 }, brand).line, Math.round(at.bottom * 0.3)));
@@ -253,7 +275,7 @@ function galleyHead(job: Job, setting: Setting, at: { margin: Micrometres; front
   const brandItems = job.content.brand
     ? brand.lines.map((text, i) => textItem(job.metrics, { element: 'brand', text: i < brand.lines.length - 1 ? `${text} ` : text, weight: 500, size: brand.size, x: at.margin, y: y - head - Math.round(brand.size * 1.15) * (brand.lines.length - 1 - i), ink: 'black', hang: true }))
     : [];
-  const front = galleyFront(job, setting, { x: at.margin, width: at.frontWidth, top: y + weight + hang, foot: at.bottom - leadingOf(setting) + setting.size, holdsNet: false });
+  const front = galleyFront(job, setting, { x: at.margin, width: at.frontWidth, top: y + weight + hang, foot: at.bottom - leadingOf(setting) + setting.size, holdsNet: !at.isNetLow });
   return {
     items: [{ kind: 'boxes', element: 'rule', ink: 'ink', boxes: [{ x: -20_000, y, width: job.sheet.width + 40_000, height: weight }] }, ...brandItems, ...front.items],
     overflows: shortage(front.overflows, at.bottom),
@@ -273,6 +295,6 @@ export function compose(job: Job, setting: Setting): Attempt {
   if (setting.regime === 'stack') return stack(job, setting);
   const slots = setting.regime === 'wrap' ? wrapSlots(job, setting) : splitSlots(job, setting);
   const narrow = [slots.front, ...slots.columns].find((slot) => slot.width < setting.size * 5);
-  if (narrow) return { items: [], panels: slots.panels, overflows: [{ element: 'ingredients', direction: 'width', missing: setting.size * 5 - narrow.width, room: Math.max(0, narrow.width) }] };
+  if (narrow) return { isHopeless: true, items: [], panels: slots.panels, overflows: [{ element: 'ingredients', direction: 'width', missing: setting.size * 5 - narrow.width, room: Math.max(0, narrow.width) }] };
   return job.template === 'versal' ? versal(job, setting, slots) : galley(job, setting, slots);
 }

@@ -30,7 +30,7 @@ export function netFoot(job: Job, width: Micrometres, ink: string): Foot & { rea
   const eSize = Math.max(size, 4500);
   const eWidth = job.content.eMark ? Math.round(size * 0.5) + lengthOf(job.metrics.face(400), '℮', eSize) : 0;
   const whole = parts.join(' ');
-  const lines = lengthOf(face, whole, size) + eWidth <= width ? [whole] : parts.flatMap((part) => (lengthOf(face, part, size) <= width ? [part] : part.split(/ (?=\(|\d|[a-z])/)));
+  const lines = lengthOf(face, whole, size) + eWidth <= width ? [whole] : parts;
   const leading = Math.round(size * 1.12);
   const capHeight = Math.ceil((face.capHeight * size) / 1000);
   const widest = Math.max(0, ...lines.map((line, i) => lengthOf(face, line, size) + (i === lines.length - 1 ? eWidth : 0)));
@@ -138,7 +138,7 @@ function digitItem(symbol: Symbol, text: string, at: { x: Micrometres; y: Microm
 function ladderFoot(symbol: Symbol, half: Micrometres): Foot {
   const [before] = symbol.quiet;
   return {
-    name: 'bars', element: 'barcode', width: symbol.depth, height: symbol.width, clear: [1500, 1500, before],
+    name: 'bars', element: 'barcode', width: symbol.depth, height: symbol.width, clear: [1500, 1500, before + 700],
     draw: (x, y) => {
       const top = y - symbol.width;
       return [
@@ -156,14 +156,28 @@ export interface PlacedFeet {
   readonly limit: Micrometres;
 }
 
-/** Stands feet in rows from the last base line upwards, left to right; the last of a full row goes to the right edge. */
-export function placeFeet(feet: readonly Foot[], box: { x: Micrometres; width: Micrometres; foot: Micrometres; hang: Micrometres; toEdge: boolean }, gap: Micrometres): PlacedFeet {
+export interface FeetBox {
+  readonly x: Micrometres;
+  readonly width: Micrometres;
+  readonly foot: Micrometres;
+  readonly hang: Micrometres;
+  /** The last of a row goes to the right edge. */
+  readonly toEdge: boolean;
+}
+
+/** Stands feet in as few rows as the width allows, filled from the left. */
+export function placeFeet(feet: readonly Foot[], box: FeetBox, gap: Micrometres): PlacedFeet {
   const rows: Foot[][] = [];
   for (const foot of feet) {
     const row = rows.at(-1);
     if (row && rowWidth([...row, foot], box.hang) <= box.width) row.push(foot);
     else rows.push([foot]);
   }
+  return placeRows(rows, box, gap);
+}
+
+/** Stands given rows of feet from the last base line upwards. */
+export function placeRows(rows: readonly (readonly Foot[])[], box: FeetBox, gap: Micrometres): PlacedFeet {
   const items: Item[] = [];
   const overflows: Overflow[] = [];
   let y = box.foot;
@@ -171,9 +185,10 @@ export function placeFeet(feet: readonly Foot[], box: { x: Micrometres; width: M
     let x = box.x + Math.max(0, row[0]!.clear[0] - box.hang) * (row[0]!.name === 'bars' ? 1 : 0);
     row.forEach((foot, i) => {
       const isLast = i === row.length - 1 && i > 0 && box.toEdge;
+      const tail = foot.name === 'bars' ? Math.max(0, foot.clear[1] - box.hang) : 0;
       if (i > 0) x += between(row[i - 1]!, foot);
-      if (isLast) x = Math.max(x, box.x + box.width - foot.width - Math.max(0, (foot.name === 'bars' ? foot.clear[1] : 0) - box.hang));
-      const over = x + foot.width - (box.x + box.width);
+      if (isLast) x = Math.max(x, box.x + box.width - foot.width - tail);
+      const over = x + foot.width + tail - (box.x + box.width);
       if (over > 0) overflows.push({ element: foot.element, direction: 'width', missing: over, room: box.width });
       items.push(...foot.draw(x, y));
       x += foot.width;

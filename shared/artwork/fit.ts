@@ -3,6 +3,7 @@ import { mayStandUpright } from './feet.ts';
 import type { Micrometres } from './scene.ts';
 import type { Attempt, ColumnPlan, Job, Setting } from './setting.ts';
 import type { BlockName } from './content.ts';
+import { verifyAttempt } from './verify.ts';
 
 const USE: readonly BlockName[] = ['directions', 'warnings'];
 
@@ -22,6 +23,11 @@ const TWO: readonly (readonly ColumnPlan[])[] = [
   [plan([...USE, 'responsible person'], ['mark']), plan(['ingredients'], [], ['bars'])],
   [plan(['directions', 'responsible person'], ['mark', 'bars']), plan(['warnings', 'ingredients'])],
   [plan(['responsible person'], ['mark', 'bars']), plan([...USE, 'ingredients'])],
+  [plan(USE, ['mark'], ['bars']), plan(['ingredients', 'responsible person'])],
+  [plan(['responsible person'], ['mark'], ['bars']), plan([...USE, 'ingredients'])],
+  [plan([...USE, 'responsible person'], [], ['mark']), plan(['ingredients'], [], ['bars'])],
+  [plan(USE, [], ['mark']), plan(['ingredients', 'responsible person'], [], ['bars'])],
+  [plan([], ['mark', 'bars']), plan([...USE, 'ingredients', 'responsible person'])],
   [plan(['warnings']), plan(['directions', 'ingredients', 'responsible person'], ['mark', 'bars'])],
 ];
 const ONE: readonly (readonly ColumnPlan[])[] = [
@@ -47,6 +53,7 @@ function wrapLevels(upright: boolean): Level[] {
     { ...base, columns: TWO, tight: 1 },
     { ...base, columns: TWO, tight: 2 },
     { ...base, columns: TWO, tight: 2, ladder: true },
+    { ...base, columns: TWO, tight: 2, front: 388, claim: false },
     { ...base, columns: TWO, tight: 2, front: 270, ladder: !upright },
     { ...base, columns: TWO, tight: 2, front: 270, ladder: true, claim: false },
     { ...base, columns: TWO, tight: 2, front: 215, ladder: true, claim: false },
@@ -103,7 +110,13 @@ function sizesFor(job: Job): Micrometres[] {
 }
 
 function missingOf(attempt: Attempt): number {
-  return attempt.overflows.reduce((total, overflow) => total + overflow.missing, 0);
+  return attempt.overflows.reduce((total, overflow) => total + overflow.missing, attempt.isHopeless ? 1e9 : 0);
+}
+
+/** A setting with its letters; what its parts did not see of each other is added to the gaps. */
+function setFully(job: Job, setting: Setting): Attempt {
+  const full = compose({ ...job, dry: false }, setting);
+  return full.overflows.length > 0 ? full : { ...full, overflows: verifyAttempt(job, setting, full) };
 }
 
 /**
@@ -111,18 +124,23 @@ function missingOf(attempt: Attempt): number {
  * that lacks least, with its gaps.
  */
 export function fitLabel(job: Job): Attempt & { readonly setting: Setting } {
-  let closest: (Attempt & { setting: Setting }) | null = null;
+  let closest: { missing: number; setting: Setting } | null = null;
   const sizes = sizesFor(job);
   for (const { columns, ...level } of levelsFor(job)) {
     // At a concession the size has already gone down: only the smallest sizes are worth a try.
     for (const size of level.tight === 2 ? sizes.slice(-2) : sizes) {
       for (const plans of columns) {
         const setting: Setting = { ...level, columns: plans, size };
-        const attempt = compose(job, setting);
-        if (attempt.overflows.length === 0) return { ...attempt, setting };
-        if (!closest || missingOf(attempt) < missingOf(closest)) closest = { ...attempt, setting };
+        let attempt = compose(job, setting);
+        if (attempt.overflows.length === 0) {
+          attempt = setFully(job, setting);
+          if (attempt.overflows.length === 0) return { ...attempt, setting };
+        }
+        const missing = missingOf(attempt);
+        if (!closest || missing < closest.missing) closest = { missing, setting };
       }
     }
   }
-  return closest!;
+  const { setting } = closest!;
+  return { ...setFully(job, setting), setting };
 }

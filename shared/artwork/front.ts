@@ -76,7 +76,7 @@ function titleParts(job: Job, setting: Setting, box: { width: Micrometres; heigh
   const functionWeight: Weight = isGalley ? strongWeight(job) : job.isNorthAmerican ? 700 : 300;
   const leading = isGalley ? 1020 : 1060;
   const small: Stacked[] = [
-    ...(content.claim && setting.claim ? [textPart(job, setting, content.claim, box.width, { element: 'claim', gap: Math.round(setting.size * 1.1), ink: inks.text })] : []),
+    ...(content.claim && setting.claim ? [textPart(job, setting, content.claim, box.width, { element: 'claim', gap: Math.round(setting.size * (isGalley || setting.tight === 2 ? 1.1 : 1.7)), ink: inks.text })] : []),
     ...content.frontWarnings.map((text) => textPart(job, setting, text, box.width, { element: 'warnings', gap: Math.round(setting.size * 0.9), ink: inks.text })),
   ];
   const smallHeight = small.reduce((total, part) => total + part.gap + rise(job, part), 0);
@@ -110,7 +110,7 @@ function titleParts(job: Job, setting: Setting, box: { width: Micrometres; heigh
   const nameSize = isOneSize ? oneSize : name.size;
   return [
     { element: 'name', lines: name.lines, weight: nameWeight, size: nameSize, leading: Math.round((leading * nameSize) / 1000), gap: 0, ink: inks.title },
-    ...(fn ? [{ element: 'function' as const, lines: fn.lines, weight: functionWeight, size: isOneSize ? oneSize : fn.size, leading: Math.round(fn.size * 1.1), gap, ink: inks.title }] : []),
+    ...(fn ? [{ element: 'function' as const, lines: fn.lines, weight: functionWeight, size: isOneSize ? oneSize : fn.size, leading: Math.round((isOneSize ? oneSize : fn.size) * 1.1), gap: isOneSize ? Math.round(oneSize * 0.36) : gap, ink: inks.title }] : []),
     ...small,
   ];
 }
@@ -172,8 +172,9 @@ export function greatLetter(job: Job, ground: Box): Item[] {
   const first = Array.from(job.content.name.normalize('NFD').toUpperCase()).find((letter) => job.metrics.versal(letter));
   const outline = first ? job.metrics.versal(first) : undefined;
   if (!first || !outline) return [];
-  const size = Math.round((Math.min(ground.height * 1.09, ground.width * 1.75) * 1000) / 698);
+  const size = Math.round((Math.min(Math.max(ground.height * 1.09, Math.min(ground.width * 0.8, ground.height * 1.7)), ground.width * 1.75) * 1000) / 698);
   const advance = (job.metrics.face(700).run(first).advance * size) / 1000;
+  // It runs off at the top; where it is taller than its ground, at the foot as well.
   const base = ground.y + Math.round((size * 698) / 1000 - ground.height * 0.13);
   const x = first === 'J' ? ground.x + Math.round(ground.width * 0.86 - advance) : ground.x + Math.round(ground.width * 0.36);
   const at = (figure: number, isX: boolean): Micrometres => (isX ? x : base) + Math.round(((isX ? figure : -figure) * size) / 1000);

@@ -69,7 +69,7 @@ function jobOf(input: LabelInput, sheet: Sheet, metrics: FontMetrics): Job {
     barcode: input.barcode && input.barcode.digits !== '' && !barcodeFault(input.barcode) ? input.barcode : null,
     floor: sizeForHeight(minimums.text.height, metrics.face(400).xHeight),
     netSize: Math.max(netLeast, Math.round(Math.min(6200, 6200 * scale))),
-    memo: new Map(),
+    memo: new Map(), dry: true,
   };
 }
 
@@ -96,7 +96,7 @@ function missingCharacters(input: LabelInput, metrics: FontMetrics): Misfit[] {
 function legendOf(input: LabelInput, sheet: Sheet, bleed: Micrometres): string {
   const wrap = sheet.shape === 'cylinder' ? `wrap Ø ${sheet.diameter / 1000}, overlap ${sheet.overlap / 1000}` : 'flat';
   const content = input.netContent ? ` ${input.netContent.value} ${input.netContent.unit}` : '';
-  return `${input.name}${content} · ${input.market} · ${wrap} · trim ${sheet.width / 1000} × ${sheet.height / 1000} mm · bleed ${bleed / 1000} mm`;
+  return `${content.trim()}${content ? ' · ' : ''}${input.market} · ${wrap} · trim ${sheet.width / 1000} × ${sheet.height / 1000} mm · bleed ${bleed / 1000} mm`;
 }
 
 /**

@@ -45,6 +45,8 @@ export interface Job {
   readonly netSize: Micrometres;
   readonly scale: number;
   readonly memo: Map<readonly Word[], Map<string, Broken>>;
+  /** Heights and gaps alone, without the letters of columns: for trying settings. */
+  readonly dry: boolean;
 }
 
 export interface Overflow {
@@ -61,6 +63,8 @@ export interface Placed {
 }
 export interface Attempt extends Placed {
   readonly panels: readonly Panel[];
+  /** Set where a column is too narrow to be set at all. */
+  readonly isHopeless?: boolean;
 }
 
 /** Weight of what the law wants bold: the identity and the net content in North America. */
