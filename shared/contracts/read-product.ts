@@ -1,6 +1,6 @@
 import { parsePlainDate } from '#shared/kernel/plain-date.ts';
 import { MARKETS, type Market, type ProductFlag } from '#shared/law/types.ts';
-import { DocumentWalk, decimalText, isAbsent, show } from './document-walk.ts';
+import { decimalText, isAbsent, show, type DocumentWalk } from './document-walk.ts';
 import type { DocumentParticulars, DocumentProduct } from './formula-document.ts';
 
 const FLAGS: readonly ProductFlag[] = ['under3', 'professionalUseOnly', 'aerosol', 'spray', 'intimateHygiene'];
