@@ -1,0 +1,72 @@
+import { ZERO } from '#shared/kernel/rational.ts';
+import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
+import type { Finding, Mixture, ProductFacts, RequiredWording, Substance } from '#shared/engine/types.ts';
+import { foldName } from '#shared/law/fold.ts';
+import type { LawBook } from '#shared/law/law-book.ts';
+import type { LawRow } from '#shared/law/types.ts';
+import { judgeUsColours } from './colours/us-colours.ts';
+import type { Context } from './context.ts';
+import { judgeParticulars } from './particulars/judge-particulars.ts';
+import { judgePositiveLists } from './positive-lists/use-not-listed.ts';
+import { judgeFormaldehyde, theoreticalFormaldehyde } from './preservatives/formaldehyde.ts';
+import { judgeIsothiazolinones } from './preservatives/isothiazolinones.ts';
+import { gatherRows } from './substances/gather.ts';
+import { judgeRow } from './substances/judge-row.ts';
+import { judgeRows, presentSubstances } from './substances/judge-substances.ts';
+import type { NotChecked, Outcome } from './substances/outcome.ts';
+import { judgeUpcoming, presentUpcomingWordings } from './upcoming/judge-upcoming.ts';
+import { judgeProductWarnings } from './wording/product-warnings.ts';
+import { judgeWordings, presentWording, wordingOf } from './wording/require-wording.ts';
+
+/** What the law of one market says of a product on its two days. */
+export interface LawVerdict {
+  readonly findings: Finding[];
+  readonly requiredWording: RequiredWording[];
+  /** Conditions that the product's data cannot decide; for the report's list of what was not checked. */
+  readonly notChecked: NotChecked[];
+}
+
+/**
+ * Judges a product by the law of `facts.market`: prohibited and restricted substances, positive
+ * lists, required wording, particulars and what is to come. Pure: the same input gives the same
+ * answer, findings in the order of the law.
+ */
+export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: FormulaDocument, law: LawBook): LawVerdict {
+  const formaldehyde = theoreticalFormaldehyde(mixture, law, facts);
+  const context: Context = { facts, mixture, document, law, days: facts, ...(formaldehyde ? { theoreticalFormaldehyde: formaldehyde } : {}) };
+  const notChecked: NotChecked[] = [];
+  const rows = gatherRows(mixture, law, facts.market);
+  const outcomes = judgeRows(rows, context, notChecked);
+  const later: Context = { ...context, days: { placedOnMarket: law.coveredUntil, availableOn: law.coveredUntil } };
+
+  const formaldehydeNow = judgeFormaldehyde(context);
+  const due = [...wordingOf(outcomes, context), ...formaldehydeNow, ...judgeProductWarnings(context)];
+  const prohibited = new Set(outcomes.filter((one) => one.type === 'prohibited' && one.certainty === 'certain').flatMap((one) => one.parts.map((part) => part.substance.name)));
+  const findings = [
+    ...presentSubstances(outcomes, context),
+    ...presentSubstances(judgeShades(context), context),
+    ...judgePositiveLists(context).filter((one) => !prohibited.has(one.subject)),
+    ...judgeIsothiazolinones(context),
+    ...judgeUsColours(context),
+    ...judgeWordings(due, context),
+    ...judgeParticulars(context),
+    ...judgeUpcoming(rows, outcomes, context),
+    ...presentUpcomingWordings(formaldehydeNow, judgeFormaldehyde(later), context),
+  ];
+  return { findings, requiredWording: presentWording(due, context), notChecked };
+}
+
+/** Colourants of other shades: their uses are judged, their amounts are not known. */
+function judgeShades(context: Context): Outcome[] {
+  const none = { min: ZERO, typical: ZERO, max: ZERO };
+  const outcomes: Outcome[] = [];
+  for (const { inci } of context.document.product.mayContain) {
+    const substance: Substance = { key: foldName(inci), name: inci, cas: [], purposes: ['colourant'], nano: false, as: { ingredient: none }, total: none, sources: [] };
+    const hits = new Map<LawRow, { substance: Substance; member: LawRow['members'][number] }[]>();
+    for (const { row, member } of context.law.rowsFor(substance)) {
+      if (row.list === 'colourant' && row.markets.includes(context.facts.market)) hits.set(row, [{ substance, member }]);
+    }
+    for (const [row, parts] of hits) outcomes.push(...judgeRow(row, parts, context).filter((one) => one.type === 'forbidden'));
+  }
+  return outcomes;
+}
