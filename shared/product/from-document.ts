@@ -14,7 +14,7 @@ export interface FromDocumentOptions {
  * order in which the phases first appear. A taper container has no draft form yet and leaves
  * the blank one standing.
  */
-export function fromDocument(document: FormulaDocument, { blank, materialIds }: FromDocumentOptions): ProductDraft {
+export function fromFormulaDocument(document: FormulaDocument, { blank, materialIds }: FromDocumentOptions): ProductDraft {
   const { product, label, declaration, formula } = document;
   const { particulars, durability } = product;
   return {
