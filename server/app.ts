@@ -1,6 +1,7 @@
 import compression from 'compression';
 import express, { Router, type Express } from 'express';
 import type { MikroORM } from '@mikro-orm/postgresql';
+import type { Dictionary } from '#shared/dictionary/types.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { LawTables } from '#shared/law/tables.types.ts';
 import type { AuthDeps } from '#server/auth/auth-deps.ts';
@@ -25,6 +26,8 @@ export interface AppDeps {
   readonly orm: MikroORM;
   readonly auth: AuthDeps;
   readonly law: { readonly book: LawBook; readonly tables: LawTables };
+  /** In memory: judging asks it for every name. */
+  readonly dictionary: Dictionary;
   readonly storage: ObjectStore;
   readonly now: () => Date;
   /** The built browser app. */

@@ -53,6 +53,11 @@ export async function getMaterials(em: EntityManager, actor: Actor, ids: readonl
   }));
 }
 
+/** The house's materials in use that bear one of these trade names. */
+export function findMaterialsByName(em: EntityManager, actor: Actor, tradeNames: readonly string[]): Promise<Material[]> {
+  return em.find(Material, { houseId: actor.houseId, archived: false, tradeName: { $in: [...tradeNames] } }, { orderBy: { savedAt: 'asc', id: 'asc' } });
+}
+
 /** Adds a material to the house. @throws AppError `invalid` with every fault of its figures */
 export async function createMaterial(em: EntityManager, actor: Actor, fields: MaterialFields, now: Date): Promise<MaterialView> {
   requireSound(fields);

@@ -6,7 +6,7 @@ import type { Product } from './product.entity.ts';
 
 /** The materials that a formula uses, each once, in the order of its lines. */
 export function usedMaterialIds(draft: Pick<ProductDraft, 'formula'>): string[] {
-  return [...new Set(draft.formula.phases.flatMap((phase) => phase.lines.map((line) => line.materialId.toLowerCase())))];
+  return [...new Set(draft.formula.phases.flatMap((phase) => phase.lines.map((line) => line.materialId)))];
 }
 
 /** Brings the record of used materials in line with the saved draft. */

@@ -161,7 +161,7 @@ async function requireSound(em: EntityManager, actor: Actor, draft: ProductDraft
   const known = new Set((await getMaterials(em, actor, usedMaterialIds(draft))).map(({ material }) => material.id));
   draft.formula.phases.forEach((phase, phaseAt) => {
     phase.lines.forEach((line, lineAt) => {
-      if (known.has(line.materialId.toLowerCase())) return;
+      if (known.has(line.materialId)) return;
       issues.push({ pointer: `${at}/formula/phases/${phaseAt}/lines/${lineAt}/materialId`, message: 'This material is not in your house. Choose another or add it first.' });
     });
   });
