@@ -1,0 +1,70 @@
+import { memo, useId } from 'react';
+import './artwork-fonts.css';
+import type { Box, Item, PathStep, Scene, Text } from '#shared/artwork/scene.ts';
+
+const mm = (micrometres: number): number => micrometres / 1000;
+
+function pathData(steps: readonly PathStep[]): string {
+  return steps.map(([command, ...figures]) => command + figures.map(mm).join(' ')).join('');
+}
+function boxData(box: Box): string {
+  return `M${mm(box.x)} ${mm(box.y)}h${mm(box.width)}v${mm(box.height)}h${mm(-box.width)}z`;
+}
+
+/** Where each character of a run stands, in millimetres: the same sums as the press file makes. */
+export function characterPlaces(item: Text): number[] {
+  return item.offsets.map((offset) => mm(item.x + (offset * item.size) / 1000));
+}
+
+function ArtText({ item, fill }: { item: Text; fill: string }) {
+  const common = { fontSize: mm(item.size), fontWeight: item.weight, fill };
+  if (item.turn === 0) return <text {...common} x={characterPlaces(item).join(' ')} y={mm(item.y)}>{item.text}</text>;
+  const along = item.offsets.map((offset) => mm((offset * item.size) / 1000)).join(' ');
+  return <text {...common} x={along} y={0} transform={`translate(${mm(item.x)} ${mm(item.y)}) rotate(${item.turn})`}>{item.text}</text>;
+}
+
+function ArtItem({ item, scene, clipOf }: { item: Item; scene: Scene; clipOf: (box: Box) => string }) {
+  const fill = scene.inks[item.ink]!.screen;
+  const clipPath = item.clip ? `url(#${clipOf(item.clip)})` : undefined;
+  if (item.kind === 'text') return <ArtText item={item} fill={fill} />;
+  if (item.kind === 'boxes') return <path d={item.boxes.map(boxData).join('')} fill={fill} clipPath={clipPath} shapeRendering={item.element === 'barcode' ? 'crispEdges' : undefined} />;
+  return item.stroke === undefined
+    ? <path d={pathData(item.steps)} fill={fill} clipPath={clipPath} />
+    : <path d={pathData(item.steps)} fill="none" stroke={fill} strokeWidth={mm(item.stroke)} strokeLinecap="round" strokeLinejoin="round" clipPath={clipPath} />;
+}
+
+export interface LabelArtProps {
+  readonly scene: Scene;
+  /** Show what will be cut away. */
+  readonly bleed?: boolean;
+}
+
+/** The printed label as an SVG group in millimetres, 0 0 at the upper left corner of the trim. */
+export const LabelArt = memo(function LabelArt({ scene, bleed = false }: LabelArtProps) {
+  const id = useId().replace(/:/g, '');
+  const over = bleed ? scene.bleed : 0;
+  const sheet: Box = { x: -over, y: -over, width: scene.trim.width + 2 * over, height: scene.trim.height + 2 * over };
+  const clips = scene.items.flatMap((item) => item.clip ?? []);
+  const clipOf = (box: Box): string => `${id}-${clips.indexOf(box)}`;
+  return (
+    <g className="label-art">
+      <clipPath id={`${id}-sheet`}><path d={boxData(sheet)} /></clipPath>
+      {clips.map((clip, index) => <clipPath key={index} id={`${id}-${index}`}><path d={boxData(clip)} /></clipPath>)}
+      <g clipPath={`url(#${id}-sheet)`}>
+        <path d={boxData(sheet)} fill="#ffffff" />
+        {scene.items.map((item, index) => <ArtItem key={index} item={item} scene={scene} clipOf={clipOf} />)}
+      </g>
+    </g>
+  );
+});
+
+/** The front of a label, drawn small at a common scale; the whole label where it has no front of its own. */
+export function LabelThumbnail({ scene, height, name }: { scene: Scene; height: number; name: string }) {
+  const front = scene.shape === 'cylinder' ? scene.panels.find((panel) => panel.name === 'Front') : undefined;
+  const view = front && front.height > 0 ? front : { x: 0, y: 0, width: scene.trim.width, height: scene.trim.height };
+  return (
+    <svg role="img" aria-label={`Label of ${name}`} height={height} width={(height * view.width) / view.height} viewBox={`${mm(view.x)} ${mm(view.y)} ${mm(view.width)} ${mm(view.height)}`}>
+      <LabelArt scene={scene} />
+    </svg>
+  );
+}
