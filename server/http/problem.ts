@@ -95,6 +95,6 @@ export function isConnectionFault(error: unknown): boolean {
   const fault: Faulty = error;
   if (typeof fault.code === 'string' && CONNECTION_CODES.has(fault.code)) return true;
   if (fault.name === 'KnexTimeoutError') return true;
-  if (error instanceof Error && error.message.startsWith('Connection terminated')) return true;
+  if (error instanceof Error && /^(Connection terminated|Unable to acquire a connection|timeout exceeded when trying to connect)/.test(error.message)) return true;
   return isConnectionFault(fault.cause);
 }

@@ -1,0 +1,48 @@
+import { createServer } from 'node:http';
+import { resolve } from 'node:path';
+import { openLawBook } from '#shared/law/law-book.ts';
+import { lawTables } from '#shared/law/tables.ts';
+import { createApp } from '#server/app.ts';
+import { createIdentityClient } from '#server/auth/identity-client.ts';
+import { openOrm } from '#server/db/orm.ts';
+import { membershipsOf, runQuery } from '#server/db/run-query.ts';
+import { readEnv } from '#server/env.ts';
+import { logEvent, logFault } from '#server/http/log.ts';
+import { loadDictionary } from '#server/modules/dictionary/dictionary.service.ts';
+import { createObjectStore } from '#server/storage/object-store.ts';
+
+const env = readEnv();
+const now = () => new Date();
+const orm = await openOrm(env.database.url);
+const storage = createObjectStore(env.storage);
+await storage.prepare();
+const app = createApp({
+  orm,
+  auth: {
+    query: runQuery(orm),
+    now,
+    publicUrl: env.publicUrl,
+    identity: createIdentityClient(env.identity),
+    membershipsOf: membershipsOf(orm),
+    onEvent: logEvent,
+  },
+  law: { book: openLawBook(lawTables), tables: lawTables },
+  dictionary: await loadDictionary(orm.em.fork()),
+  storage,
+  now,
+  clientDir: resolve('build/client'),
+  log: logFault,
+});
+
+// Slow or broken clients do not hold a connection: headers in 15 s, a whole upload in 5 min.
+const server = createServer({ headersTimeout: 15_000, requestTimeout: 300_000, keepAliveTimeout: 5_000, maxHeaderSize: 16_384 }, app);
+server.listen(env.port, env.host);
+
+for (const signal of ['SIGTERM', 'SIGINT'] as const) {
+  process.once(signal, () => {
+    server.close(() => void orm.close(true).finally(() => process.exit(0)));
+    server.closeIdleConnections();
+    // Whoever is still being answered gets a moment, not for ever.
+    setTimeout(() => process.exit(0), 8_000).unref();
+  });
+}
