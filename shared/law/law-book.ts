@@ -3,7 +3,7 @@ import { plainDate, type PlainDate } from '#shared/kernel/plain-date.ts';
 import { readAllergens, readDates, readRows } from './read-rows.ts';
 import { RowIndex, type Named, type RowHit } from './row-index.ts';
 import type { FormaldehydeJson, InstrumentJson, LawTables, ProductWarningJson, UsColourJson, WordingJson } from './tables.types.ts';
-import type { AllergenGroup, Category, Dates, LawRow, Market, Sourcing } from './types.ts';
+import type { AllergenGroup, Category, Dates, LawRow, Market, Member, Sourcing } from './types.ts';
 
 /** One step of the law calendar. */
 export interface LawChange {
@@ -48,6 +48,8 @@ export interface LawBook {
   readonly formaldehyde: FormaldehydeJson;
   /** Rows of every list and market that speak of a substance, by name first, then by CAS number. */
   rowsFor(substance: Named): readonly RowHit[];
+  /** The releaser of formaldehyde that a substance is, with its factor to formaldehyde. */
+  releaserFor(substance: Named): Member | undefined;
   /** The row of this id. @throws DomainError when there is none. */
   row(id: string): LawRow;
   /** Allergen groups that a name or CAS number belongs to (usually one). */
@@ -72,6 +74,7 @@ export function openLawBook(tables: LawTables): LawBook {
   const index = new RowIndex(rows);
   const allergens = new RowIndex(allergenGroups.map(asRow));
   const groupById = byKey(allergenGroups, (group) => group.id, 'allergen group');
+  const releasers = new RowIndex([asRow({ id: 'formaldehyde', entry: '', citation: '', label: '', prescribesName: false, members: tables.formaldehyde.members, markets: [], leaveOn: '0', rinseOff: '0' })]);
   checkRows(rows, instruments, wordings);
   const changes = readChanges(tables, rows);
   const coveredFrom = plainDate(tables.release.coveredFrom);
@@ -90,6 +93,7 @@ export function openLawBook(tables: LawTables): LawBook {
     usColours: tables.usColours,
     formaldehyde: tables.formaldehyde,
     rowsFor: (substance) => index.find(substance),
+    releaserFor: (substance) => releasers.find(substance)[0]?.member,
     row(id) {
       const row = byId.get(id);
       if (!row) throw new DomainError(`no row of law "${id}"`);

@@ -26,6 +26,7 @@ function put<T>(map: Map<string, T[]>, key: string, value: T): void {
  */
 export class RowIndex {
   readonly #byName = new Map<string, RowHit[]>();
+  readonly #keys = new Map<string, string>();
   readonly #byCas = new Map<string, RowHit[]>();
 
   constructor(rows: readonly LawRow[]) {
@@ -44,7 +45,7 @@ export class RowIndex {
 
   /** Every row of every list and market that speaks of the substance; each row once. */
   find(substance: Named): readonly RowHit[] {
-    const named = this.#byName.get(foldName(substance.name));
+    const named = this.#byName.get(this.#keyOf(substance.name));
     let found: RowHit[] | undefined = named;
     for (const cas of substance.cas) {
       for (const hit of this.#byCas.get(cas) ?? []) {
@@ -56,9 +57,15 @@ export class RowIndex {
     return found ? dedupe(found) : [];
   }
 
-  /** True where a name, as written, is a member of some row. */
-  knows(name: string): boolean {
-    return this.#byName.has(foldName(name));
+  /** Folded once for each spelling: the same names come back at every keystroke. */
+  #keyOf(name: string): string {
+    const known = this.#keys.get(name);
+    if (known !== undefined) return known;
+    const key = foldName(name);
+    // The bound keeps memory flat over long runs.
+    if (this.#keys.size > 20_000) this.#keys.clear();
+    this.#keys.set(name, key);
+    return key;
   }
 }
 

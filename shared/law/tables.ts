@@ -1,6 +1,8 @@
 import changes from '#data/law/changes.json' with { type: 'json' };
 import instruments from '#data/law/instruments.json' with { type: 'json' };
 import release from '#data/law/release.json' with { type: 'json' };
+import caHotlist from '#data/parameters/ca-hotlist.json' with { type: 'json' };
+import caProhibited from '#data/parameters/ca-prohibited.json' with { type: 'json' };
 import categories from '#data/parameters/categories.json' with { type: 'json' };
 import annexII1 from '#data/parameters/eu-annex-ii-0001-0600.json' with { type: 'json' };
 import annexII2 from '#data/parameters/eu-annex-ii-0601-1200.json' with { type: 'json' };
@@ -17,6 +19,8 @@ import formaldehyde from '#data/parameters/formaldehyde-releasers.json' with { t
 import allergens from '#data/parameters/fragrance-allergens.json' with { type: 'json' };
 import warnings from '#data/parameters/product-warnings.json' with { type: 'json' };
 import usColours from '#data/parameters/us-colours.json' with { type: 'json' };
+import usProhibited from '#data/parameters/us-prohibited.json' with { type: 'json' };
+import usRestricted from '#data/parameters/us-restricted.json' with { type: 'json' };
 import wordingAnnexIII from '#data/parameters/wording-annex-iii.json' with { type: 'json' };
 import wording from '#data/parameters/wording.json' with { type: 'json' };
 import type { LawTables } from './tables.types.ts';
@@ -30,7 +34,10 @@ export const lawTables = {
   instruments,
   categories: categories.categories,
   allergens,
-  rows: [annexII1, annexII2, annexII3, annexIIICommon, annexIII1, annexIII2, annexIII3, annexIII4, annexIV, annexV, annexVI],
+  rows: [
+    ...[annexII1, annexII2, annexII3, annexIIICommon, annexIII1, annexIII2, annexIII3, annexIII4, annexIV, annexV, annexVI],
+    ...[usProhibited, usRestricted, caProhibited, caHotlist],
+  ],
   wording: [...wording, ...wordingAnnexIII],
   warnings,
   changes,

@@ -113,6 +113,9 @@ function readFact(key: string, question: Question): string | boolean | undefined
       if (flags.under3) return true;
       if (flags.professionalUseOnly) return false;
       return ADULT_TAGS.some((tag) => category.tags.includes(tag)) ? false : undefined;
+    case 'adultsOnly':
+      // A label that does not say so is for everybody.
+      return false;
     case 'addedAsSuch':
       return question.substance?.as.ingredient !== undefined;
     case 'fromAge':

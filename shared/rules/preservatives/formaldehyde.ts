@@ -1,6 +1,5 @@
 import { add, compare, decimal, divide, multiply, parseDecimal, ZERO } from '#shared/kernel/rational.ts';
 import { isInForce } from '#shared/law/as-at.ts';
-import { foldName } from '#shared/law/fold.ts';
 import type { Dates } from '#shared/law/types.ts';
 import type { Interval, Mixture, ProductFacts, Substance } from '#shared/engine/types.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
@@ -11,7 +10,7 @@ import type { DueWording } from '../wording/require-wording.ts';
 function findReleasers(mixture: Mixture, law: LawBook): { readonly substance: Substance; readonly times: string; readonly over: string }[] {
   const found = [];
   for (const substance of mixture.substances) {
-    const member = law.formaldehyde.members.find((one) => foldName(one.name) === foldName(substance.name) || (one.cas ?? []).some((cas) => substance.cas.includes(cas)));
+    const member = law.releaserFor(substance);
     if (member?.factor) found.push({ substance, ...member.factor });
   }
   return found;

@@ -23,6 +23,7 @@ export function bindsPurpose(row: LawRow, substance: Substance, facts: ProductFa
   if (substance.purposes.length > 0) return substance.purposes.includes(purpose);
   if (purpose === 'colourant' && isColourIndexName(substance.name)) return true;
   if (purpose === 'uv-filter' && facts.category.tags.includes('sun')) return true;
+  if (purpose === 'uv-filter' && isColourIndexName(substance.name)) return false;
   if (!row.otherUses) return true;
   return substance.as.ingredient ? undefined : false;
 }

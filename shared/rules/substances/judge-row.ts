@@ -21,6 +21,7 @@ export function judgeRow(row: LawRow, parts: readonly Part[], context: Context, 
   let speaks = false;
   for (const provision of row.provisions) {
     if (!isInForce(provision, context.days) || !(provision.markets?.includes(context.facts.market) ?? true)) continue;
+    if (!isCompanyRight(provision, context)) continue;
     speaks = true;
     const needs = new Set<string>();
     const applied = applyProvision(row, provision, parts, context, needs);
@@ -47,7 +48,6 @@ function strongest(answers: readonly Answer[]): Answer {
 }
 
 function applyProvision(row: LawRow, provision: Provision, parts: readonly Part[], context: Context, needs: Set<string>): Applied[] {
-  if (!isCompanyRight(provision, context)) return [];
   const only = provision.only?.map(foldName);
   const applied: Applied[] = [];
   for (const part of parts) {
@@ -66,7 +66,9 @@ function ask(part: Part, context: Context, needs: Set<string>) {
   return { facts: context.facts, substance: part.substance, needs, ...(formaldehyde ? { theoreticalFormaldehyde: formaldehyde } : {}) };
 }
 
+/** Whether the substances that the provision presumes beside it are there, and those it excludes are not. */
 function isCompanyRight(provision: Provision, context: Context): boolean {
+  if (!provision.with && !provision.without) return true;
   const isPresent = (name: string): boolean => context.mixture.substances.some((one) => foldName(one.name) === foldName(name));
   return (provision.with?.some(isPresent) ?? true) && !(provision.without?.some(isPresent) ?? false);
 }

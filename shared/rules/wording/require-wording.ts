@@ -23,21 +23,27 @@ export function wordingOf(outcomes: readonly Outcome[], context: Context): DueWo
   for (const outcome of outcomes) {
     if (outcome.type !== 'wording') continue;
     const known = due.get(outcome.wordingId!);
-    if (known && (known.certainty === 'certain' || outcome.certainty === 'possible')) continue;
+    const isDueEitherWay = known !== undefined && isOnlyPurposeOpen(known) && isOnlyPurposeOpen(outcome) && known.rule !== ruleId(outcome);
+    if (known && !isDueEitherWay && (known.certainty === 'certain' || outcome.certainty === 'possible')) continue;
     const sourcing = context.law.sourcing(outcome.row, context.facts.market);
     due.set(outcome.wordingId!, {
       wordingId: outcome.wordingId!,
       rule: ruleId(outcome),
       subject: subjectOf(outcome),
       citation: context.law.citation(outcome.row, context.facts.market),
-      certainty: outcome.certainty,
-      needs: outcome.needs,
+      certainty: isDueEitherWay ? 'certain' : outcome.certainty,
+      needs: isDueEitherWay ? [] : outcome.needs,
       ...(sourcing === 'official' ? {} : { sourcing }),
       ...(outcome.provision.reading ? { reading: outcome.provision.reading } : {}),
       ...(outcome.from ? { from: outcome.from } : {}),
     });
   }
   return [...due.values()];
+}
+
+/** Open only because the purpose is not stated: two rows that want the same text for either purpose settle it. */
+function isOnlyPurposeOpen(one: Pick<DueWording, 'certainty' | 'needs'>): boolean {
+  return one.certainty === 'possible' && one.needs.length === 1 && one.needs[0] === 'purpose';
 }
 
 /** Languages in which a market wants its texts. */
