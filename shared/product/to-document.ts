@@ -18,7 +18,7 @@ export interface HouseDefaults {
  * over all phases, so a finding's line number points at the same line on screen. What the
  * product leaves empty is taken from the house, where one is given.
  */
-export function toDocument(draft: ProductDraft, materials: readonly Material[], house?: HouseDefaults): FormulaDocument {
+export function toFormulaDocument(draft: ProductDraft, materials: readonly Material[], house?: HouseDefaults, today?: string): FormulaDocument {
   const used = new Set(draft.formula.phases.flatMap((phase) => phase.lines.map((line) => line.materialId)));
   const { readyForUse, netContent, durability } = draft;
   return {
@@ -28,8 +28,8 @@ export function toDocument(draft: ProductDraft, materials: readonly Material[], 
       brand: draft.brand,
       category: draft.category,
       markets: draft.markets,
-      ...(draft.placedOnMarket !== null && { placedOnMarket: draft.placedOnMarket }),
-      ...(draft.availableOn !== null && { availableOn: draft.availableOn }),
+      ...dayOf('placedOnMarket', draft.placedOnMarket ?? today),
+      ...dayOf('availableOn', draft.availableOn ?? today),
       flags: draft.flags,
       facts: draft.facts,
       ...(readyForUse && { readyForUse }),
@@ -47,6 +47,13 @@ export function toDocument(draft: ProductDraft, materials: readonly Material[], 
     declaration: draft.declaration,
     label: toLabel(draft.label),
   };
+}
+
+/** The same, for callers that leave the day open. */
+export const toDocument = toFormulaDocument;
+
+function dayOf(key: 'placedOnMarket' | 'availableOn', day: string | undefined): Partial<Record<typeof key, string>> {
+  return day === undefined ? {} : { [key]: day };
 }
 
 function toLines(draft: ProductDraft): DocumentLine[] {

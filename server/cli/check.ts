@@ -1,0 +1,70 @@
+import { readFormulaDocument } from '#shared/contracts/read-formula-document.ts';
+import type { Fault, FormulaDocument } from '#shared/contracts/formula-document.ts';
+import type { ResultDocument } from '#shared/contracts/result-document.ts';
+import type { Dictionary } from '#shared/dictionary/types.ts';
+import { assess } from '#shared/engine/assess.ts';
+import { presentResult } from '#shared/engine/present-result.ts';
+import type { PlainDate } from '#shared/kernel/plain-date.ts';
+import type { LawBook } from '#shared/law/law-book.ts';
+import type { Arguments } from './arguments.ts';
+import { parseJson, readLines, readText, Unusable } from './input.ts';
+import type { Io } from './io.ts';
+
+/** The tables and the day that a check stands on. */
+export interface Knowledge {
+  readonly law: LawBook;
+  readonly dictionary: Dictionary;
+  readonly today: PlainDate;
+}
+
+type Flags = Pick<Arguments, 'markets' | 'placed' | 'available'>;
+
+/** Reads one document. @throws Unusable with every fault */
+export function readDocument(text: string, flags: Flags, { law }: Knowledge): FormulaDocument {
+  const read = readFormulaDocument(parseJson(text), { categories: law.categories, markets: flags.markets });
+  if ('faults' in read) throw new Unusable(read.faults);
+  return read.document;
+}
+
+/** Judges one document as the flags say; a flag beats the document. */
+export function checkDocument(document: FormulaDocument, flags: Flags, { law, dictionary, today }: Knowledge): ResultDocument {
+  return presentResult(assess(document, {
+    law,
+    dictionary,
+    today,
+    markets: flags.markets,
+    ...(flags.placed && { placedOnMarket: flags.placed }),
+    ...(flags.available && { availableOn: flags.available }),
+  }));
+}
+
+function stopsSale(result: ResultDocument): boolean {
+  return result.results.some(({ findings }) => findings.some(({ severity }) => severity === 'stop'));
+}
+
+/** `check` of a single document: 1 where something stops sale. @throws Unusable */
+export async function checkFile(given: Arguments, knows: Knowledge, io: Io): Promise<number> {
+  const result = checkDocument(readDocument(await readText(given.file, io.stdin), given, knows), given, knows);
+  await io.write(`${JSON.stringify(result, null, 1)}\n`);
+  return stopsSale(result) ? 1 : 0;
+}
+
+/** `check` of a JSON Lines file: one result a line, in order; an unusable line is answered in its place. */
+export async function checkLines(given: Arguments, knows: Knowledge, io: Io): Promise<number> {
+  let status = 0;
+  for await (const { number, text } of readLines(given.file, io.stdin)) {
+    if (text !== null && text.trim() === '') continue;
+    try {
+      if (text === null) throw new Unusable([{ pointer: '', message: 'This line is longer than can be read.' }]);
+      const result = checkDocument(readDocument(text, given, knows), given, knows);
+      if (status === 0 && stopsSale(result)) status = 1;
+      await io.write(`${JSON.stringify(result)}\n`);
+    } catch (error) {
+      status = 2;
+      const faults: readonly Fault[] = error instanceof Unusable ? error.faults : [{ pointer: '', message: `This document could not be judged: ${error instanceof Error ? error.message : 'unknown reason'}` }];
+      for (const { pointer, message } of faults) io.tell(`line ${number}: ${pointer || '/'}: ${message}`);
+      await io.write(`${JSON.stringify({ document: 'error/1', line: number, faults })}\n`);
+    }
+  }
+  return status;
+}

@@ -1,0 +1,63 @@
+import { join } from 'node:path';
+import { plainDate, type PlainDate } from '#shared/kernel/plain-date.ts';
+import { readArguments, USAGE, type Arguments } from './arguments.ts';
+import { checkFile, checkLines, type Knowledge } from './check.ts';
+import { Unusable } from './input.ts';
+import { standardIo, type Io } from './io.ts';
+import { openDictionary, openLaw } from './tables.ts';
+
+/** Status of an input that is not usable. */
+const UNUSABLE = 2;
+
+/**
+ * The product without a browser or a database. Standard output carries only the result;
+ * words for people go to standard error.
+ * @returns the exit status: 0, 1 where something stops sale or does not fit, 2 for unusable input
+ */
+export async function runColophon(words: readonly string[], root: string, io: Io = standardIo): Promise<number> {
+  const read = readArguments(words);
+  if ('mistakes' in read) {
+    for (const mistake of read.mistakes) io.tell(mistake);
+    io.tell(USAGE);
+    return UNUSABLE;
+  }
+  try {
+    return await runCommand(read.arguments, root, io);
+  } catch (error) {
+    if (!(error instanceof Unusable)) throw error;
+    io.tell(error.message);
+    return UNUSABLE;
+  }
+}
+
+async function runCommand(given: Arguments, root: string, io: Io): Promise<number> {
+  if (given.command === 'schema') {
+    const { writeSchema } = await import('./schema.ts');
+    return writeSchema(given.file, io);
+  }
+  const knows = openKnowledge(root);
+  switch (given.command) {
+    case 'check':
+      return given.file.endsWith('.jsonl') ? checkLines(given, knows, io) : checkFile(given, knows, io);
+    case 'label': {
+      const { writeLabel } = await import('./label.ts');
+      return writeLabel({ ...given, out: given.out! }, knows, io);
+    }
+    case 'read': {
+      const { readList } = await import('./read.ts');
+      return readList(given, knows, io);
+    }
+  }
+}
+
+function openKnowledge(root: string): Knowledge {
+  const law = openLaw();
+  return { law, dictionary: openDictionary(join(root, 'data/dictionary'), law.release), today: today() };
+}
+
+/** The machine's calendar day. */
+function today(): PlainDate {
+  const now = new Date();
+  const two = (value: number): string => `${value}`.padStart(2, '0');
+  return plainDate(`${`${now.getFullYear()}`.padStart(4, '0')}-${two(now.getMonth() + 1)}-${two(now.getDate())}`);
+}
