@@ -1,5 +1,68 @@
+import { useEffect, useMemo, useState } from 'react';
+import { Link } from 'react-router-dom';
+import { MARKETS } from '#shared/law/types.ts';
+import type { HeadroomLine } from '#shared/engine/assessment.ts';
+import { setGrams } from '#src/features/formula/recipes.ts';
+import { paths } from '#src/app/paths.ts';
+import { Ledger } from '#src/features/verdicts/ledger.tsx';
+import { countFindings, mergeFindings, type MergedFinding } from '#src/features/verdicts/merge.ts';
+import { NotChecked } from '#src/features/verdicts/not-checked.tsx';
+import { RoomLeft } from '#src/features/verdicts/room-left.tsx';
+import { sayFact } from '#src/features/workspace/fact-fields.tsx';
+import { useProductPage } from '#src/features/workspace/product-page.ts';
+import { findAmountRemedy } from '#src/features/workspace/remedy.ts';
+import { Button } from '#src/ui/button.tsx';
 import { Sheet } from '#src/ui/sheet.tsx';
 
+/** Every verdict in every market: what to do, why, the arithmetic, the citation. */
 export function Component() {
-  return <div className="wrap full"><Sheet className="hung"><div className="panel" /></Sheet></div>;
+  const page = useProductPage();
+  const { desk, live, isReadOnly, nameOf, shelf, asOf, handling } = page;
+  const { draft, change } = desk;
+  const results = useMemo(() => MARKETS.flatMap((market) => live.all.get(market) ?? []), [live.all]);
+  const merged = useMemo(() => mergeFindings(results), [results]);
+  const counts = useMemo(() => new Map(results.map((result) => [result.market, countFindings(result.findings)])), [results]);
+  const lines = draft.formula.phases.flatMap((phase) => phase.lines);
+  const headroom = useHeadroom(live.view.result.headroom);
+
+  const remedyOf = (finding: MergedFinding) => {
+    const own = finding.markets.get(asOf.market);
+    return own && !isReadOnly ? findAmountRemedy(own, draft, live.view, live.tryWith) : null;
+  };
+  const actOf = (finding: MergedFinding) => {
+    const remedy = remedyOf(finding);
+    if (remedy) return <Button small weight="act" onClick={() => change(setGrams(remedy.lineId, remedy.grams))}>Set {remedy.grams} g of {nameOf(remedy.materialId)}</Button>;
+    const asked = finding.lead.needs ?? [];
+    return asked.length > 0 ? <Link className="btn small" to={`${paths.product(page.id)}${page.search}#particulars`}>Answer: {asked.map(sayFact).join(', ')}</Link> : null;
+  };
+  const waysOf = (finding: MergedFinding) => {
+    const remedy = remedyOf(finding);
+    return remedy ? [<>At most <b>{remedy.grams} g</b> of {nameOf(remedy.materialId)} keeps the limit, with everything else as it is.</>] : [];
+  };
+  const nameOfSource = (from: string) => shelf.byId.get(from)?.tradeName ?? from;
+
+  if (results.length === 0) return <div className="wrap full"><Sheet className="hung"><p className="ledger-none" aria-busy="true">Working out four markets …</p></Sheet></div>;
+  return (
+    <div className="wrap full">
+      <Sheet className="hung">
+        {lines.length === 0 ? (
+          <p className="ledger-none">Nothing to judge yet: the formula has no line.</p>
+        ) : (
+          <Ledger findings={merged} counts={counts} sold={draft.markets} release={page.engine.law.release} nameOf={nameOfSource} actOf={actOf} waysOf={waysOf} isWorking={live.isBehind} />
+        )}
+        <RoomLeft market={asOf.market} headroom={headroom} lines={lines.map((line) => nameOf(line.materialId))} />
+        <NotChecked memory={merged.filter((finding) => finding.lead.sourcing === 'memory').length} handling={handling} />
+      </Sheet>
+    </div>
+  );
+}
+
+/** Headroom takes some tens of milliseconds: it is worked out once the page stands. */
+function useHeadroom(work: () => readonly HeadroomLine[]): readonly HeadroomLine[] | null {
+  const [found, setFound] = useState<{ of: unknown; lines: readonly HeadroomLine[] } | null>(null);
+  useEffect(() => {
+    const timer = setTimeout(() => setFound({ of: work, lines: work() }), 400);
+    return () => clearTimeout(timer);
+  }, [work]);
+  return found && found.of === work ? found.lines : null;
 }

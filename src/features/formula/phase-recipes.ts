@@ -1,10 +1,6 @@
-import { divide, multiply, parseDecimal, toDecimal } from '#shared/kernel/rational.ts';
 import type { FormulaLine, Phase, ProductDraft } from '#shared/contracts/product-draft.ts';
+import { scaleBatch } from '#shared/product/scale.ts';
 import type { Recipe } from './recipes.ts';
-import { weighFormula } from './weigh.ts';
-
-/** Places kept where a scaled figure does not end: a microgram. */
-const PLACES = 6;
 
 function withPhases(draft: ProductDraft, phases: Phase[]): ProductDraft {
   return { ...draft, formula: { ...draft.formula, phases } };
@@ -53,42 +49,22 @@ export function setBatchSize(grams: string): Recipe {
   return (draft) => ({ ...draft, formula: { ...draft.formula, batchSize: grams === '' ? null : { value: grams, unit: 'g' } } });
 }
 
-/** What scaling to another batch would write, and whether every figure ends exactly. */
-export interface Scaled {
-  readonly lines: readonly { readonly id: string; readonly before: string; readonly after: string }[];
-  readonly isExact: boolean;
-}
-
-/** Every gram line times the new batch over the old one; percent lines and the make-up line follow by themselves. */
-export function scaleLines(draft: ProductDraft, grams: string): Scaled | null {
-  const weighed = weighFormula(draft.formula);
-  const from = weighed.batch ?? weighed.total;
-  const to = parseDecimal(grams);
-  if (!to || to.n <= 0n || from.n <= 0n) return null;
-  let isExact = true;
-  const lines = draft.formula.phases
+/** What scaling would write, line by line; `null` where there is nothing to scale from. */
+export function previewScale(draft: ProductDraft, grams: string): readonly { readonly id: string; readonly before: string; readonly after: string }[] | null {
+  const scaled = scaleBatch(draft.formula, grams);
+  if (!scaled) return null;
+  const after = new Map(scaled.phases.flatMap((phase) => phase.lines.map((line) => [line.id, line.amount] as const)));
+  return draft.formula.phases
     .flatMap((phase) => phase.lines)
     .filter((line) => line.unit === 'g' && line.amount !== '')
-    .map((line) => {
-      const scaled = divide(multiply(parseDecimal(line.amount)!, to), from);
-      const after = toDecimal(scaled, PLACES);
-      const back = parseDecimal(after)!;
-      if (back.n * scaled.d !== scaled.n * back.d) isExact = false;
-      return { id: line.id, before: line.amount, after };
-    });
-  return { lines, isExact };
+    .map((line) => ({ id: line.id, before: line.amount, after: after.get(line.id) ?? line.amount }));
 }
 
+/** The formula at another batch size; unchanged where there is nothing to scale from. */
 export function scaleTo(grams: string): Recipe {
   return (draft) => {
-    const scaled = scaleLines(draft, grams);
-    if (!scaled) return draft;
-    const after = new Map(scaled.lines.map((line) => [line.id, line.after]));
-    const phases = draft.formula.phases.map((phase) => ({
-      ...phase,
-      lines: phase.lines.map((line) => (after.has(line.id) ? { ...line, amount: after.get(line.id)! } : line)),
-    }));
-    return setBatchSize(grams)(withPhases(draft, phases));
+    const formula = scaleBatch(draft.formula, grams);
+    return formula ? { ...draft, formula } : draft;
   };
 }
 

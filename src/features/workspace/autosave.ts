@@ -44,6 +44,8 @@ export interface Autosave {
   resolve(theirs: Product, draft: ProductDraft): void;
   /** The server's newer product, where nothing here is unsaved. False where something is. */
   adopt(product: Product): boolean;
+  /** What follows was begun from this older version. */
+  rebase(version: number): void;
   subscribe(listener: () => void): () => void;
   dispose(): void;
 }
@@ -60,7 +62,8 @@ export function createAutosave(options: AutosaveOptions): Autosave {
   const listeners = new Set<() => void>();
   let base = { version: options.product.version, draft: options.product.draft };
   let draft = base.draft;
-  let state: SaveState = { kind: 'saved', at: options.product.savedAt, by: options.product.savedBy };
+  let lastSaved: SaveState = { kind: 'saved', at: options.product.savedAt, by: options.product.savedBy };
+  let state: SaveState = lastSaved;
   let timer: ReturnType<typeof setTimeout> | undefined;
   let isSending = false;
   let retry = FIRST_RETRY;
@@ -68,6 +71,7 @@ export function createAutosave(options: AutosaveOptions): Autosave {
 
   const show = (next: SaveState) => {
     state = next;
+    if (next.kind === 'saved') lastSaved = next;
     for (const listener of listeners) listener();
   };
   const plan = (after: number) => {
@@ -78,6 +82,7 @@ export function createAutosave(options: AutosaveOptions): Autosave {
 
   async function send(): Promise<void> {
     clearTimeout(timer);
+    // A retry waits for whatever is under way.
     if (isSending || isDisposed || state.kind === 'conflict' || !hasUnsaved()) return;
     const why = options.judge(draft);
     if (why !== null) return show({ kind: 'not-saved', why, retries: false });
@@ -121,7 +126,7 @@ export function createAutosave(options: AutosaveOptions): Autosave {
       draft = next;
       if (!hasUnsaved()) {
         options.forget();
-        if (!isSending && state.kind !== 'conflict') show({ kind: 'saved', at: options.product.savedAt, by: options.product.savedBy });
+        if (!isSending && state.kind !== 'conflict') show(lastSaved);
         return;
       }
       options.keep(draft, base.version);
@@ -152,6 +157,9 @@ export function createAutosave(options: AutosaveOptions): Autosave {
       draft = product.draft;
       show({ kind: 'saved', at: product.savedAt, by: product.savedBy });
       return true;
+    },
+    rebase(version) {
+      base = { ...base, version };
     },
     subscribe(listener) {
       listeners.add(listener);

@@ -1,0 +1,43 @@
+import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
+import type { Assessment } from '#shared/engine/assessment.ts';
+import type { LawBook } from '#shared/law/law-book.ts';
+import type { Market } from '#shared/law/types.ts';
+import type { AssessInput } from './engine.ts';
+
+/** A day on which something changes for this very product in one market. */
+export interface ProductLawDay {
+  readonly date: string;
+  readonly words: string;
+}
+
+type Judge = (document: FormulaDocument, input: AssessInput) => Assessment;
+
+function dayBefore(day: string): string {
+  return new Date(Date.parse(`${day}T00:00:00Z`) - 86_400_000).toISOString().slice(0, 10);
+}
+
+/** What a person would notice: the printed list, the verdicts and the wording. */
+function impression(assessment: Assessment): string {
+  const result = assessment.results[0]!;
+  const findings = result.findings.filter((finding) => finding.kind !== 'upcoming').map((finding) => `${finding.kind}|${finding.subject}|${finding.rule}|${finding.limit ?? ''}`);
+  return JSON.stringify([result.declaration.text, findings.toSorted(), result.requiredWording.map((wording) => wording.text).toSorted()]);
+}
+
+/**
+ * The changes of the law that touch this product, found by judging it on the day before and on
+ * the day: nothing is guessed from titles. Changes for what is still on the shelf are judged
+ * for a batch first sold before the change began. Yields to the page between changes.
+ */
+export async function findLawDays(judge: Judge, document: FormulaDocument, market: Market, law: LawBook, options: { since: string; today: string; signal: AbortSignal }): Promise<ProductLawDay[]> {
+  const changes = law.changes.filter((change) => change.market === market && change.date >= options.since);
+  const found: ProductLawDay[] = [];
+  for (const change of changes) {
+    await new Promise((resolve) => setTimeout(resolve, 0));
+    if (options.signal.aborted) return [];
+    const begun = law.changes.find((other) => other.id === change.id && other.market === market && other.kind === 'placed' && other.date < change.date);
+    const on = (day: string) => impression(judge(document, { markets: [market], placed: change.kind === 'available' && begun ? dayBefore(begun.date) : day, available: day, today: options.today }));
+    if (on(dayBefore(change.date)) === on(change.date)) continue;
+    found.push({ date: change.date, words: change.kind === 'available' && begun ? `${change.title}, on all that is still sold` : change.title });
+  }
+  return found.toSorted((a, b) => (a.date < b.date ? -1 : 1));
+}
