@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { deflateSync } from 'node:zlib';
-import { PDFArray, PDFDict, PDFDocument, PDFHexString, PDFName, PDFNumber, PDFRawStream, type PDFContext, type PDFObject, type PDFRef } from 'pdf-lib';
+import { PDFArray, PDFDocument, PDFHexString, PDFName, PDFNumber, PDFRawStream, type PDFContext, type PDFDict, type PDFObject, type PDFRef } from 'pdf-lib';
 import type { Item, Micrometres, Scene, Text, Weight } from '#shared/artwork/scene.ts';
 import { embedFont, type EmbeddedFont } from './embed-font.ts';
 import { WEIGHTS } from './fonts.ts';

@@ -1,7 +1,18 @@
 import type { DocumentLabel, FormulaDocument } from '#shared/contracts/formula-document.ts';
-import type { MarketResult } from '#shared/contracts/result-document.ts';
 import type { Market } from '#shared/law/types.ts';
 import type { ContainerSettings, LabelInput } from './label-input.ts';
+
+/** What a label reads of a market's result, whether computed here or read from a result document. */
+export interface LabelResult {
+  readonly declaration: { readonly heading: string; readonly text: string; readonly entries: readonly unknown[] };
+  readonly requiredWording: readonly {
+    readonly text: string;
+    readonly lang: string;
+    readonly certainty?: 'certain' | 'possible' | undefined;
+    readonly place?: 'principal-panel' | 'label' | undefined;
+    readonly isOfficialText?: boolean | undefined;
+  }[];
+}
 
 /** What a label is set on where the document names no container: the 250 ml bottle of the catalogue. */
 const USUAL: ContainerSettings = { shape: 'cylinder', diameterMm: '58', labelHeightMm: '90', overlapMm: '5' };
@@ -17,7 +28,7 @@ export function labelLanguages(label: DocumentLabel | undefined, market: Market)
   return market === 'CA' ? ['en', 'fr'] : ['en'];
 }
 
-function splitDeclaration(declaration: MarketResult['declaration'] | undefined): LabelInput['ingredients'] {
+function splitDeclaration(declaration: LabelResult['declaration'] | undefined): LabelInput['ingredients'] {
   if (!declaration || declaration.entries.length === 0) return null;
   const { heading, text } = declaration;
   const body = text.startsWith(`${heading}:`) ? text.slice(heading.length + 1) : text;
@@ -35,7 +46,7 @@ function unique(texts: readonly string[]): string[] {
 }
 
 /** The label of a formula document in one market, from its own particulars and the market's result. */
-export function labelOfDocument(document: FormulaDocument, result: MarketResult | undefined, market: Market = labelMarket(document)): LabelInput {
+export function labelOfDocument(document: FormulaDocument, result: LabelResult | undefined, market: Market = labelMarket(document)): LabelInput {
   const { product, label } = document;
   const particulars = product.particulars;
   const languages = labelLanguages(label, market);

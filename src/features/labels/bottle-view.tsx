@@ -38,6 +38,7 @@ function Round({ scene, diameter }: { scene: Scene; diameter: number }) {
           </defs>
           <path fill={`url(#${id}-cap)`} d={`M${-neck / 2 - 1} 0h${neck + 2}v${cap}h${-neck - 2}z`} />
           <path fill={`url(#${id}-glass)`} d={`M${-neck / 2} ${cap}h${neck}C${neck / 2 + shoulder * 0.3} ${cap + shoulder * 0.5} ${r} ${cap + shoulder * 0.3} ${r} ${y0 + foot * 0.4}V${tall - foot}a${foot} ${foot} 0 0 1 ${-foot} ${foot}H${-r + foot}a${foot} ${foot} 0 0 1 ${-foot} ${-foot}V${y0 + foot * 0.4}C${-r} ${cap + shoulder * 0.3} ${-neck / 2 - shoulder * 0.3} ${cap + shoulder * 0.5} ${-neck / 2} ${cap}z`} />
+          <rect x={-r + 0.05} y={y0 + foot} width={diameter - 0.1} height={H} fill="#fff" />
           {Array.from({ length: SLICES }, (_, i) => {
             const [from, to] = [along(edge(i)), along(edge(i + 1))];
             const shift = from < 0 ? -round : from > round ? round : 0;

@@ -5,7 +5,8 @@ import { exactMillimetres } from '#shared/artwork/lengths.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import type { Scene } from '#shared/artwork/scene.ts';
 import type { LabelSettings, ProductDraft } from '#shared/contracts/product-draft.ts';
-import type { MarketResult } from '#shared/contracts/result-document.ts';
+import type { LabelResult } from '#shared/artwork/label-of-document.ts';
+import type { HouseDefaults } from '#shared/product/to-document.ts';
 import { Banner } from '#src/ui/banner.tsx';
 import { Button, TextButton } from '#src/ui/button.tsx';
 import { CheckField } from '#src/ui/field.tsx';
@@ -22,7 +23,9 @@ import { PressList } from './press-list.tsx';
 export interface LabelStudioProps {
   readonly draft: ProductDraft;
   /** The result of the label's market; absent while nothing is computed. */
-  readonly result: MarketResult | undefined;
+  readonly result: LabelResult | undefined;
+  /** What the house prints where the product says nothing. */
+  readonly house?: HouseDefaults | undefined;
   readonly onChange: (label: LabelSettings) => void;
   /** Fetches the press file; its refusal is told in words here. */
   readonly onPressFile: () => Promise<void>;
@@ -33,9 +36,9 @@ const ZOOMS: readonly (readonly [number, string])[] = [[1, 'True size'], [1.5, '
 const LAYERS: readonly (readonly [keyof Shown, string])[] = [['die', 'Die line'], ['bleed', 'Bleed'], ['panels', 'Panels'], ['rings', 'Rings']];
 
 /** The label at true size, what stands before the press, and all that the label is set from. */
-export function LabelStudio({ draft, result, onChange, onPressFile, isLocked = false }: LabelStudioProps) {
+export function LabelStudio({ draft, result, house, onChange, onPressFile, isLocked = false }: LabelStudioProps) {
   const deferred = useDeferredValue(draft);
-  const layout = useMemo(() => layOutLabel(labelOfDraft(deferred, result), plexMetrics), [deferred, result]);
+  const layout = useMemo(() => layOutLabel(labelOfDraft(deferred, result, house), plexMetrics), [deferred, result, house]);
   const [zoom, setZoom] = useState(1);
   const [shown, setShown] = useState<Shown>({ die: true, bleed: true, panels: true, rings: true });
   const [isMeasuring, setIsMeasuring] = useState(false);
