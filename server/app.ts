@@ -1,6 +1,7 @@
 import compression from 'compression';
 import express, { Router, type Express } from 'express';
 import type { MikroORM } from '@mikro-orm/postgresql';
+import type { OilProfile } from '#shared/dictionary/oil-profiles.ts';
 import type { Dictionary } from '#shared/dictionary/types.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { LawTables } from '#shared/law/tables.types.ts';
@@ -14,6 +15,7 @@ import { errorMiddleware, type LogFault } from '#server/http/problem.ts';
 import { requestId } from '#server/http/request-id.ts';
 import { mountRoutes, type Route } from '#server/http/route.ts';
 import { securityHeaders } from '#server/http/security.ts';
+import { dictionaryRoutes } from '#server/modules/dictionary/dictionary.routes.ts';
 import { houseRoutes } from '#server/modules/house/house.routes.ts';
 import { lawRoutes } from '#server/modules/law/law.routes.ts';
 import { materialsRoutes } from '#server/modules/materials/materials.routes.ts';
@@ -28,6 +30,7 @@ export interface AppDeps {
   readonly law: { readonly book: LawBook; readonly tables: LawTables };
   /** In memory: judging asks it for every name. */
   readonly dictionary: Dictionary;
+  readonly oils: readonly OilProfile[];
   readonly storage: ObjectStore;
   readonly now: () => Date;
   /** The built browser app. */
@@ -41,6 +44,7 @@ export function apiRoutes(deps: AppDeps): Route[] {
     ...sessionRoutes({ auth: deps.auth, dataRelease: deps.law.book.release }),
     ...houseRoutes(),
     ...lawRoutes(deps.law),
+    ...dictionaryRoutes({ query: deps.auth.query, dictionary: deps.dictionary, oils: deps.oils }),
     ...materialsRoutes(deps),
     ...productsRoutes(deps),
   ];

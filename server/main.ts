@@ -1,18 +1,21 @@
 import { createServer } from 'node:http';
 import { resolve } from 'node:path';
+import { createDictionary } from '#shared/dictionary/create-dictionary.ts';
 import { openLawBook } from '#shared/law/law-book.ts';
 import { lawTables } from '#shared/law/tables.ts';
 import { createApp } from '#server/app.ts';
 import { createIdentityClient } from '#server/auth/identity-client.ts';
+import { readDictionaryTables } from '#server/db/dictionary-tables.ts';
 import { openOrm } from '#server/db/orm.ts';
 import { membershipsOf, runQuery } from '#server/db/run-query.ts';
 import { readEnv } from '#server/env.ts';
 import { logEvent, logFault } from '#server/http/log.ts';
-import { loadDictionary } from '#server/modules/dictionary/dictionary.service.ts';
 import { createObjectStore } from '#server/storage/object-store.ts';
 
 const env = readEnv();
 const now = () => new Date();
+const law = openLawBook(lawTables);
+const { entries, oils } = readDictionaryTables(resolve('data/dictionary'));
 const orm = await openOrm(env.database.url);
 const storage = createObjectStore(env.storage);
 await storage.prepare();
@@ -26,8 +29,9 @@ const app = createApp({
     membershipsOf: membershipsOf(orm),
     onEvent: logEvent,
   },
-  law: { book: openLawBook(lawTables), tables: lawTables },
-  dictionary: await loadDictionary(orm.em.fork()),
+  law: { book: law, tables: lawTables },
+  dictionary: createDictionary(entries, law.release),
+  oils,
   storage,
   now,
   clientDir: resolve('build/client'),

@@ -3,7 +3,7 @@ import { openOrm } from './orm.ts';
 /** Tables to which the app adds rows but which it never changes. */
 const ONLY_ADDED = ['product_revision'];
 /** Tables that only the owner writes. */
-const ONLY_READ = ['migration'];
+const ONLY_READ = ['migration', 'dictionary_entry', 'dictionary_term'];
 
 /**
  * Brings a database up to date as its owner and gives the app's role what it needs, no

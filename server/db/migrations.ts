@@ -1,8 +1,10 @@
 import { Houses } from '../../migrations/001-houses.ts';
 import { SignIn } from '../../migrations/002-sign-in.ts';
+import { DictionaryTables } from '../../migrations/003-dictionary.ts';
 
 /** Every migration in order: named here, so that nothing has to be searched for when the server is compiled. */
 export const MIGRATIONS = [
   { name: '001-houses', class: Houses },
   { name: '002-sign-in', class: SignIn },
+  { name: '003-dictionary', class: DictionaryTables },
 ];

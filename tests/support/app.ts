@@ -1,4 +1,3 @@
-import { readFileSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
 import type { Express } from 'express';
 import type { MikroORM } from '@mikro-orm/postgresql';
@@ -9,13 +8,13 @@ import { csrfTokenOf } from '#server/auth/secret.ts';
 import { beginSession } from '#server/auth/sessions.ts';
 import { apiRoutes, createApp, type AppDeps } from '#server/app.ts';
 import { seedDemo } from '#server/db/demo/seed-demo.ts';
+import { readDictionaryTables, type DictionaryTables } from '#server/db/dictionary-tables.ts';
 import { openOrm } from '#server/db/orm.ts';
 import { membershipsOf, runQuery } from '#server/db/run-query.ts';
 import type { Route } from '#server/http/route.ts';
 import { DEMO_PEOPLE, type DemoPerson } from '#server/local/demo-people.ts';
 import type { ObjectStore, StoredObject } from '#server/storage/object-store.ts';
 import { createDictionary } from '#shared/dictionary/create-dictionary.ts';
-import { parseEntries } from '#shared/dictionary/parse-entries.ts';
 import { openLawBook } from '#shared/law/law-book.ts';
 import { lawTables } from '#shared/law/tables.ts';
 import { checkout } from './cluster.ts';
@@ -60,7 +59,8 @@ export async function openTestApp(options: { readonly now?: () => Date } = {}): 
     orm,
     auth,
     law: { book: openLawBook(lawTables), tables: lawTables },
-    dictionary: testDictionary(),
+    dictionary: testDictionary().dictionary,
+    oils: testDictionary().tables.oils,
     storage: memoryStore(stored),
     now,
     clientDir: join(checkout, 'tests/support/client'),
@@ -109,18 +109,13 @@ export function personWith(role: DemoPerson['roles'][number]): DemoPerson {
   return found;
 }
 
+let tables: DictionaryTables | undefined;
 let dictionary: AppDeps['dictionary'] | undefined;
 /** The dictionary of data/, read once a worker. */
-export function testDictionary(): AppDeps['dictionary'] {
-  const folder = join(checkout, 'data/dictionary');
-  dictionary ??= createDictionary(
-    readdirSync(folder)
-      .filter((file) => file.endsWith('.csv') && !file.startsWith('oil-'))
-      .sort()
-      .flatMap((file) => parseEntries(readFileSync(join(folder, file), 'utf8'))),
-    'test',
-  );
-  return dictionary;
+export function testDictionary(): { readonly tables: DictionaryTables; readonly dictionary: AppDeps['dictionary'] } {
+  tables ??= readDictionaryTables(join(checkout, 'data/dictionary'));
+  dictionary ??= createDictionary(tables.entries, lawTables.release.release);
+  return { tables, dictionary };
 }
 
 function memoryStore(stored: Map<string, StoredObject>): ObjectStore {
