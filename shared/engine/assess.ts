@@ -1,4 +1,4 @@
-import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
+import type { DocumentMaterial, FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { Dictionary } from '#shared/dictionary/types.ts';
 import { DomainError } from '#shared/kernel/errors.ts';
 import { parsePlainDate, type PlainDate } from '#shared/kernel/plain-date.ts';
@@ -14,6 +14,7 @@ import { judgeSum } from './formula-findings.ts';
 import { findHeadroom, type FindingsAt } from './headroom.ts';
 import { judgeAmbiguities, judgeCompositions, judgeNames, judgeOrder } from './list-findings.ts';
 import { LIST_LAW } from './list-law.ts';
+import { prepareMaterial } from './prepare-material.ts';
 import type { Finding, ProductFacts, Severity } from './types.ts';
 import { totalMass, withShare } from './weigh-lines.ts';
 
@@ -99,8 +100,25 @@ function assessMarket(shared: Shared, market: Market): MarketAssessment {
     allergens: verdicts,
     findings: byWeight(findings),
     requiredWording: judged.requiredWording,
-    headroom: () => (headroom ??= findHeadroom(blend.weighed, findings, findingsAt)),
+    headroom: () => (headroom ??= findHeadroom(blend.weighed, findings, findingsAt, (line) => isSpokenOf(materialOf(document, line), shared, market))),
   };
+}
+
+function materialOf(document: FormulaDocument, line: number): DocumentMaterial | undefined {
+  const id = document.formula.lines[line]?.material;
+  return document.materials.find((material) => material.id === id);
+}
+
+/** Whether any row of the market's law, or any allergen group, speaks of something in the material. */
+function isSpokenOf(material: DocumentMaterial | undefined, { options }: Shared, market: Market): boolean {
+  if (!material) return false;
+  const { law, dictionary } = options;
+  const { parts, constituents } = prepareMaterial(material, dictionary);
+  return [...parts, ...constituents].some(({ inci, written, cas, purpose }) => {
+    if (purpose === 'colourant' || purpose === 'preservative' || purpose === 'uv-filter' || /^CI \d/i.test(inci)) return true;
+    const named = { name: inci, cas };
+    return law.rowsFor(named).some(({ row }) => row.markets.includes(market)) || law.allergenGroupsFor(named).length > 0 || law.rowsFor({ name: written, cas: [] }).length > 0;
+  });
 }
 
 const WEIGHTS: readonly Severity[] = ['stop', 'decide', 'note'];

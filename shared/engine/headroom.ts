@@ -12,13 +12,14 @@ const HALVINGS = 60;
 /**
  * For each line the largest share up to which no finding appears that is not there today.
  * Every measured value is linear in the line's share, so a rule that a line breaks on its way
- * up stays broken to 100 %: asking there finds the lines that have a bound at all.
+ * up stays broken to 100 %: asking there finds the lines that have a bound at all. `isBound`
+ * leaves out lines whose materials no row of law speaks of.
  */
-export function findHeadroom(weighed: WeighedLines, today: readonly Finding[], findingsAt: FindingsAt): HeadroomLine[] {
+export function findHeadroom(weighed: WeighedLines, today: readonly Finding[], findingsAt: FindingsAt, isBound: (line: number) => boolean): HeadroomLine[] {
   const known = new Set(today.map(identity));
   return weighed.masses.map((mass, line): HeadroomLine => {
     const now: Rational = { n: mass * 100n, d: weighed.total === 0n ? 1n : weighed.total };
-    if (weighed.total === 0n || mass === weighed.total) return { line, max: null, limitedBy: null };
+    if (weighed.total === 0n || mass === weighed.total || !isBound(line)) return { line, max: null, limitedBy: null };
     const fresh = (share: Rational): readonly Finding[] => findingsAt(line, share).filter((finding) => !known.has(identity(finding)));
     const atMost = fresh(HUNDRED);
     if (atMost.length === 0) return { line, max: null, limitedBy: null };
