@@ -13,7 +13,7 @@ import { judgeIsothiazolinones } from './preservatives/isothiazolinones.ts';
 import { gatherRows } from './substances/gather.ts';
 import { judgeRow } from './substances/judge-row.ts';
 import { judgeRows, presentSubstances } from './substances/judge-substances.ts';
-import type { NotChecked, Outcome } from './substances/outcome.ts';
+import type { NotChecked, Outcome } from './outcome.ts';
 import { judgeUpcoming, presentUpcomingWordings } from './upcoming/judge-upcoming.ts';
 import { judgeProductWarnings } from './wording/product-warnings.ts';
 import { judgeWordings, presentWording, wordingOf } from './wording/require-wording.ts';

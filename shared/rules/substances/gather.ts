@@ -1,7 +1,7 @@
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { LawRow, Market } from '#shared/law/types.ts';
 import type { Mixture } from '#shared/engine/types.ts';
-import type { Part } from './outcome.ts';
+import type { Part } from '../outcome.ts';
 
 /** The rows of one market that speak of a substance present, each with the substances it speaks of. */
 export function gatherRows(mixture: Mixture, law: LawBook, market: Market): ReadonlyMap<LawRow, readonly Part[]> {

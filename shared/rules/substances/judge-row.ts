@@ -6,7 +6,7 @@ import type { Interval } from '#shared/engine/types.ts';
 import { answer, type Answer } from '../answer.ts';
 import type { Context } from '../context.ts';
 import { bindsPurpose } from './binding.ts';
-import type { NotChecked, Outcome, Part } from './outcome.ts';
+import type { NotChecked, Outcome, Part } from '../outcome.ts';
 
 interface Applied {
   readonly part: Part;

@@ -3,7 +3,7 @@ import type { LawRow } from '#shared/law/types.ts';
 import type { Context } from '../context.ts';
 import { judgeRow } from './judge-row.ts';
 import { mergeReadings } from './merge-readings.ts';
-import type { NotChecked, Outcome, Part } from './outcome.ts';
+import type { NotChecked, Outcome, Part } from '../outcome.ts';
 import { presentOutcome } from './present.ts';
 
 /** What all rows say together, with open readings joined. */

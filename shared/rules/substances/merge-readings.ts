@@ -1,6 +1,6 @@
 import { compare } from '#shared/kernel/rational.ts';
 import { foldName } from '#shared/law/fold.ts';
-import type { Outcome } from './outcome.ts';
+import type { Outcome } from '../outcome.ts';
 
 /**
  * Joins what the rows say where a substance's purpose, or a fact, is not known. A limit that is

@@ -2,7 +2,7 @@ import { compare, toDecimal } from '#shared/kernel/rational.ts';
 import type { Finding, FindingKind, Interval, Severity } from '#shared/engine/types.ts';
 import type { Context } from '../context.ts';
 import { weightOf } from './judge-row.ts';
-import type { Outcome } from './outcome.ts';
+import type { Outcome } from '../outcome.ts';
 
 /** An outcome as a finding: what is wrong, by how much, where it stands, what to do. */
 export function presentOutcome(outcome: Outcome, context: Context): Finding {

@@ -4,7 +4,7 @@ import type { Finding } from '#shared/engine/types.ts';
 import type { Context } from '../context.ts';
 import { judgeRows } from '../substances/judge-substances.ts';
 import { presentOutcome } from '../substances/present.ts';
-import type { Outcome, Part } from '../substances/outcome.ts';
+import type { Outcome, Part } from '../outcome.ts';
 import { isMissing, type DueWording } from '../wording/require-wording.ts';
 
 /**

@@ -2,7 +2,7 @@ import type { Finding, RequiredWording } from '#shared/engine/types.ts';
 import type { Market, Sourcing } from '#shared/law/types.ts';
 import type { Context } from '../context.ts';
 import { ruleId, subjectOf } from '../substances/present.ts';
-import type { Outcome } from '../substances/outcome.ts';
+import type { Outcome } from '../outcome.ts';
 
 /** A text that is due, from whatever rule. */
 export interface DueWording {

@@ -1,0 +1,22 @@
+import { expect, test } from 'vitest';
+import { judge } from '../judging.ts';
+
+test('a finding carries its figures, its paragraph, what to do and the sum behind it', () => {
+  const found = judge([{ name: 'Sodium Benzoate', percent: '0.6', material: 'm1' }], { category: 'face-cream' }).findings[0]!;
+  expect(found).toMatchObject({ kind: 'limit-exceeded', severity: 'stop', rule: 'eu/annex-v/1/c', subject: 'Sodium Benzoate', citation: 'Regulation (EC) No 1223/2009, Annex V, entry 1, letter (c)', certainty: 'certain' });
+  expect(found.remedy).toMatch(/^Bring /);
+  expect(found.arithmetic!.map((step) => step.figure)).toEqual(['0.6 %', '0.84745845', '0.508475 %', '0.5 %']);
+  expect(found.arithmetic![0]!.from).toBe('m1');
+});
+
+test('a range is told with both ends', () => {
+  const found = judge([{ name: 'Phenoxyethanol', min: '0.9', max: '1.2' }]).findings[0]!;
+  expect(found.measuredRange).toEqual({ min: '0.9', typical: '0.9', max: '1.2' });
+  expect(found.measured).toBe('1.2');
+});
+
+test('what is second hand or from memory says so', () => {
+  expect(judge([{ name: 'Phenoxyethanol', percent: '2' }], { market: 'UK' }).findings[0]!.sourcing).toBe('secondary');
+  expect(judge([{ name: 'Salicylic Acid', percent: '3' }], { market: 'CA' }).findings[0]!.sourcing).toBe('memory');
+  expect(judge([{ name: 'Phenoxyethanol', percent: '2' }]).findings[0]!.sourcing).toBeUndefined();
+});
