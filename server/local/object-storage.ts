@@ -44,7 +44,8 @@ export async function startObjectStorage(options: ObjectStorageOptions): Promise
 async function serve(options: ObjectStorageOptions, req: IncomingMessage, res: ServerResponse): Promise<void> {
   const key = /Credential=([^/,\s]+)\//.exec(req.headers.authorization ?? '')?.[1];
   if (key !== options.accessKeyId) throw new Refusal(403, 'InvalidAccessKeyId', 'The access key is not known here.');
-  const path = new URL(req.url ?? '/', 'http://storage.invalid').pathname.slice(1);
+  // Read as it came: an address parser would let dots in a key climb out of its bucket.
+  const path = (req.url ?? '/').split('?', 1)[0]?.slice(1) ?? '';
   const [bucket = '', ...rest] = path.split('/');
   const object = decodeURIComponent(rest.join('/'));
   if (!BUCKET.test(bucket)) throw new Refusal(400, 'InvalidBucketName', 'This is no name for a bucket.');
