@@ -2,7 +2,8 @@ import { readFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import fontkit from '@pdf-lib/fontkit';
 import type { Weight } from '#shared/artwork/scene.ts';
-import { unwrapWoff } from './woff.ts';
+import { stripHinting } from './strip-hinting.ts';
+import { joinFont, unwrapWoff } from './woff.ts';
 
 /** What we use of a parsed font: glyphs by code point, and shaping with named features. */
 export interface ParsedFont {
@@ -43,7 +44,8 @@ export function loadFont(weight: Weight): LoadedFont {
   const known = loaded.get(weight);
   if (known) return known;
   const file = createRequire(import.meta.url).resolve(`@ibm/plex-sans/fonts/complete/woff/IBMPlexSans-${STYLES[weight]}.woff`);
-  const bytes = unwrapWoff(readFileSync(file));
+  const { flavour, tables } = unwrapWoff(readFileSync(file));
+  const bytes = joinFont({ flavour, tables: stripHinting(tables) });
   const entry: LoadedFont = { weight, bytes, font: fontkit.create(bytes) as unknown as ParsedFont };
   loaded.set(weight, entry);
   return entry;

@@ -138,7 +138,8 @@ function edgeHang(job: Job, margin: Micrometres): Micrometres {
 
 function hungHead(job: Job, setting: Setting, plan: ColumnPlan, slot: Slot, y: Micrometres): Item[] {
   const first = plan.texts.map((name) => job.content.blocks[name]).find(Boolean);
-  if (!first || first.name === 'responsible person') return [];
+  // The word "Ingredients" stays with its list, so that both are read as one.
+  if (!first || first.name === 'responsible person' || first.keepsHeading) return [];
   const fits = lengthOf(job.metrics.face(600), first.heading, setting.size) <= slot.width;
   if (!fits) return [];
   return [textItem(job.metrics, { element: first.name, text: `${first.heading} `, weight: 600, size: setting.size, x: slot.x, y, ink: 'ink', hang: true })];
@@ -146,7 +147,7 @@ function hungHead(job: Job, setting: Setting, plan: ColumnPlan, slot: Slot, y: M
 
 function headsFit(job: Job, setting: Setting, plan: ColumnPlan, slot: Slot): boolean {
   const first = plan.texts.map((name) => job.content.blocks[name]).find(Boolean);
-  return first !== undefined && lengthOf(job.metrics.face(600), first.heading, setting.size) <= slot.width;
+  return first !== undefined && !first.keepsHeading && lengthOf(job.metrics.face(600), first.heading, setting.size) <= slot.width;
 }
 
 /** Galley: everything hangs from one line that runs the whole girth. */
