@@ -6,18 +6,19 @@ import { rangeText } from './list-findings.ts';
 
 /**
  * The result document of an assessment: exact decimals where they end within 12 places,
- * otherwise rounded half-even to 12.
+ * otherwise rounded half-even to 12. Headroom, the costly part, is left out (empty) where
+ * the reader has no use for it.
  */
-export function presentResult(assessment: Assessment): ResultDocument {
+export function presentResult(assessment: Assessment, { withHeadroom = true } = {}): ResultDocument {
   const totalMass = toDecimal(assessment.totalMass);
   return {
     document: 'result/1',
     dataRelease: assessment.dataRelease,
-    results: assessment.results.map((result) => presentMarket(result, totalMass)),
+    results: assessment.results.map((result) => presentMarket(result, totalMass, withHeadroom)),
   };
 }
 
-function presentMarket(result: MarketAssessment, totalMass: string): MarketResult {
+function presentMarket(result: MarketAssessment, totalMass: string, withHeadroom: boolean): MarketResult {
   const { market, placedOnMarket, availableOn, exposure, declaration } = result;
   return {
     market,
@@ -29,7 +30,7 @@ function presentMarket(result: MarketAssessment, totalMass: string): MarketResul
     allergens: result.allergens.map(presentAllergen),
     findings: result.findings as MarketResult['findings'],
     requiredWording: result.requiredWording as MarketResult['requiredWording'],
-    headroom: [...result.headroom()],
+    headroom: withHeadroom ? [...result.headroom()] : [],
   };
 }
 
