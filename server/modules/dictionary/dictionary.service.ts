@@ -42,17 +42,16 @@ export async function loadDictionary(em: Pick<EntityManager, 'execute'>): Promis
  */
 const CANDIDATES = `
   with near as (
-    (select ctid from dictionary_term where folded like $2::text order by length(folded), folded limit 40)
-    union
-    (select ctid from dictionary_term where words % $1::text and kind <> 'cas' order by similarity(words, $1::text) desc limit 60)
-    union
-    (select ctid from dictionary_term where $1::text <% words and kind <> 'cas' order by word_similarity($1::text, words) desc, length(words) limit 40)
-    union
-    (select ctid from dictionary_term where length(folded) <= 8 and length(folded) between $3::int and $4::int and kind <> 'cas')
+    (select * from dictionary_term where folded like $2::text order by length(folded), folded limit 40)
+    union all
+    (select * from dictionary_term where words % $1::text and kind <> 'cas' order by similarity(words, $1::text) desc limit 50)
+    union all
+    (select * from dictionary_term where $1::text <% words and kind <> 'cas' order by word_similarity($1::text, words) desc, length(words) limit 30)
+    union all
+    (select * from dictionary_term where length(folded) <= 8 and length(folded) between $3::int and $4::int and kind <> 'cas')
   )
-  select t.entry_key::text as "entryKey", t.term, t.words, t.folded, t.kind, e.origin <> 'inventory' as "isCurated"
-  from near join dictionary_term t on t.ctid = near.ctid
-  join dictionary_entry e on e.key = t.entry_key
+  select distinct t.entry_key::text as "entryKey", t.term, t.words, t.folded, t.kind, e.origin <> 'inventory' as "isCurated"
+  from near t join dictionary_entry e on e.key = t.entry_key
   where e.house_id is null`;
 
 /**
