@@ -41,7 +41,8 @@ export function readUpload(req: Request): Promise<Upload> {
       else fields.set(name, value);
     });
     form.on('file', (name, stream, info) => {
-      fileName = name === 'file' ? (info.filename ?? '') : undefined;
+      // Browsers write a quote and line ends of a name as %22, %0D and %0A (HTML standard, multipart/form-data).
+      fileName = name === 'file' ? (info.filename ?? '').replaceAll(/%(?:22|0D|0A)/g, '') : undefined;
       stream.on('data', (chunk: Buffer) => chunks.push(chunk));
       stream.on('limit', () => fail(new AppError('too-large', { message: 'A file can have at most 20 MB.' })));
       stream.on('error', () => fail(broken()));
@@ -62,7 +63,8 @@ function openForm(req: Request) {
     return busboy({
       headers: req.headers,
       defParamCharset: 'utf8',
-      limits: { files: 1, fields: 20, parts: 21, fieldSize: 10_000, fieldNameSize: 100, fileSize: UPLOAD_LIMIT, headerPairs: 100 },
+      // The reader speaks up when a file reaches its limit, so that lies one byte above ours.
+      limits: { files: 1, fields: 20, parts: 21, fieldSize: 10_000, fieldNameSize: 100, fileSize: UPLOAD_LIMIT + 1, headerPairs: 100 },
     });
   } catch {
     // The content type is not multipart or lacks its boundary.

@@ -39,7 +39,8 @@ export async function readPaper(bytes: Buffer, fileName: string): Promise<Paper>
 
 function readPdf(bytes: Buffer, fileName: string): Paper {
   // A PDF begins with its mark and ends with another; one cut off in transit lacks the second.
-  if (bytes.indexOf('%PDF-') !== 0 || bytes.lastIndexOf('%%EOF') < bytes.length - 2048) throw unsupported('This PDF is not whole. Save it again and send it once more.');
+  const end = bytes.lastIndexOf('%%EOF');
+  if (bytes.indexOf('%PDF-') !== 0 || end < 0 || end < bytes.length - 2048) throw unsupported('This PDF is not whole. Save it again and send it once more.');
   return keep(bytes, 'application/pdf', fileName, 'pdf');
 }
 

@@ -28,14 +28,15 @@ export function productsRoutes({ law, dictionary, now }: Deps): Route[] {
   const knows = (): Knowledge => ({ law: law.book, dictionary, today: dayOf(now()) });
   const context = (): SaveContext => ({ now: now(), categories: law.book.categories });
   return [
-    route(listProductsContract, { may: ['read', 'products'] }, ({ inHouse, actor, query }) =>
-      inHouse(async (em) => {
-        const { items, ...paging } = await listProducts(em, actor, query);
-        const house = await getHouse(em, actor);
-        const materials = new Map((await materialsOf(em, actor, items)).map((material) => [material.id, material]));
-        return { items: items.map((product) => summarize(product, house, materials, knows())), ...paging };
-      }),
-    ),
+    route(listProductsContract, { may: ['read', 'products'] }, async ({ inHouse, actor, query }) => {
+      const { items, house, materials, ...paging } = await inHouse(async (em) => {
+        const page = await listProducts(em, actor, query);
+        return { ...page, house: await getHouse(em, actor), materials: await materialsOf(em, actor, page.items) };
+      });
+      // Judging takes the processor, not the database: its connection is free by now.
+      const byId = new Map(materials.map((material) => [material.id, material]));
+      return { items: items.map((product) => summarize(product, house, byId, knows())), ...paging };
+    }),
     route(getProductContract, { may: ['read', 'products'] }, async ({ inHouse, actor, params }) =>
       presentWorkspace(await inHouse((em) => getDossier(em, actor, params.id)), dictionary),
     ),
