@@ -29,7 +29,7 @@ export function judgeUsColours(context: Context): Finding[] {
       if (isColour(substance)) findings.push(present(substance.name, { kind: 'use-not-listed', why: 'it is not listed as a colour additive for cosmetics' }, UNLISTED, undefined, substance));
       continue;
     }
-    if (substance.purposes.length > 0 && !substance.purposes.includes('colourant')) continue;
+    if (!isBound(substance, candidates)) continue;
     findings.push(...judgeCandidates(substance, candidates, context));
   }
   return [...findings, ...judgeShades(context)];
@@ -37,6 +37,12 @@ export function judgeUsColours(context: Context): Finding[] {
 
 function isColour(substance: Substance): boolean {
   return substance.purposes.length > 0 ? substance.purposes.includes('colourant') : isColourIndexName(substance.name);
+}
+
+/** A substance that also does other work (silver nitrate, henna extract) is a colour only where its purpose says so. */
+function isBound(substance: Substance, candidates: readonly UsColourJson[]): boolean {
+  if (substance.purposes.length > 0) return substance.purposes.includes('colourant');
+  return isColourIndexName(substance.name) || candidates.some((one) => one.only === undefined);
 }
 
 /** US colour names that the document gives for an ingredient. */

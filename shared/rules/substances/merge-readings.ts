@@ -54,9 +54,11 @@ function mergeByPurpose(dependent: readonly Outcome[], all: readonly Outcome[]):
     const rest = dependent.filter((one) => one.type !== 'limit' && one.type !== 'requires');
     return [...(limits.length > 0 ? [mostLenient(limits)] : []), ...rest].map((one) => ({ ...one, certainty: 'certain', needs: [] }));
   }
-  // One reading stays open: only an exceeded limit is worth a decision, and only where nothing certain says more.
+  // One reading stays open: only an exceeded limit or a ban is worth a decision, a limit
+  // only where nothing certain says more.
   const hasCertainLimit = all.some((one) => one.type === 'limit' && one.certainty === 'certain');
-  return hasCertainLimit ? [] : dependent.filter((one) => one.type === 'limit').slice(0, 1);
+  const limits = hasCertainLimit ? [] : dependent.filter((one) => one.type === 'limit').slice(0, 1);
+  return [...limits, ...dependent.filter((one) => one.type === 'prohibited')];
 }
 
 function isPositiveList(one: Outcome): boolean {
