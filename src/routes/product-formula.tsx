@@ -18,7 +18,7 @@ import { CountWords, railCounts, VerdictRail, type RailItem } from '#src/feature
 import { follow, type Light } from '#src/features/workspace/light.ts';
 import { Particulars } from '#src/features/workspace/particulars.tsx';
 import { useProductPage } from '#src/features/workspace/product-page.ts';
-import { findAmountRemedy } from '#src/features/workspace/remedy.ts';
+import { useRemedies } from '#src/features/workspace/use-remedies.ts';
 import { keysOfFinding } from '#src/features/workspace/view.ts';
 import { Button, TextButton } from '#src/ui/button.tsx';
 import { Panel, Sheet } from '#src/ui/sheet.tsx';
@@ -45,18 +45,19 @@ export function Component() {
   const litPlace = onlyLit === null ? -1 : free.indexOf(onlyLit);
   const suspects = result.findings.find((finding) => finding.kind === 'sum-mismatch')?.suspects ?? [];
   const hasLines = lines.length > 0;
-  const items: RailItem[] = hasLines ? railItems() : [];
 
-  function railItems(): RailItem[] {
+  const remedies = useRemedies(draft, live, isReadOnly);
+  const items = useMemo<RailItem[]>(() => {
+    if (!hasLines) return [];
     return result.findings.map((finding) => {
-      const remedy = isReadOnly ? null : findAmountRemedy(finding, draft, view, live.tryWith);
+      const remedy = remedies.get(finding);
       return {
         finding,
         keys: keysOfFinding(finding, view.entries),
         act: remedy ? <Button small weight="act" onClick={() => change(setGrams(remedy.lineId, remedy.grams))}>Set {remedy.grams} g of {nameOf(remedy.materialId)}</Button> : undefined,
       };
     });
-  }
+  }, [hasLines, result, remedies, view, change, nameOf]);
 
   return (
     <div className="wrap full">

@@ -10,7 +10,7 @@ import { NotChecked } from '#src/features/verdicts/not-checked.tsx';
 import { RoomLeft } from '#src/features/verdicts/room-left.tsx';
 import { sayFact } from '#src/features/workspace/fact-fields.tsx';
 import { useProductPage } from '#src/features/workspace/product-page.ts';
-import { findAmountRemedy } from '#src/features/workspace/remedy.ts';
+import { useRemedies } from '#src/features/workspace/use-remedies.ts';
 import { Button } from '#src/ui/button.tsx';
 import { Sheet } from '#src/ui/sheet.tsx';
 
@@ -23,11 +23,14 @@ export function Component() {
   const merged = useMemo(() => mergeFindings(results), [results]);
   const counts = useMemo(() => new Map(results.map((result) => [result.market, countFindings(result.findings)])), [results]);
   const lines = draft.formula.phases.flatMap((phase) => phase.lines);
+  const remedies = useRemedies(draft, live, isReadOnly);
   const headroom = useHeadroom(live.view.result.headroom);
 
   const remedyOf = (finding: MergedFinding) => {
     const own = finding.markets.get(asOf.market);
-    return own && !isReadOnly ? findAmountRemedy(own, draft, live.view, live.tryWith) : null;
+    // The other markets are judged apart: the same finding of the market at hand is found by its rule.
+    const same = own && [...remedies.keys()].find((each) => each.rule === own.rule && each.subject === own.subject && each.kind === own.kind);
+    return same ? remedies.get(same) : undefined;
   };
   const actOf = (finding: MergedFinding) => {
     const remedy = remedyOf(finding);

@@ -10,6 +10,11 @@ export interface DayBoxProps {
   readonly onDay: (day: string) => void;
 }
 
+/** As a `ref`: takes the focus once. */
+function focusFirst(element: HTMLElement | null): void {
+  element?.focus();
+}
+
 /** A day that reads as part of a sentence and can be written or picked where it stands. */
 export function DayBox({ label, day, covered, least = covered.from, onDay }: DayBoxProps) {
   const id = useId();
@@ -35,7 +40,7 @@ export function DayBox({ label, day, covered, least = covered.from, onDay }: Day
       <input
         type="date"
         // The field takes the place of the button that was just pressed: the focus belongs here.
-        ref={(element) => element?.focus()}
+        ref={focusFirst}
         aria-label={label}
         aria-describedby={fault ? id : undefined}
         aria-invalid={fault !== '' || undefined}

@@ -32,7 +32,7 @@ export function AddMaterial({ onChoose, onNew, onPaste, inputRef }: AddMaterialP
     placeholderData: (before) => before,
   });
   const found = find === '' ? [] : (data?.items ?? []).slice(0, 8).map((item) => toOption(item, find));
-  const options: ComboboxOption[] = find === '' ? [] : [...found, { id: NEW, text: typed, shown: <>New material “{find}”</>, under: 'Add it here, complete its composition later' }];
+  const options: ComboboxOption[] = find === '' ? [] : [...found, { id: NEW, text: find, shown: <>New material “{find}”</>, under: 'Add it here, complete its composition later' }];
   return (
     <div
       onPasteCapture={(event) => {

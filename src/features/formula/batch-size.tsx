@@ -6,6 +6,7 @@ import { TextField } from '#src/ui/field.tsx';
 import { previewScale, scaleTo, setBatchSize } from './phase-recipes.ts';
 import { readNumber } from './read-number.ts';
 import type { Recipe } from './recipes.ts';
+import { focusFirst } from './focus-first.ts';
 
 export interface BatchSizeProps {
   readonly draft: ProductDraft;
@@ -78,7 +79,7 @@ export function ScaleDialog({ draft, nameOf, onClose, onChange }: { draft: Produ
       }
     >
       <p className="quiet">Lines in grams are scaled in proportion; percent lines and the line that makes up the batch follow by themselves. It can be undone.</p>
-      <TextField className="mt-3" label="New batch size, g" figure autoFocus value={typed} error={'fault' in read ? read.fault : undefined} onChange={(event) => setTyped(event.target.value)} />
+      <TextField className="mt-3" label="New batch size, g" figure ref={focusFirst} value={typed} error={'fault' in read ? read.fault : undefined} onChange={(event) => setTyped(event.target.value)} />
       {typed !== '' && 'grams' in read && !scaled ? <p className="hint">There is nothing to scale yet.</p> : null}
       {scaled ? (
         <div className="paste-preview">

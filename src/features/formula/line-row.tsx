@@ -62,7 +62,7 @@ export const LineRow = memo(function LineRow(props: LineRowProps) {
       </th>
       <td className="num">
         {makesUp ? (
-          <span className="fixed" title={`${toDecimal(weighed.mass)} g`}>{shorten(weighed.grams)}</span>
+          <span className="made-up" title={`${toDecimal(weighed.mass)} g`}>{shorten(weighed.grams)}</span>
         ) : (
           <AmountField
             lineId={line.id}
@@ -79,7 +79,7 @@ export const LineRow = memo(function LineRow(props: LineRowProps) {
       </td>
       <td className="num">
         {makesUp ? (
-          <span className="fixed" title={`${toDecimal(weighed.percent)} %`}>{shorten(weighed.share)}</span>
+          <span className="made-up" title={`${toDecimal(weighed.percent)} %`}>{shorten(weighed.share)}</span>
         ) : (
           <AmountField
             lineId={line.id}

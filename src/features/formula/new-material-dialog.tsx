@@ -8,6 +8,7 @@ import { Button } from '#src/ui/button.tsx';
 import { Combobox } from '#src/ui/combobox.tsx';
 import { Dialog } from '#src/ui/dialog.tsx';
 import { FieldFault, TextField } from '#src/ui/field.tsx';
+import { focusFirst } from './focus-first.ts';
 
 /** A material made on the way: its name, and the one ingredient it is, if it is one. The rest waits in Materials. */
 export function NewMaterialDialog({ name, onClose, onMade }: { name: string; onClose: () => void; onMade: (material: Material) => void }) {
@@ -45,7 +46,7 @@ export function NewMaterialDialog({ name, onClose, onMade }: { name: string; onC
       }
     >
       <div className="grid gap-3">
-        <TextField label="Trade name" value={tradeName} onChange={(event) => setTradeName(event.target.value)} autoFocus />
+        <TextField label="Trade name" value={tradeName} onChange={(event) => setTradeName(event.target.value)} ref={focusFirst} />
         <Combobox
           label="The one ingredient it is (leave empty for a blend)"
           value={inci}

@@ -9,6 +9,7 @@ import { Button } from '#src/ui/button.tsx';
 import { Dialog } from '#src/ui/dialog.tsx';
 import { AreaField } from '#src/ui/field.tsx';
 import { newId } from './new-id.ts';
+import { focusFirst } from './focus-first.ts';
 
 export interface PastedGroup {
   readonly id: string;
@@ -93,7 +94,7 @@ export function PasteDialog({ initial, phaseName, hasMakeUp, onClose, onAdd }: P
       }
     >
       <p className="quiet">Copy the rows with their names and amounts, grams or percent or both, and paste them here. “q.s.” marks the line that makes up the batch.</p>
-      <AreaField className="mt-3" label="Rows" rows={6} autoFocus spellCheck={false} value={text} onChange={(event) => setText(event.target.value)} />
+      <AreaField className="mt-3" label="Rows" rows={6} ref={focusFirst} spellCheck={false} value={text} onChange={(event) => setText(event.target.value)} />
       {paste.problems.map((problem) => <p key={`${problem.row}${problem.message}`} className="error mt-2"><i className="mark stop" aria-hidden="true" /><span>Row {problem.row}: {problem.message}</span></p>)}
       {paste.lines.length > 0 ? (
         <div className="paste-preview">

@@ -3,6 +3,7 @@ import { toDecimal, type Rational } from '#shared/kernel/rational.ts';
 import type { Phase } from '#shared/contracts/product-draft.ts';
 import { Icon } from '#src/ui/icon.tsx';
 import { Menu } from '#src/ui/menu.tsx';
+import { focusFirst } from './focus-first.ts';
 
 export interface PhaseHeadProps {
   readonly phase: Phase;
@@ -53,7 +54,7 @@ export function PhaseHead({ phase, grams, percent, isFirst, isLast, isReadOnly, 
             aria-label="Name of the phase"
             maxLength={80}
             // Renaming was just asked for: the focus belongs here.
-            ref={(element) => element?.focus()}
+            ref={focusFirst}
             value={name}
             onChange={(event) => setName(event.target.value)}
             onBlur={finish}

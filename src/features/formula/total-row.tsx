@@ -27,7 +27,7 @@ export function totalWords(weighed: WeighedFormula, makesUpName: string | null):
 /** The total under the column, and whatever would put a wrong one right. */
 export function TotalRow({ weighed, makesUpName, suspects, onTake }: TotalRowProps) {
   const percent = weighed.base.n > 0n ? toDecimal({ n: weighed.total.n * weighed.base.d * 100n, d: weighed.total.d * weighed.base.n }, 4) : '0';
-  const offered = suspects.slice(0, 4);
+  const offered = [...new Map(suspects.map((suspect) => [`${suspect.lineId} ${suspect.perhaps}`, suspect])).values()].slice(0, 4);
   return (
     <tfoot className={weighed.isOff ? 'off' : ''}>
       <tr>
@@ -44,7 +44,7 @@ export function TotalRow({ weighed, makesUpName, suspects, onTake }: TotalRowPro
               <b>Perhaps a slip.</b> One figure would close the gap:
             </p>
             {offered.map((suspect) => (
-              <Button small key={`${suspect.lineId}${suspect.perhaps}`} onClick={() => onTake(suspect)}>
+              <Button small key={`${suspect.lineId} ${suspect.perhaps}`} onClick={() => onTake(suspect)}>
                 {suspect.name}: {suspect.written}, take {suspect.perhaps} {suspect.unit}
               </Button>
             ))}

@@ -73,7 +73,6 @@ export function LadderRows({ geometry, lit, onLight, onMove, onOpen }: LadderRow
             key={rung.key}
             role="option"
             aria-selected={lit.has(rung.key)}
-            aria-label={`${rung.name}, ${rung.zone === 'unnamed' ? `at most ${roughly(rung.max)}` : roughly(rung.typical)} percent${rung.isUnsure ? ', needs a decision' : ''}${movable ? ', may stand anywhere in the free zone; Alt and an arrow key move it' : ''}`}
             tabIndex={rung.key === stop ? 0 : -1}
             className={`${movable ? 'free' : ''} ${rung.zone === 'unnamed' ? 'off' : ''} ${isDragged ? 'drag' : ''} ${lit.has(rung.key) ? 'lit' : ''}`}
             style={style}
@@ -96,6 +95,7 @@ export function LadderRows({ geometry, lit, onLight, onMove, onOpen }: LadderRow
             {rung.isUnsure ? <VerdictMark weight="decide" silent /> : null}
             <span className="share" title={`${rung.typical} %`}>
               {rung.zone === 'unnamed' ? `at most ${roughly(rung.max)}` : roughly(rung.typical)}
+              <span className="sr-only"> percent{rung.isUnsure ? ', needs a decision' : ''}{movable ? ', may stand anywhere in the free zone; Alt and an arrow key move it' : ''}</span>
             </span>
             <span className="grip">{movable ? <Icon name="grip" /> : null}</span>
           </li>

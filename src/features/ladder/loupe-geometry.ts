@@ -4,7 +4,7 @@ import type { Rung } from './geometry.ts';
 /** A pair of rungs on a straight scale of its own, in whole drawing units. */
 export interface LoupeGeometry {
   readonly bars: readonly { readonly key: string; readonly name: string; readonly from: number; readonly to: number; readonly at: number; readonly isRange: boolean; readonly labelX: number; readonly labelY: number; readonly y: number; readonly anchor: 'start' | 'end' }[];
-  /** The stretch that both can reach. */
+  /** The stretch over which the order may be turned round. */
   readonly shared: { readonly from: number; readonly width: number };
   readonly ticks: readonly { readonly x: number; readonly label: string | null }[];
 }
@@ -35,8 +35,9 @@ export function layLoupe(pair: readonly [Rung, Rung], width: number): LoupeGeome
       anchor: isFirst || fits ? ('start' as const) : ('end' as const),
     };
   };
-  const from = scale(Math.max(a.min, b.min));
-  const to = scale(Math.min(a.max, b.max));
+  // Where the one that is printed first may stand below the other.
+  const from = scale(a.min);
+  const to = scale(Math.max(b.max, a.min));
   const labels = new Set(scale.ticks(3).map((value) => value.toPrecision(12)));
   const format = scale.tickFormat(3);
   return {

@@ -95,6 +95,8 @@ function StepFields({ step, place, unit, isReadOnly, isFirst, isLast, onWrite, o
   return (
     <div
       className="step"
+      role="group"
+      aria-label={`Step ${place}`}
       onKeyDown={(event) => {
         if (!event.altKey || (event.key !== 'ArrowUp' && event.key !== 'ArrowDown')) return;
         event.preventDefault();

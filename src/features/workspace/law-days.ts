@@ -37,7 +37,11 @@ export async function findLawDays(judge: Judge, document: FormulaDocument, marke
     const begun = law.changes.find((other) => other.id === change.id && other.market === market && other.kind === 'placed' && other.date < change.date);
     const on = (day: string) => impression(judge(document, { markets: [market], placed: change.kind === 'available' && begun ? dayBefore(begun.date) : day, available: day, today: options.today }));
     if (on(dayBefore(change.date)) === on(change.date)) continue;
-    found.push({ date: change.date, words: change.kind === 'available' && begun ? `${change.title}, on all that is still sold` : change.title });
+    const isSecond = change.kind === 'available' && begun !== undefined;
+    const follows = isSecond && found.some((day) => day.date === begun.date && day.words === change.title);
+    found.push({ date: change.date, words: follows ? 'and on all that is still sold' : isSecond ? `${change.title}, on all that is still sold` : change.title });
   }
-  return found.toSorted((a, b) => (a.date < b.date ? -1 : 1));
+  const byDate = new Map<string, string>();
+  for (const { date, words } of found) byDate.set(date, byDate.has(date) ? `${byDate.get(date)}; ${words}` : words);
+  return [...byDate].map(([date, words]) => ({ date, words })).toSorted((a, b) => (a.date < b.date ? -1 : 1));
 }

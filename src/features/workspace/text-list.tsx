@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { Button, IconButton } from '#src/ui/button.tsx';
 import { TextField } from '#src/ui/field.tsx';
+import { focusFirst } from './focus-first.ts';
 
 interface Item {
   readonly text: string;
@@ -40,7 +41,7 @@ export function TextList({ title, items, addWord, isReadOnly, onItems, onSettle 
           {isReadOnly ? null : <IconButton icon="away" word={`Remove ${title.toLowerCase()} ${index + 1}`} onClick={() => onItems(items.filter((_, at) => at !== index))} />}
         </div>
       ))}
-      {fresh === null ? null : <TextField bare autoFocus label={addWord} value={fresh} onChange={(event) => setFresh(event.target.value)} onBlur={add} onKeyDown={(event) => event.key === 'Enter' && add()} />}
+      {fresh === null ? null : <TextField bare ref={focusFirst} label={addWord} value={fresh} onChange={(event) => setFresh(event.target.value)} onBlur={add} onKeyDown={(event) => event.key === 'Enter' && add()} />}
       {isReadOnly || fresh !== null ? null : <Button small icon="plus" onClick={() => setFresh('')}>{addWord}</Button>}
     </div>
   );

@@ -1,4 +1,4 @@
-import { useDeferredValue, useEffect, useMemo, useState } from 'react';
+import { useCallback, useDeferredValue, useEffect, useMemo, useState } from 'react';
 import type { ProductDraft } from '#shared/contracts/product-draft.ts';
 import type { Material } from '#shared/contracts/materials.contract.ts';
 import type { MarketAssessment } from '#shared/engine/assessment.ts';
@@ -72,6 +72,6 @@ export function useAssessment(input: AssessmentInput): LiveAssessment {
     };
   }, [judge, document, market, engine, today]);
 
-  const tryWith = (other: ProductDraft) => judge(toDocument(other, materials, house), { markets: [market], placed, available, today }).results[0]!;
+  const tryWith = useCallback((other: ProductDraft) => judge(toDocument(other, materials, house), { markets: [market], placed, available, today }).results[0]!, [judge, materials, house, market, placed, available, today]);
   return { view, all: all.results, isBehind: all.of !== view, lawDays, tryWith };
 }
