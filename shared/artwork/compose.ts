@@ -53,7 +53,7 @@ function fillSlot(job: Job, setting: Setting, plan: ColumnPlan, slot: Slot, heig
 /** Last base line: as drawn, 0.062 of the height; at least so that descenders keep the safe margin. */
 function footLine(job: Job, setting: Setting): Micrometres {
   const { height } = job.sheet;
-  const least = SAFE + Math.round(Math.max(setting.size, job.content.net ? job.netSize : 0) * 0.21);
+  const least = SAFE + Math.round(Math.max(setting.size, job.content.net ? job.netSize : 0, job.content.eMark ? 4500 : 0) * 0.215);
   const drawn = Math.min(Math.round(height * 0.062), 9000);
   const share = [1, 0.6, 0][setting.tight]!;
   return height - Math.max(least, Math.round(drawn * share));

@@ -1,5 +1,36 @@
-import { Sheet } from '#src/ui/sheet.tsx';
+import { getLabelPdf } from '#shared/contracts/products.contract.ts';
+import { LabelStudio } from '#src/features/labels/label-studio.tsx';
+import { useProductPage } from '#src/features/workspace/product-page.ts';
+import { download } from '#src/lib/api/download.ts';
+import { sayError } from '#src/lib/api/error.ts';
 
+/** The label at true size, its settings, and the press file. */
 export function Component() {
-  return <div className="wrap full"><Sheet className="hung"><div className="panel" /></Sheet></div>;
+  const { id, desk, live, house, asOf, isReadOnly } = useProductPage();
+  const { market } = desk.draft.label;
+  const result = live.all.get(market) ?? (live.view.result.market === market ? live.view.result : undefined);
+
+  const fetchPressFile = async (): Promise<void> => {
+    // The server sets what it holds, so what was typed last must have reached it.
+    if (desk.save.kind !== 'saved') {
+      desk.saveNow();
+      throw new Error('The last change is on its way to the server. Ask again when it is saved.');
+    }
+    try {
+      await download(getLabelPdf, { params: { id }, query: { market, placed: asOf.placed, available: asOf.available } });
+    } catch (error) {
+      throw new Error(sayError(error), { cause: error });
+    }
+  };
+
+  return (
+    <div className="wrap full">
+      <LabelStudio
+        draft={desk.draft} result={result} house={house} isLocked={isReadOnly}
+        onChange={(label) => desk.change((draft) => ({ ...draft, label }), 'label')}
+        onPressFile={fetchPressFile}
+      />
+      <p className="foot">Screen and press file are painted from one scene.</p>
+    </div>
+  );
 }
