@@ -150,9 +150,10 @@ function readWarning(json: ProductWarningJson): ProductWarning {
 
 function readChanges(tables: LawTables, rows: readonly LawRow[]): LawChange[] {
   const changes: LawChange[] = [];
+  const dated = rows.filter((row) => row.from !== undefined || row.provisions.some((one) => one.from !== undefined));
   for (const json of tables.changes) {
     const dates = readDates({ available: json.available, ...(json.placed ? { placed: json.placed } : {}) }, json.id)!;
-    const rowIds = rows.filter((row) => row.markets.includes(json.market) && beginsWith(row, dates, json.market)).map((row) => row.id);
+    const rowIds = dated.filter((row) => row.markets.includes(json.market) && beginsWith(row, dates, json.market)).map((row) => row.id);
     const common = { id: json.id, market: json.market, title: json.title, what: json.what, citation: json.citation, rowIds };
     if (dates.placed) changes.push({ ...common, date: dates.placed, kind: 'placed' });
     changes.push({ ...common, date: dates.available, kind: 'available' });

@@ -1,4 +1,4 @@
-import type { Finding } from '#shared/engine/types.ts';
+import type { Finding, Substance } from '#shared/engine/types.ts';
 import { foldName } from '#shared/law/fold.ts';
 import type { Context } from '../context.ts';
 
@@ -11,9 +11,8 @@ import type { Context } from '../context.ts';
 export function judgeIsothiazolinones(context: Context): Finding[] {
   const { market } = context.facts;
   if (market !== 'EU' && market !== 'UK') return [];
-  const find = (name: string) => context.mixture.substances.find((one) => foldName(one.name) === foldName(name));
-  const chloro = find('Methylchloroisothiazolinone');
-  const plain = find('Methylisothiazolinone');
+  const chloro = find(context, 'Methylchloroisothiazolinone');
+  const plain = chloro && find(context, 'Methylisothiazolinone');
   if (!chloro || !plain) return [];
   const withChloro = new Set(chloro.sources.map((source) => source.materialId));
   const alone = plain.sources.filter((source) => !withChloro.has(source.materialId));
@@ -32,4 +31,9 @@ export function judgeIsothiazolinones(context: Context): Finding[] {
       reading: 'A material that brings methylisothiazolinone without the chloro compound counts as its use alone.',
     },
   ];
+}
+
+/** A name of the same length is folded and compared; most are told apart by their length alone. */
+function find(context: Context, name: string): Substance | undefined {
+  return context.mixture.substances.find((one) => one.name.length === name.length && foldName(one.name) === foldName(name));
 }
