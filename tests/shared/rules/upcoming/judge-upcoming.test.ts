@@ -17,6 +17,15 @@ describe('what is to come', () => {
     expect(lines).toEqual(['limit-exceeded Citral eu/annex-iii/70/e']);
   });
 
+  test.each<[string, string, string[]]>([
+    ['Citral', '2028-06-30', ['upcoming Citral eu/annex-iii/70/e']],
+    ['Citral', '2028-07-01', ['limit-exceeded Citral eu/annex-iii/70/e']],
+    ['Geranial', '2028-07-31', ['upcoming Geranial eu/annex-iii/70/e']],
+    ['Geranial', '2028-08-01', ['limit-exceeded Geranial eu/annex-iii/70/e']],
+  ])('%s in stock placed before 2027, still sold on %s', (name, available, expected) => {
+    expect(said(judge([{ name, percent: '0.2', as: 'hidden' }], { category: 'face-cream', placed: '2026-12-31', available }))).toEqual(expected);
+  });
+
   test('zinc in mouthwash keeps today\'s limit and is told of the next', () => {
     expect(said(judge([{ name: 'Zinc Chloride', percent: '1' }], { category: 'mouthwash' }))).toEqual(['upcoming Zinc Chloride eu/annex-iii/24/c']);
   });
