@@ -64,7 +64,9 @@ export function sendPage(res: ServerResponse, status: number, html: string, form
   res.setHeader('Content-Type', 'text/html; charset=utf-8');
   res.setHeader('Cache-Control', 'no-store');
   res.setHeader('X-Content-Type-Options', 'nosniff');
-  res.setHeader('Referrer-Policy', 'no-referrer');
+  // Under no-referrer a browser says null as the origin of a page's own form.
+  // Not 'no-referrer': a browser then sends these forms with the origin "null", which nobody may trust.
+  res.setHeader('Referrer-Policy', 'same-origin');
   res.setHeader('Content-Security-Policy', `default-src 'none'; style-src 'sha256-${hash}'; font-src data:; form-action ${formTo}; base-uri 'none'; frame-ancestors 'none'`);
   res.end(html);
 }

@@ -21,7 +21,7 @@ export function securityHeaders({ isSecure }: { readonly isSecure: boolean }): R
     },
     crossOriginOpenerPolicy: { policy: 'same-origin' },
     crossOriginResourcePolicy: { policy: 'same-origin' },
-    referrerPolicy: { policy: 'no-referrer' },
+    referrerPolicy: { policy: 'same-origin' },
     // Over plain http on loopback this header would lock the browser out of other local work.
     strictTransportSecurity: isSecure ? { maxAge: 31_536_000, includeSubDomains: true } : false,
     xPoweredBy: true,

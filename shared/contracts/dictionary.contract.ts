@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 import { endpoint } from './endpoint.ts';
 
 export const dictionaryEntry = z.object({

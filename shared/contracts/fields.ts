@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 import { parseDecimal } from '#shared/kernel/rational.ts';
 import { parsePlainDate } from '#shared/kernel/plain-date.ts';
 

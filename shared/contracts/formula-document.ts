@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 import type { Market, ProductFlag, Purpose } from '#shared/law/types.ts';
 
 /** A formula document as the engine reads it: checked, every quantity a plain decimal text. */

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 import { endpoint } from './endpoint.ts';
 
 /** The law tables of the release in force here, for the engine in the browser. Kept by the browser until the release changes. */

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 import { endpoint } from './endpoint.ts';
 import { amountField, dateField, idField, nameField, percentField, textField, versionField } from './fields.ts';
 

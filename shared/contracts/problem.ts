@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 
 /** Codes of refusals; the server's one table gives each its status. */
 export const problemCode = z.enum([

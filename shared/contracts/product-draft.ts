@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 import { amountField, dateField, idField, langField, marketField, nameField, textField } from './fields.ts';
 
 /** A product as its house edits it: everything but the materials, which are referred to by id. */

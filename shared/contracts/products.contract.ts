@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 import { endpoint } from './endpoint.ts';
 import { dateField, idField, marketField, nameField, versionField } from './fields.ts';
 import { dictionaryEntry } from './dictionary.contract.ts';

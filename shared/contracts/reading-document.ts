@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 
 /** What `read` prints of a pasted ingredient list. Shares in percent, as exact decimals. */
 export const readingDocumentSchema = z.object({

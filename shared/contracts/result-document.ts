@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { z } from './zod.ts';
 
 /** What `check` prints and the HTTP API answers: every quantity an exact decimal as text. */
 const range = z.object({ min: z.string(), typical: z.string(), max: z.string() });

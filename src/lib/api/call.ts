@@ -1,12 +1,9 @@
-import { z } from 'zod';
+import type { z } from 'zod';
 import type { Endpoint } from '#shared/contracts/endpoint.ts';
 import { readAnswer } from './answer.ts';
 import { OfflineError } from './error.ts';
 import { csrfHeader } from './session-token.ts';
 import { urlOf } from './url.ts';
-
-// The page's policy forbids code made from text, which is zod's faster way.
-z.config({ jitless: true });
 
 type Given<T, Key extends string> = T extends z.ZodType ? (unknown extends z.input<T> ? object : { [K in Key]: z.input<T> }) : object;
 /** What an endpoint wants: `params`, `query` and `body`, as far as its contract has them. */
