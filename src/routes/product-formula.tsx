@@ -34,13 +34,20 @@ export function Component() {
   const { result } = view;
   const lines = useMemo(() => draft.formula.phases.flatMap((phase) => phase.lines), [draft.formula.phases]);
   const everything = useMemo(() => [...view.entries, ...view.unnamed], [view]);
-  const lit = useMemo(() => follow(light, everything, (line) => (lines[line] ? nameOf(lines[line].materialId) : '')), [light, everything, lines, nameOf]);
+  // Names only: amounts change with every keystroke, and nothing that is lit depends on them here.
+  const lineKey = lines.map((line) => line.materialId).join('|');
+  const lineNames = useMemo(() => lineKey.split('|').map(nameOf), [lineKey, nameOf]);
+  const lit = useMemo(() => follow(light, everything, (line) => lineNames[line] ?? ''), [light, everything, lineNames]);
+  const rungs = useMemo(() => everything.filter((entry) => entry.zone !== 'may-contain'), [everything]);
   const lightKey = useCallback((key: string | null) => setLight(key === null ? null : { keys: [key] }), []);
   const lightLine = useCallback((line: number | null) => setLight(line === null ? null : { line }), []);
   const lightKeys = useCallback((keys: readonly string[] | null) => setLight(keys === null || keys.length === 0 ? null : { keys }), []);
 
-  const free = view.entries.filter((entry) => entry.isFree).map((entry) => entry.key);
-  const move = isReadOnly ? undefined : (key: string, place: number) => change(chooseOrder(asOf.market, placeKey(free, key, place)), `order:${asOf.market}`);
+  const free = useMemo(() => view.entries.filter((entry) => entry.isFree).map((entry) => entry.key), [view]);
+  const moveFree = useCallback((key: string, place: number) => change(chooseOrder(asOf.market, placeKey(free, key, place)), `order:${asOf.market}`), [change, asOf.market, free]);
+  const move = isReadOnly ? undefined : moveFree;
+  const toDeclaration = useCallback(() => void navigate(paths.declaration(page.id) + page.search), [navigate, page.id, page.search]);
+  const allLink = useMemo(() => <Link to={paths.verdicts(page.id) + page.search}>All verdicts, in every market</Link>, [page.id, page.search]);
   const onlyLit = light !== null && 'keys' in light && light.keys.length === 1 ? light.keys[0]! : null;
   const litPlace = onlyLit === null ? -1 : free.indexOf(onlyLit);
   const suspects = result.findings.find((finding) => finding.kind === 'sum-mismatch')?.suspects ?? [];
@@ -83,13 +90,13 @@ export function Component() {
               <LadderTable rows={everything} lit={lit.keys} onLight={lightKey} />
             ) : (
               <Ladder
-                rungs={everything.filter((entry) => entry.zone !== 'may-contain')}
+                rungs={rungs}
                 lines={view.lines}
                 pairs={view.pairs}
                 lit={lit.keys}
                 onLight={lightKey}
                 onMove={move}
-                onOpen={() => void navigate(paths.declaration(page.id) + page.search)}
+                onOpen={toDeclaration}
               />
             )}
             {hasLines ? (
@@ -113,7 +120,7 @@ export function Component() {
             </Panel>
             <Panel title="Verdicts" end={<CountWords counts={railCounts(items)} />}>
               {hasLines ? (
-                <VerdictRail items={items} release={page.engine.law.release} lit={lit.keys} onLight={lightKeys} all={<Link to={paths.verdicts(page.id) + page.search}>All verdicts, in every market</Link>} />
+                <VerdictRail items={items} release={page.engine.law.release} lit={lit.keys} onLight={lightKeys} all={allLink} />
               ) : (
                 <p className="quiet">Nothing to judge yet.</p>
               )}

@@ -1,4 +1,4 @@
-import { useRef, useState, type KeyboardEvent } from 'react';
+import { memo, useRef, useState, type KeyboardEvent } from 'react';
 import { Dialog } from 'react-aria-components/Dialog';
 import { Popover } from 'react-aria-components/Popover';
 import { EntrySum, sayShare, type ListedEntry } from './entry-sum.tsx';
@@ -16,7 +16,7 @@ export interface PrintedListProps {
 }
 
 /** The list as it must be printed, at true size; each name opens to its arithmetic. */
-export function PrintedList({ heading, entries, totalGrams, lit, onLight, market, label }: PrintedListProps) {
+export const PrintedList = memo(function PrintedList({ heading, entries, totalGrams, lit, onLight, market, label }: PrintedListProps) {
   const box = useRef<HTMLDivElement>(null);
   const [active, setActive] = useState(0);
   const [open, setOpen] = useState<string | null>(null);
@@ -105,4 +105,4 @@ export function PrintedList({ heading, entries, totalGrams, lit, onLight, market
       ) : null}
     </div>
   );
-}
+});

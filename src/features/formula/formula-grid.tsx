@@ -69,6 +69,7 @@ export function FormulaGrid(props: FormulaGridProps) {
     },
     [onChange, isReadOnly],
   );
+  const phaseKey = draft.formula.phases.map((phase) => `${phase.id}:${phase.name}`).join('|');
   const batchWords = weighed.batch ? ` in ${draft.formula.batchSize?.value} g` : '';
 
   return (
@@ -114,7 +115,8 @@ export function FormulaGrid(props: FormulaGridProps) {
                   isDragged={dragged?.lineId === line.id}
                   isDoubtful={isDoubtful || suspect !== undefined}
                   isReadOnly={isReadOnly}
-                  menu={lineMenu(line, phase, draft.formula.phases, props)}
+                  menu={() => lineMenu(line, phase, draft.formula.phases, props)}
+                  menuKey={`${phaseKey}|${place}|${phase.lines.length}|${at}`}
                   onLight={props.onLight}
                   onGrams={handleGrams}
                   onPercent={handlePercent}

@@ -1,4 +1,4 @@
-import { useRef, useState } from 'react';
+import { useCallback, useRef, useState } from 'react';
 import type { FormulaLine, ProductDraft } from '#shared/contracts/product-draft.ts';
 import type { Material } from '#shared/contracts/materials.contract.ts';
 import { sayError } from '#src/lib/api/error.ts';
@@ -43,6 +43,7 @@ export function FormulaPanel(props: FormulaPanelProps) {
   const field = useRef<HTMLInputElement>(null);
   const [open, setOpen] = useState<Open>(null);
   const close = () => setOpen(null);
+  const toField = useCallback(() => field.current?.focus(), []);
   const lines = draft.formula.phases.flatMap((phase) => phase.lines);
 
   const add = (materialId: string) => {
@@ -77,7 +78,7 @@ export function FormulaPanel(props: FormulaPanelProps) {
             {isReadOnly ? 'A formulator of the house can add materials.' : 'Type the first material below and press Enter, then its grams or percent. Or paste rows from a spreadsheet.'}
           </EmptyState>
         ) : null}
-        {lines.length > 0 || draft.formula.phases.length > 1 ? <FormulaGrid {...props} onNote={(line) => setOpen({ kind: 'note', line })} onPastEnd={() => field.current?.focus()} /> : null}
+        {lines.length > 0 || draft.formula.phases.length > 1 ? <FormulaGrid {...props} onNote={(line) => setOpen({ kind: 'note', line })} onPastEnd={toField} /> : null}
         {isReadOnly ? null : (
           <>
             <AddMaterial inputRef={field} onChoose={(id) => void bring(id)} onNew={(name) => setOpen({ kind: 'new', name })} onPaste={openPaste} />

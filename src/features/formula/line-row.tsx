@@ -14,7 +14,9 @@ export interface LineRowProps {
   /** What the lit ingredient gets from here: `gives 1.5 %`. */
   readonly gives: string;
   readonly isReadOnly: boolean;
-  readonly menu: readonly MenuEntry[];
+  readonly menu: () => readonly MenuEntry[];
+  /** Changes where the menu's words would. */
+  readonly menuKey: string;
   readonly onLight: (line: number | null) => void;
   readonly onGrams: (lineId: string, text: string) => void;
   readonly onPercent: (lineId: string, text: string) => void;
@@ -28,6 +30,13 @@ export interface LineRowProps {
 function shorten(text: string): string {
   if (text === '' || text.length <= 7) return text;
   return String(Number(Number(text).toPrecision(6)));
+}
+
+/** Rows that look the same are not drawn again: forty of them stand beside the one that is typed in. */
+function looksSame(before: LineRowProps, after: LineRowProps): boolean {
+  const keys = (Object.keys(after) as (keyof LineRowProps)[]).filter((key) => key !== 'menu' && key !== 'weighed');
+  const [a, b] = [before.weighed, after.weighed];
+  return a.line === b.line && a.index === b.index && a.grams === b.grams && a.share === b.share && keys.every((key) => before[key] === after[key]);
 }
 
 /** One material in the grid: its name, grams and percent side by side. */
@@ -50,7 +59,7 @@ export const LineRow = memo(function LineRow(props: LineRowProps) {
         {isReadOnly ? null : (
           // The wrapper starts a drag by pointer; the button inside opens the same moves as words.
           <span className="handle" onPointerDown={(event) => props.onGrab(event, line.id)}>
-            <Menu className="handle-button" label={`${name}: move, note, remove`} trigger={<Icon name="grip" />} entries={menu} />
+            <Menu className="handle-button" label={`${name}: move, note, remove`} trigger={<Icon name="grip" />} entries={menu()} />
           </span>
         )}
         <span className="material" title={name}>
@@ -96,4 +105,4 @@ export const LineRow = memo(function LineRow(props: LineRowProps) {
       </td>
     </tr>
   );
-});
+}, looksSame);

@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState, type PointerEvent, type RefObject } from 'react';
+import { useCallback, useEffect, useRef, useState, type PointerEvent, type RefObject } from 'react';
 
 /** Where a dragged line would land. */
 export interface Landing {
@@ -70,9 +70,9 @@ export function useLineDrag(table: RefObject<HTMLTableElement | null>, onDrop: (
     };
   }, [table, onDrop]);
 
-  const handleGrab = (event: PointerEvent, lineId: string) => {
+  const handleGrab = useCallback((event: PointerEvent, lineId: string) => {
     if (event.button !== 0) return;
     grab.current = { lineId, pointer: event.pointerId, startY: event.clientY };
-  };
+  }, []);
   return { dragged, handleGrab };
 }

@@ -1,4 +1,4 @@
-import { useId, useLayoutEffect, useMemo, useRef, useState } from 'react';
+import { memo, useId, useLayoutEffect, useMemo, useRef, useState } from 'react';
 import { layLadder, type LadderGeometry, type LawLine, type Rung } from './geometry.ts';
 import { LadderRows } from './ladder-rows.tsx';
 import { Loupe } from './loupe.tsx';
@@ -35,7 +35,7 @@ function useWidth(fallback: number) {
 }
 
 /** The concentration ladder: every ingredient at its share on a logarithmic scale, with the lines of law across. */
-export function Ladder({ rungs, lines, pairs, lit, onLight, onMove, onOpen }: LadderProps) {
+export const Ladder = memo(function Ladder({ rungs, lines, pairs, lit, onLight, onMove, onOpen }: LadderProps) {
   const { ref, width } = useWidth(560);
   const hatchId = useId().replaceAll(':', '');
   const geometry: LadderGeometry = useMemo(() => layLadder(rungs, lines, width), [rungs, lines, width]);
@@ -59,7 +59,7 @@ export function Ladder({ rungs, lines, pairs, lit, onLight, onMove, onOpen }: La
       <LadderKey top={geometry.keyTop} width={geometry.rowWidth - 4} />
     </div>
   );
-}
+});
 
 function Caption({ geometry, line, y, yRight }: { geometry: LadderGeometry; line: LawLine; y: number; yRight: number }) {
   if (line.weight === 'zone') {

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { memo, useState, type KeyboardEvent } from 'react';
 import type { Phase, ProcessStep, ProductDraft } from '#shared/contracts/product-draft.ts';
 import type { Finding } from '#shared/engine/types.ts';
 import { toCelsius, toFahrenheit } from '#shared/product/handling.ts';
@@ -21,8 +21,14 @@ export interface ProcessStepsProps {
   readonly onSettle: () => void;
 }
 
+/** Typing an amount leaves the steps alone. */
+function sameSteps(before: ProcessStepsProps, after: ProcessStepsProps): boolean {
+  const [a, b] = [before.draft.formula.phases, after.draft.formula.phases];
+  return a.length === b.length && a.every((phase, at) => phase.id === b[at]!.id && phase.name === b[at]!.name && phase.steps === b[at]!.steps) && before.findings === after.findings && before.isReadOnly === after.isReadOnly && before.unit === after.unit;
+}
+
 /** How each phase is made, step by step; a step that a material does not bear says so where it stands. */
-export function ProcessSteps(props: ProcessStepsProps) {
+export const ProcessSteps = memo(function ProcessSteps(props: ProcessStepsProps) {
   const { draft, findings } = props;
   const ofSteps = new Set(draft.formula.phases.flatMap((phase) => phase.steps.map((step) => step.id)));
   const isOfStep = (finding: Finding) => finding.arithmetic?.some((each) => each.from !== undefined && ofSteps.has(each.from)) ?? false;
@@ -35,7 +41,7 @@ export function ProcessSteps(props: ProcessStepsProps) {
       {general.map((finding) => <StepFinding key={`${finding.rule}${finding.subject}${finding.message}`} finding={finding} />)}
     </div>
   );
-}
+}, sameSteps);
 
 function PhaseSteps({ phase, findings, unit, isReadOnly, newId, onChange, onSettle }: ProcessStepsProps & { phase: Phase }) {
   return (
@@ -92,19 +98,19 @@ function StepFields({ step, place, unit, isReadOnly, isFirst, isLast, onWrite, o
   const [time, setTime] = useState<string | null>(null);
   const heatRead = heat === null ? null : readTemperature(heat, step.temperature?.unit ?? unit);
   const timeRead = time === null ? null : readTime(time);
+  const handleKey = (event: KeyboardEvent) => {
+    if (!event.altKey || (event.key !== 'ArrowUp' && event.key !== 'ArrowDown')) return;
+    event.preventDefault();
+    onMove(event.key === 'ArrowUp' ? -1 : 1);
+  };
   return (
     <div
       className="step"
       role="group"
       aria-label={`Step ${place}`}
-      onKeyDown={(event) => {
-        if (!event.altKey || (event.key !== 'ArrowUp' && event.key !== 'ArrowDown')) return;
-        event.preventDefault();
-        onMove(event.key === 'ArrowUp' ? -1 : 1);
-      }}
     >
       <span className="place" aria-hidden="true">{place}</span>
-      <AreaField label={`Step ${place}`} bare rows={1} readOnly={isReadOnly} maxLength={1000} placeholder="What is done" value={step.text} onChange={(event) => onWrite({ text: event.target.value }, `step:${step.id}`)} onBlur={onSettle} />
+      <AreaField label={`Step ${place}`} bare rows={1} readOnly={isReadOnly} maxLength={1000} placeholder="What is done" value={step.text} onChange={(event) => onWrite({ text: event.target.value }, `step:${step.id}`)} onBlur={onSettle} onKeyDown={handleKey} />
       <TextField
         label={`Step ${place}, temperature`}
         bare

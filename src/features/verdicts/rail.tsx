@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { memo, type ReactNode } from 'react';
 import type { Finding } from '#shared/engine/types.ts';
 import { sayWeight, VerdictMark, VerdictWord } from '#src/ui/verdict-mark.tsx';
 import { headOf, SourcingMark, whyOf } from './finding-text.tsx';
@@ -31,7 +31,7 @@ export interface VerdictRailProps {
 }
 
 /** The verdicts of the market at hand, beside the formula: what to do, why, citation. */
-export function VerdictRail({ items, release, lit, onLight, all }: VerdictRailProps) {
+export const VerdictRail = memo(function VerdictRail({ items, release, lit, onLight, all }: VerdictRailProps) {
   if (items.length === 0) {
     return (
       <p className="rail-none">
@@ -73,7 +73,7 @@ export function VerdictRail({ items, release, lit, onLight, all }: VerdictRailPr
       </p>
     </>
   );
-}
+});
 
 export function railCounts(items: readonly RailItem[]): Counts {
   return countFindings(items.map((item) => item.finding));

@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { memo, type ReactNode } from 'react';
 import type { House } from '#shared/contracts/house.contract.ts';
 import type { ProductDraft } from '#shared/contracts/product-draft.ts';
 import { MARKETS, type Category, type Market, type ProductFlag } from '#shared/law/types.ts';
@@ -24,8 +24,15 @@ export interface ParticularsProps {
 
 const MARKET_NAMES: Readonly<Record<Market, string>> = { EU: 'European Union', UK: 'Great Britain', US: 'United States', CA: 'Canada' };
 
+/** Typing an amount leaves everything here alone. */
+function sameParticulars(before: ParticularsProps, after: ParticularsProps): boolean {
+  const keys = (Object.keys(after.draft) as (keyof ProductDraft)[]).filter((key) => key !== 'formula' && key !== 'declaration' && key !== 'label');
+  const isSame = keys.every((key) => before.draft[key] === after.draft[key]);
+  return isSame && before.house === after.house && before.isReadOnly === after.isReadOnly && before.today === after.today && before.asked.join() === after.asked.join();
+}
+
 /** Everything about the product that is not its formula: what it is, where it is sold, and what its label must say. */
-export function Particulars(props: ParticularsProps) {
+export const Particulars = memo(function Particulars(props: ParticularsProps) {
   const { draft, house, categories, isReadOnly, onChange, onSettle } = props;
   const set = <K extends keyof ProductDraft>(key: K, value: ProductDraft[K], join?: string) => onChange((before) => ({ ...before, [key]: value }), join);
   const particular = <K extends keyof ProductDraft['particulars']>(key: K, value: ProductDraft['particulars'][K]) =>
@@ -104,7 +111,7 @@ export function Particulars(props: ParticularsProps) {
       </Group>
     </div>
   );
-}
+}, sameParticulars);
 
 function Group({ title, children }: { title: string; children: ReactNode }) {
   return (

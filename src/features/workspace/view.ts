@@ -77,6 +77,12 @@ function partsOf(sources: readonly EntrySource[], masses: readonly number[]): { 
   });
 }
 
+/** Worked out when first asked for: most figures are never looked at between two keystrokes. */
+function once<T>(make: () => T): () => T {
+  let made: { readonly value: T } | undefined;
+  return () => (made ??= { value: make() }).value;
+}
+
 /** Shapes one market's assessment for the screens. */
 export function presentView(assessment: Assessment, result: MarketAssessment): MarketView {
   const masses = assessment.lines.map((line) => toNumber(line.mass));
@@ -91,6 +97,8 @@ export function presentView(assessment: Assessment, result: MarketAssessment): M
   const doubtful = new Set(pairs.flat());
   const entries = result.declaration.entries.map((entry): EntryView => {
     const key = keys.get(entry)!;
+    const exact = once(() => texts(entry.share));
+    const sources = once(() => entry.sources.map(presentSource));
     return {
       key,
       name: entry.name,
@@ -99,9 +107,13 @@ export function presentView(assessment: Assessment, result: MarketAssessment): M
       min: toNumber(entry.share.min),
       typical: toNumber(entry.share.typical),
       max: toNumber(entry.share.max),
-      exact: texts(entry.share),
+      get exact() {
+        return exact();
+      },
       parts: partsOf(entry.sources, masses),
-      sources: entry.sources.map(presentSource),
+      get sources() {
+        return sources();
+      },
       isInside: entry.zone === 'allergen',
       isUnsure: entry.straddles || doubtful.has(key),
       isFree: entry.zone === 'free' || entry.zone === 'allergen',
@@ -150,6 +162,21 @@ function linesOf(result: MarketAssessment): MarketView['lines'] {
 
 /** The entries that a finding speaks of, as keys. */
 export function keysOfFinding(finding: Finding, entries: readonly EntryView[]): string[] {
-  const asked = new Set([finding.subject, ...(finding.members ?? [])].map(foldName));
-  return entries.filter((entry) => [entry.inci, entry.name, ...entry.members].some((name) => asked.has(foldName(name)))).map((entry) => entry.key);
+  const index = indexOf(entries);
+  return [...new Set([finding.subject, ...(finding.members ?? [])].flatMap((name) => index.get(foldName(name)) ?? []))];
+}
+
+const indices = new WeakMap<readonly EntryView[], ReadonlyMap<string, readonly string[]>>();
+
+/** Entries by every name they answer to, made once for a list. */
+function indexOf(entries: readonly EntryView[]): ReadonlyMap<string, readonly string[]> {
+  let index = indices.get(entries);
+  if (!index) {
+    const made = new Map<string, string[]>();
+    for (const entry of entries) {
+      for (const name of new Set([entry.inci, entry.name, ...entry.members].map(foldName))) made.set(name, [...(made.get(name) ?? []), entry.key]);
+    }
+    indices.set(entries, (index = made));
+  }
+  return index;
 }
