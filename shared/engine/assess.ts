@@ -14,7 +14,7 @@ import { judgeSum } from './formula-findings.ts';
 import { findHeadroom, type FindingsAt } from './headroom.ts';
 import { judgeAmbiguities, judgeCompositions, judgeNames, judgeOrder } from './list-findings.ts';
 import { LIST_LAW } from './list-law.ts';
-import { prepareMaterial } from './prepare-material.ts';
+import { prepareMaterial, type PreparedMaterial } from './prepare-material.ts';
 import type { Finding, ProductFacts, Severity } from './types.ts';
 import { totalMass, withShare } from './weigh-lines.ts';
 
@@ -109,11 +109,23 @@ function materialOf(document: FormulaDocument, line: number): DocumentMaterial |
   return document.materials.find((material) => material.id === id);
 }
 
+const spokenOf = new WeakMap<LawBook, WeakMap<PreparedMaterial, Map<Market, boolean>>>();
+
 /** Whether any row of the market's law, or any allergen group, speaks of something in the material. */
 function isSpokenOf(material: DocumentMaterial | undefined, { options }: Shared, market: Market): boolean {
   if (!material) return false;
   const { law, dictionary } = options;
-  const { parts, constituents } = prepareMaterial(material, dictionary);
+  const prepared = prepareMaterial(material, dictionary);
+  let ofLaw = spokenOf.get(law);
+  if (!ofLaw) spokenOf.set(law, (ofLaw = new WeakMap()));
+  let known = ofLaw.get(prepared);
+  if (!known) ofLaw.set(prepared, (known = new Map()));
+  let found = known.get(market);
+  if (found === undefined) known.set(market, (found = findSpokenOf(prepared, law, market)));
+  return found;
+}
+
+function findSpokenOf({ parts, constituents }: PreparedMaterial, law: LawBook, market: Market): boolean {
   return [...parts, ...constituents].some(({ inci, written, cas, purpose }) => {
     if (purpose === 'colourant' || purpose === 'preservative' || purpose === 'uv-filter' || /^CI \d/i.test(inci)) return true;
     const named = { name: inci, cas };

@@ -8,6 +8,7 @@ import type { Declaration, DeclarationEntry, UncertainPair, Zone } from './asses
 import type { Blend, BlendedSubstance } from './blend.ts';
 import { LIST_LAW, type ListLaw } from './list-law.ts';
 import { isColourant, printedName, type PrintedName } from './market-names.ts';
+import type { PreparedPart } from './prepare-material.ts';
 import { settleName } from './resolve-name.ts';
 import { sourcesOf } from './sources.ts';
 import type { Interval } from './types.ts';
@@ -80,7 +81,7 @@ function draftEntries({ blend, market, document, category, allergens }: DeclareI
     const verdict = groupOf.get(substance);
     const printed: PrintedName = verdict
       ? { name: verdict.name, why: `The name that ${verdict.citation} prescribes for the group.` }
-      : printedName(substance.first.usName === undefined ? { ...naming(substance), ...usNameOf(substance) } : naming(substance), market, joined);
+      : nameFor(substance, market, joined);
     if (printed.ambiguous) ambiguities.push({ inci: substance.name, names: printed.ambiguous });
     const draft: Draft = {
       name: printed.name,
@@ -91,15 +92,27 @@ function draftEntries({ blend, market, document, category, allergens }: DeclareI
       ...(verdict && { verdict }),
     };
     // The same printed name stands once: nano and plain forms in the US, several numbers under one US colour name.
-    const id = foldName(printed.name) || printed.name;
-    const before = byName.get(law.marksNano && substance.nano ? `${id} nano` : id);
-    if (!before) byName.set(law.marksNano && substance.nano ? `${id} nano` : id, draft);
+    const before = byName.get(printed.name);
+    if (!before) byName.set(printed.name, draft);
     else {
       before.substances.push(substance);
       before.isColourant &&= draft.isColourant;
     }
   }
   return [...byName.values()];
+}
+
+const names = new WeakMap<PreparedPart, Map<string, PrintedName>>();
+
+/** The printed name, remembered with the part that a material brings. */
+function nameFor(substance: BlendedSubstance, market: Market, joined: boolean): PrintedName {
+  const { usName } = usNameOf(substance);
+  let known = names.get(substance.first);
+  if (!known) names.set(substance.first, (known = new Map()));
+  const id = `${market}${joined ? '+' : ''}${usName ?? ''}`;
+  let found = known.get(id);
+  if (!found) known.set(id, (found = printedName({ ...naming(substance), ...(usName !== undefined && { usName }) }, market, joined)));
+  return found;
 }
 
 function naming(substance: BlendedSubstance): { inci: string; written: string; isNano: boolean; entry?: NonNullable<BlendedSubstance['first']['entry']>; usName?: string } {

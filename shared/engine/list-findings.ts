@@ -1,6 +1,6 @@
 import type { Dictionary } from '#shared/dictionary/types.ts';
 import type { Market } from '#shared/law/types.ts';
-import { isZero, toDecimal } from '#shared/kernel/rational.ts';
+import { isZero, toDecimal, type Rational } from '#shared/kernel/rational.ts';
 import type { Declaration, DeclarationEntry } from './assessment.ts';
 import type { Blend, BlendedSubstance } from './blend.ts';
 import type { Ambiguity } from './declare.ts';
@@ -9,7 +9,13 @@ import type { Finding, Interval } from './types.ts';
 
 /** An interval as decimal texts. */
 export function rangeText({ min, typical, max }: Interval): { min: string; typical: string; max: string } {
-  return { min: toDecimal(min), typical: toDecimal(typical), max: toDecimal(max) };
+  const text = toDecimal(typical);
+  // Most shares are fixed: one text serves all three.
+  return { min: isSame(min, typical) ? text : toDecimal(min), typical: text, max: isSame(max, typical) ? text : toDecimal(max) };
+}
+
+function isSame(a: Rational, b: Rational): boolean {
+  return a.n === b.n && a.d === b.d;
 }
 
 function sourcing(market: Market): Pick<Finding, 'sourcing'> {

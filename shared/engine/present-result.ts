@@ -35,12 +35,14 @@ function presentMarket(result: MarketAssessment, totalMass: string, withHeadroom
 }
 
 function presentEntry(entry: DeclarationEntry): MarketResult['declaration']['entries'][number] {
+  const share = rangeText(entry.share);
+  const { sources } = entry;
   return {
     name: entry.name,
     inci: entry.inci,
     zone: entry.zone,
-    share: rangeText(entry.share),
-    sources: entry.sources.map(presentSource),
+    share,
+    sources: sources.length === 1 && entry.zone !== 'allergen' ? [{ material: sources[0]!.materialId, share: share.typical }] : sources.map(presentSource),
     ...(entry.certainty && { certainty: entry.certainty }),
     ...(entry.members && { members: [...entry.members] }),
   };

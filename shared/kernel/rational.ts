@@ -15,6 +15,8 @@ export const ZERO: Rational = { n: 0n, d: 1n };
 export const ONE: Rational = { n: 1n, d: 1n };
 export const HUNDRED: Rational = { n: 100n, d: 1n };
 
+/** The scale of printed figures, worked out once. */
+const TEN_TO_12 = 1_000_000_000_000n;
 const DECIMAL = /^([+-]?)(\d+)(?:\.(\d+))?$/;
 
 /** The rational `n / d`. @throws RangeError when `d` is zero. */
@@ -87,15 +89,18 @@ export function reduce(a: Rational): Rational {
  * to `places`; never trailing zeros, never an exponent, never `-0`.
  */
 export function toDecimal(a: Rational, places = 12): string {
-  const scale = 10n ** BigInt(places);
+  const scale = places === 12 ? TEN_TO_12 : 10n ** BigInt(places);
   const negative = a.n < 0n;
   const scaled = (negative ? -a.n : a.n) * scale;
   let quotient = scaled / a.d;
-  const twice = (scaled % a.d) * 2n;
+  const twice = (scaled - quotient * a.d) * 2n;
   if (twice > a.d || (twice === a.d && quotient % 2n === 1n)) quotient += 1n;
   if (quotient === 0n) return '0';
   const digits = quotient.toString().padStart(places + 1, '0');
-  const whole = digits.slice(0, digits.length - places);
-  const fraction = places === 0 ? '' : digits.slice(-places).replace(/0+$/, '');
+  const point = digits.length - places;
+  let end = digits.length;
+  while (end > point && digits[end - 1] === '0') end -= 1;
+  const whole = digits.slice(0, point);
+  const fraction = digits.slice(point, end);
   return (negative ? '-' : '') + (fraction ? `${whole}.${fraction}` : whole);
 }

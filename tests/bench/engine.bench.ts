@@ -1,0 +1,75 @@
+import { spawnSync } from 'node:child_process';
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
+import { parseEntries } from '#shared/dictionary/parse-entries.ts';
+import { assess } from '#shared/engine/assess.ts';
+import { presentResult } from '#shared/engine/present-result.ts';
+import { dictionary, formula, law, line, material, part, TODAY } from '#tests/support/engine.ts';
+import { median, ms, time, times, type Row } from './report.ts';
+
+const ROOT = join(import.meta.dirname, '../..');
+const MATERIALS = 40;
+const SUBSTANCES = 8;
+
+/** 40 materials of 8 substances each, drawn from the dictionary; water and glycerin come back in many of them. */
+export function largeFormula(): FormulaDocument {
+  const names = parseEntries(readFileSync(join(ROOT, 'data/dictionary/thickeners-polymers.csv'), 'utf8')).map(({ inci }) => inci);
+  const shares = ['52.5', '20', '12.25', '7', '4.5', '2.5', '1', '0.25'];
+  const materials = Array.from({ length: MATERIALS }, (_, index) => {
+    const own = Array.from({ length: SUBSTANCES - 2 }, (_unused, at) => names[(index * 5 + at * 7) % names.length]!);
+    return material(`m${index}`, ['Aqua', 'Glycerin', ...own].map((inci, at) => part(inci, shares[at]!)));
+  });
+  return formula(materials, materials.map(({ id }, index) => line(id, `${(index * 37) % 90 + 1}.${index % 10} g`)));
+}
+
+/** The same list as a spreadsheet's user would write it: floats, one map, one sort. */
+function floatLoop(rows: readonly { readonly grams: number; readonly parts: readonly (readonly [string, number])[] }[]): [string, number][] {
+  let total = 0;
+  for (const row of rows) total += row.grams;
+  const shares = new Map<string, number>();
+  for (const { grams, parts } of rows) {
+    for (const [name, percent] of parts) shares.set(name, (shares.get(name) ?? 0) + (grams * percent) / total);
+  }
+  return [...shares].sort((a, b) => b[1] - a[1]);
+}
+
+/** The engine's promises: one check against a float loop over the same figures, and JSON Lines by the thousand. */
+export async function runEngineBench(): Promise<Row[]> {
+  const document = largeFormula();
+  const rows = document.formula.lines.map(({ amount }, index) => ({
+    grams: parseFloat(amount),
+    parts: document.materials[index]!.composition.map(({ inci, percent }) => [inci, parseFloat(percent!)] as const),
+  }));
+  const options = { law, dictionary, today: TODAY };
+  const loop = median(await time(() => floatLoop(rows), { warm: 500, runs: 500 }));
+  const check = median(await time(() => presentResult(assess(document, options)), { warm: 300, runs: 200 }));
+  const live = median(await time(() => assess(document, options), { warm: 300, runs: 200 }));
+  const perSecond = throughput();
+  return [
+    { name: 'check, 40 materials of 8 substances', measured: ms(check), ratio: times(check / loop), promise: `under 1.5 ms and at most 8 × a float loop (${ms(loop)})`, isKept: check < 1.5 && check <= 8 * loop },
+    { name: 'assess for the screen, same formula', measured: ms(live), ratio: times(live / loop), promise: 'under 16 ms', isKept: live < 16 },
+    { name: 'check of JSON Lines', measured: `${Math.round(perSecond)} formulas/s`, promise: 'at least 1,000 formulas/s', isKept: perSecond >= 1000 },
+  ];
+}
+
+/** Formulas a second, from the second half of a run: start-up is measured elsewhere. */
+function throughput(): number {
+  const folder = mkdtempSync(join(tmpdir(), 'colophon-bench-'));
+  try {
+    const one = JSON.stringify(JSON.parse(readFileSync(join(ROOT, 'tests/reference/fixtures/body-wash.json'), 'utf8')));
+    const run = (count: number): number => {
+      const file = join(folder, `${count}.jsonl`);
+      writeFileSync(file, `${one}\n`.repeat(count));
+      const start = performance.now();
+      spawnSync(process.execPath, [join(ROOT, 'server/cli/run.mjs'), 'check', file, '--market', 'EU'], { maxBuffer: 1024 * 1024 * 1024 });
+      return performance.now() - start;
+    };
+    run(10);
+    const [small, large] = [run(200), run(2200)];
+    return 2000 / ((large - small) / 1000);
+  } finally {
+    rmSync(folder, { recursive: true, force: true });
+  }
+}
