@@ -10,6 +10,7 @@ import { judgeParticulars } from './particulars/judge-particulars.ts';
 import { judgePositiveLists } from './positive-lists/use-not-listed.ts';
 import { judgeFormaldehyde, theoreticalFormaldehyde } from './preservatives/formaldehyde.ts';
 import { judgeIsothiazolinones } from './preservatives/isothiazolinones.ts';
+import { judgeMayContain } from './shades/may-contain.ts';
 import { gatherRows } from './substances/gather.ts';
 import { judgeRow } from './substances/judge-row.ts';
 import { judgeRows, presentSubstances } from './substances/judge-substances.ts';
@@ -48,6 +49,7 @@ export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: Formul
     ...judgePositiveLists(context).filter((one) => !prohibited.has(one.subject)),
     ...judgeIsothiazolinones(context),
     ...judgeUsColours(context),
+    ...judgeMayContain(context),
     ...judgeWordings(due, context),
     ...judgeParticulars(context),
     ...judgeUpcoming(rows, outcomes, context),
