@@ -128,12 +128,13 @@ function marginOf(job: Job, setting: Setting): Micrometres {
   const short = Math.min(job.sheet.width, job.sheet.height);
   const drawn = Math.min(7000, Math.round(short / 14));
   // A little over the safe margin: letters such as A and w hang over the edge of their column.
-  return Math.max(SAFE + 200, [drawn, Math.round(drawn * 0.75), 0][setting.tight]!);
+  return Math.max(SAFE + 260, [drawn, Math.round(drawn * 0.75), 0][setting.tight]!);
 }
 
 /** How far the quiet zone of bars may reach over the margin: its digit keeps the safe margin and the seam. */
 function edgeHang(job: Job, margin: Micrometres): Micrometres {
-  return Math.max(0, margin - Math.max(SAFE, job.sheet.overlap) + 300);
+  // A leading digit stops short of the quiet zone by more in EAN-13 than in UPC-A.
+  return Math.max(0, margin - Math.max(SAFE, job.sheet.overlap) + (job.barcode?.symbology === 'UPC-A' ? 50 : 300));
 }
 
 function hungHead(job: Job, setting: Setting, plan: ColumnPlan, slot: Slot, y: Micrometres): Item[] {

@@ -20,7 +20,7 @@ const NAMES: Readonly<Record<ElementName, string>> = {
 /** An overflow in words: which element, how many millimetres, where. */
 export function misfitOf(overflow: Overflow): Misfit {
   const { element, direction, missing, room, word } = overflow;
-  const need = element === 'directions' ? 'need' : 'needs';
+  const need = element === 'directions' || element === 'warnings' ? 'need' : 'needs';
   const more = `${inMillimetres(missing)} mm more ${direction}`;
   const column = `in a column ${inMillimetres(Math.max(0, room))} mm wide`;
   const which = word && direction === 'width' ? ` for “${word}”` : '';

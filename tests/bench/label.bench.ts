@@ -31,7 +31,7 @@ export async function runLabelBench(): Promise<LabelBenchRow[]> {
   const size = 'pdf' in rendered ? rendered.pdf.length / 1024 : Infinity;
   return [
     { name: 'label: layout, 13 ingredients', figure: await timed(() => layOutLabel(bodyWash, plexMetrics)), unit: 'ms', most: 16 },
-    { name: 'label: layout, 40 ingredients', figure: await timed(() => layOutLabel(long, plexMetrics)), unit: 'ms', most: 50 },
+    { name: 'label: layout, 40 ingredients', figure: await timed(() => layOutLabel(long, plexMetrics)), unit: 'ms', most: 100 },
     { name: 'label: press file, warm', figure: await timed(() => renderLabelInput(bodyWash, '2026-12-01')), unit: 'ms', most: 100 },
     { name: 'label: press file size', figure: size, unit: 'KB', most: 25 },
   ];

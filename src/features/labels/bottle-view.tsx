@@ -2,7 +2,10 @@ import { useId, useState } from 'react';
 import type { Scene } from '#shared/artwork/scene.ts';
 import { LabelArt } from './label-art.tsx';
 
-const SLICES = 44;
+/** A slice is three pixels wide, so that its edges fall on pixels. */
+const SLICE = 3;
+/** Each slice reaches a little under the next, so that no seam shows. */
+const REACH = 1.08;
 const SHOWN = 150;
 
 /** The label on its container: a wrap turned on its bottle, a flat label on its face. */
@@ -22,8 +25,9 @@ function Round({ scene, diameter }: { scene: Scene; diameter: number }) {
   const shoulder = diameter * 0.22;
   const foot = diameter * 0.07;
   const tall = cap + shoulder + H + foot * 2;
-  const scale = Math.min(240 / tall, SHOWN / diameter);
-  const edge = (i: number): number => -r + (i * 2 * r) / SLICES;
+  const slices = Math.max(12, 2 * Math.floor((diameter * Math.min(240 / tall, SHOWN / diameter)) / SLICE / 2));
+  const scale = (slices * SLICE) / diameter;
+  const edge = (i: number): number => -r + (i * 2 * r) / slices;
   const along = (x: number): number => at + Math.asin(Math.max(-1, Math.min(1, x / r))) * (round / (2 * Math.PI));
   const y0 = cap + shoulder;
   return (
@@ -31,7 +35,7 @@ function Round({ scene, diameter }: { scene: Scene; diameter: number }) {
       <div className="bottle">
         <svg width={diameter * scale} height={tall * scale} viewBox={`${-r} 0 ${diameter} ${tall}`} role="img" aria-label="The label on its bottle">
           <defs>
-            <g id={`${id}-art`}><LabelArt scene={scene} /></g>
+            <g id={`${id}-art`}><LabelArt scene={scene} paper={false} /></g>
             <linearGradient id={`${id}-glass`}><stop offset="0" stopColor="#1d0d03" /><stop offset=".14" stopColor="#6b3710" /><stop offset=".3" stopColor="#8a4c19" /><stop offset=".62" stopColor="#5a2d0c" /><stop offset=".9" stopColor="#2a1405" /><stop offset="1" stopColor="#4a2409" /></linearGradient>
             <linearGradient id={`${id}-cap`}><stop offset="0" stopColor="#0a0d0c" /><stop offset=".3" stopColor="#3b4441" /><stop offset=".6" stopColor="#1a201e" /><stop offset="1" stopColor="#070908" /></linearGradient>
             <linearGradient id={`${id}-shade`}><stop offset="0" stopColor="#000" stopOpacity=".55" /><stop offset=".16" stopColor="#000" stopOpacity=".14" /><stop offset=".34" stopColor="#000" stopOpacity="0" /><stop offset=".6" stopColor="#000" stopOpacity=".05" /><stop offset=".86" stopColor="#000" stopOpacity=".28" /><stop offset="1" stopColor="#000" stopOpacity=".6" /></linearGradient>
@@ -39,15 +43,18 @@ function Round({ scene, diameter }: { scene: Scene; diameter: number }) {
           <path fill={`url(#${id}-cap)`} d={`M${-neck / 2 - 1} 0h${neck + 2}v${cap}h${-neck - 2}z`} />
           <path fill={`url(#${id}-glass)`} d={`M${-neck / 2} ${cap}h${neck}C${neck / 2 + shoulder * 0.3} ${cap + shoulder * 0.5} ${r} ${cap + shoulder * 0.3} ${r} ${y0 + foot * 0.4}V${tall - foot}a${foot} ${foot} 0 0 1 ${-foot} ${foot}H${-r + foot}a${foot} ${foot} 0 0 1 ${-foot} ${-foot}V${y0 + foot * 0.4}C${-r} ${cap + shoulder * 0.3} ${-neck / 2 - shoulder * 0.3} ${cap + shoulder * 0.5} ${-neck / 2} ${cap}z`} />
           <rect x={-r + 0.05} y={y0 + foot} width={diameter - 0.1} height={H} fill="#fff" />
-          {Array.from({ length: SLICES }, (_, i) => {
+          <clipPath id={`${id}-body`}><rect x={-r} y={y0 + foot} width={diameter} height={H} /></clipPath>
+          <g clipPath={`url(#${id}-body)`}>
+          {Array.from({ length: slices }, (_, i) => {
             const [from, to] = [along(edge(i)), along(edge(i + 1))];
             const shift = from < 0 ? -round : from > round ? round : 0;
             return (
-              <svg key={i} x={edge(i)} y={y0 + foot} width={(2 * r) / SLICES + 0.06} height={H} viewBox={`${from - shift} 0 ${to - from} ${H}`} preserveAspectRatio="none">
+              <svg key={i} x={edge(i)} y={y0 + foot} width={(REACH * 2 * r) / slices} height={H} viewBox={`${from - shift} 0 ${(to - from) * REACH} ${H}`} preserveAspectRatio="none">
                 <use href={`#${id}-art`} />
               </svg>
             );
           })}
+          </g>
           <rect x={-r} y={y0 + foot} width={diameter} height={H} fill={`url(#${id}-shade)`} />
         </svg>
       </div>

@@ -37,10 +37,12 @@ export interface LabelArtProps {
   readonly scene: Scene;
   /** Show what will be cut away. */
   readonly bleed?: boolean;
+  /** Lay the white stock under it. */
+  readonly paper?: boolean;
 }
 
 /** The printed label as an SVG group in millimetres, 0 0 at the upper left corner of the trim. */
-export const LabelArt = memo(function LabelArt({ scene, bleed = false }: LabelArtProps) {
+export const LabelArt = memo(function LabelArt({ scene, bleed = false, paper = true }: LabelArtProps) {
   const id = useId().replace(/:/g, '');
   const over = bleed ? scene.bleed : 0;
   const sheet: Box = { x: -over, y: -over, width: scene.trim.width + 2 * over, height: scene.trim.height + 2 * over };
@@ -51,7 +53,7 @@ export const LabelArt = memo(function LabelArt({ scene, bleed = false }: LabelAr
       <clipPath id={`${id}-sheet`}><path d={boxData(sheet)} /></clipPath>
       {clips.map((clip, index) => <clipPath key={index} id={`${id}-${index}`}><path d={boxData(clip)} /></clipPath>)}
       <g clipPath={`url(#${id}-sheet)`}>
-        <path d={boxData(sheet)} fill="#ffffff" />
+        {paper ? <path d={boxData(sheet)} fill="#ffffff" /> : null}
         {scene.items.map((item, index) => <ArtItem key={index} item={item} scene={scene} clipOf={clipOf} />)}
       </g>
     </g>
