@@ -41,17 +41,8 @@ export async function loadDictionary(em: Pick<EntityManager, 'execute'>): Promis
  * $1 the query's words, $2 a LIKE pattern of its folded form, $3 and $4 lengths for short words.
  */
 const CANDIDATES = `
-  with near as (
-    (select * from dictionary_term where folded like $2::text order by length(folded), folded limit 40)
-    union all
-    (select * from dictionary_term where words % $1::text and kind <> 'cas' order by similarity(words, $1::text) desc limit 50)
-    union all
-    (select * from dictionary_term where $1::text <% words and kind <> 'cas' order by word_similarity($1::text, words) desc, length(words) limit 30)
-    union all
-    (select * from dictionary_term where length(folded) <= 8 and length(folded) between $3::int and $4::int and kind <> 'cas')
-  )
   select distinct t.entry_key::text as "entryKey", t.term, t.words, t.folded, t.kind, e.origin <> 'inventory' as "isCurated"
-  from near t join dictionary_entry e on e.key = t.entry_key
+  from dictionary_near($1::text, $2::text, $3::int, $4::int) t join dictionary_entry e on e.key = t.entry_key
   where e.house_id is null`;
 
 /**

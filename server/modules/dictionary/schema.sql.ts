@@ -32,7 +32,22 @@ export const DICTIONARY_TABLES: readonly string[] = [
   // Short names share too few letter groups with their misspellings: those are found by length.
   'create index dictionary_term_short on dictionary_term (length(folded)) where length(folded) <= 8',
   'create index dictionary_term_words on dictionary_term using gin (words gin_trgm_ops)',
+  // The planner thinks comparing letter groups costs nothing and would read the whole table;
+  // here it may not, so each way in goes by its index.
+  `create function dictionary_near(asked text, pattern text, shortest int, longest int) returns setof dictionary_term
+   language plpgsql stable set enable_seqscan = off set pg_trgm.similarity_threshold = 0.35 as $near$
+   begin
+     return query execute $sql$
+       (select * from dictionary_term where folded like $2 order by length(folded), folded limit 40)
+       union all
+       (select * from dictionary_term where words % $1 and kind <> 'cas' order by similarity(words, $1) desc limit 50)
+       union all
+       (select * from dictionary_term where $1 <% words and kind <> 'cas' order by word_similarity($1, words) desc, length(words) limit 30)
+       union all
+       (select * from dictionary_term where length(folded) <= 8 and length(folded) between $3 and $4 and kind <> 'cas')
+     $sql$ using asked, pattern, shortest, longest;
+   end $near$`,
 ];
 
 /** Undoes {@link DICTIONARY_TABLES}; the extension stays. */
-export const DROP_DICTIONARY_TABLES: readonly string[] = ['drop table dictionary_term', 'drop table dictionary_entry'];
+export const DROP_DICTIONARY_TABLES: readonly string[] = ['drop function dictionary_near(text, text, int, int)', 'drop table dictionary_term', 'drop table dictionary_entry'];
