@@ -14,7 +14,7 @@ export async function renderReportPdf(model: ReportModel, contentHash: string, d
     title: `${model.name}: report`,
     kind: 'report',
     house: model.house,
-    foot: `Data release ${model.dataRelease}`,
+    foot: model.dataRelease,
     contentHash,
     day,
   });
@@ -46,7 +46,7 @@ export async function renderReportPdf(model: ReportModel, contentHash: string, d
     { head: 'Formula', note: model.formula.basis, pieces: formulaTable(paper, model.formula), repeats: formulaHead(paper, model.formula) },
     { head: 'Particulars', note: model.markets.join(', '), pieces: particularsTable(paper, model.particulars) },
     { head: 'Not checked', pieces: model.notChecked.map((text) => paragraph(paper, text, { after: 1.2 })) },
-    { head: 'Law read', pieces: [paragraph(paper, `Data release ${model.dataRelease}, read ${model.lawReadOn}.`, { after: 0 })] },
+    { head: 'Law read', pieces: [paragraph(paper, `Data: ${model.dataRelease}. The law was read on ${model.lawReadOn}.`, { after: 0 })] },
     { head: 'Cautions', pieces: model.cautions.map((text) => paragraph(paper, text)) },
     { head: 'Sign-off', note: 'Whoever prepared the formula does not release it', pieces: [signOff()] },
   ]);

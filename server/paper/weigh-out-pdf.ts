@@ -49,7 +49,7 @@ export async function renderWeighOutPdf(model: WeighOutModel, contentHash: strin
     title: `${model.name}: weigh-out sheet`,
     kind: 'weigh-out sheet',
     house: model.house,
-    foot: `Data release ${model.dataRelease}`,
+    foot: model.dataRelease,
     contentHash,
     day,
   });

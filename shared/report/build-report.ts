@@ -34,6 +34,7 @@ export interface ReportInput {
   readonly house: string;
   readonly document: FormulaDocument;
   readonly results: readonly ReportedResult[];
+  /** Of the law tables and the dictionary, as a result document names them. */
   readonly dataRelease: string;
   readonly lawReadOn: string;
   /** False for outsiders: shares become bands, figures and the ladder are left out. */
@@ -67,7 +68,7 @@ export function buildReport(input: ReportInput): ReportModel {
     subtitle: subtitleOf(document, results),
     markets: results.map((result) => result.market),
     counts: { stop: verdicts.stop.length, decide: verdicts.decide.length, note: verdicts.note.length },
-    finding: findingSentence(verdicts, input.dataRelease),
+    finding: findingSentence(verdicts),
     declarations: results.map((result) => ({
       label: result.market === 'UK' ? 'UK (Great Britain)' : MARKET_NAMES[result.market],
       heading: result.declaration.heading,
@@ -111,10 +112,10 @@ function subtitleOf(document: FormulaDocument, results: readonly ReportedResult[
   return `${listInWords(results.map((result) => result.market))}, ${dates}. ${parts.join(', ')}.`;
 }
 
-function findingSentence(verdicts: ReportModel['verdicts'], release: string): string {
+function findingSentence(verdicts: ReportModel['verdicts']): string {
   const waiting = verdicts.decide.length;
   const broken = verdicts.stop.length;
-  const first = broken === 0 ? `No rule in data release ${release} is broken.` : `${countInWords(broken)} ${broken === 1 ? 'point stops' : 'points stop'} sale.`;
+  const first = broken === 0 ? 'No rule in the law data named below is broken.' : `${countInWords(broken)} ${broken === 1 ? 'point stops' : 'points stop'} sale.`;
   if (waiting === 0) return first;
   return `${first} ${countInWords(waiting)} ${waiting === 1 ? 'point waits' : 'points wait'} for a person before the label is printed.`;
 }

@@ -18,26 +18,26 @@ const RULES: Readonly<Record<string, Partial<Record<Market, string>>>> = {
 export function particularRows(document: FormulaDocument): ReportModel['particulars'] {
   const { product } = document;
   const { particulars } = product;
-  const ruleOf = (key: string): string => {
-    const rules = new Set(product.markets.map((market) => RULES[key]?.[market]).filter((rule) => rule !== undefined));
+  const ruleOf = (key: string, markets: readonly Market[]): string => {
+    const rules = new Set(markets.map((market) => RULES[key]?.[market]).filter((rule) => rule !== undefined));
     return [...rules].join(', ');
   };
   const rows: { name: string; value: string; rule: string }[] = [];
-  const put = (name: string, value: string | undefined, key: string): void => {
-    const rule = ruleOf(key);
+  const put = (name: string, value: string | undefined, key: string, markets = product.markets): void => {
+    const rule = ruleOf(key, markets);
     if (value || rule) rows.push({ name, value: value || 'not given', rule });
   };
   for (const market of product.markets) {
     const party = particulars?.responsiblePerson[market];
-    put(`Responsible person, ${market}`, party ? `${party.name}, ${party.address}` : undefined, 'responsiblePerson');
+    put(`Responsible person, ${market}`, party ? `${party.name}, ${party.address}` : undefined, 'responsiblePerson', [market]);
   }
   put('Net content', product.netContent && `${product.netContent.value}\u00a0${product.netContent.unit}`, 'netContent');
   put('Durability', durabilityOf(product.durability), 'durability');
   put('Precautions', particulars?.warnings.map((warning) => warning.text).join(' ') || undefined, 'warnings');
   put('Batch', particulars?.batchCode, 'batchCode');
   put('Function', particulars?.function, 'function');
-  put('Contact, US', particulars?.usContact, 'usContact');
-  put('Contact, Canada', particulars?.canadaContact, 'canadaContact');
+  if (product.markets.includes('US')) put('Contact, US', particulars?.usContact, 'usContact');
+  if (product.markets.includes('CA')) put('Contact, Canada', particulars?.canadaContact, 'canadaContact');
   put('Country of origin', particulars?.countryOfOrigin, 'countryOfOrigin');
   put('Directions', particulars?.directions, 'directions');
   return rows;

@@ -70,8 +70,8 @@ function stepsOf({ product }: Dossier): WeighOutInput['steps'] {
     // Two phases may bear one name; their steps then stand under it together.
     (steps[phase.name] ??= []).push(
       ...phase.steps.map(({ text, temperature, time }) => ({
-        text: time ? `${text} (${time.value} ${time.unit})` : text,
-        temperature: temperature ? [temperature.from, temperature.to].filter(Boolean).join(' to ') : '',
+        text: time ? `${text} Hold ${time.value}\u00a0${time.unit}.` : text,
+        temperature: temperature ? askedOf(temperature) : '',
         unit: temperature?.unit ?? null,
       })),
     );
@@ -87,4 +87,10 @@ function cautionOf({ heatLimitC, phFrom, phTo, hydrateHours, note }: Dossier['ma
     note ?? '',
   ];
   return parts.filter(Boolean).join('; ');
+}
+
+/** `20–25 °C`, `below 40 °C`, `from 70 °C`; empty where neither end is given. */
+function askedOf({ from, to, unit }: { readonly from?: string | undefined; readonly to?: string | undefined; readonly unit: 'C' | 'F' }): string {
+  const figures = from && to ? `${from}–${to}` : to ? `below ${to}` : from ? `from ${from}` : '';
+  return figures && `${figures}\u00a0°${unit}`;
 }

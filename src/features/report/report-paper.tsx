@@ -44,7 +44,7 @@ export function ReportPaper({ model }: { model: ReportModel }) {
       <Part head="Formula" note={model.formula.basis}><FormulaTable formula={model.formula} /></Part>
       <Part head="Particulars" note={model.markets.join(', ')}><ParticularsTable rows={model.particulars} /></Part>
       <Part head="Not checked">{model.notChecked.map((text) => <p key={text}>{text}</p>)}</Part>
-      <Part head="Law read"><p>Data release {model.dataRelease}, read {model.lawReadOn}.</p></Part>
+      <Part head="Law read"><p>Data: {model.dataRelease}. The law was read on {model.lawReadOn}.</p></Part>
       <Part head="Cautions">{model.cautions.map((text) => <p key={text}>{text}</p>)}</Part>
     </article>
   );
