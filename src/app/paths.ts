@@ -2,8 +2,8 @@
 export const paths = {
   today: '/',
   signIn: '/sign-in',
-  /** The server's own: begins the sign-in through the house's identity service and returns to `to`. */
-  signInStart: (to: string) => `/auth/sign-in?to=${encodeURIComponent(to)}`,
+  /** The server's own: begins the sign-in through the house's identity service and returns to `next`. */
+  signInStart: (next: string) => `/auth/sign-in?next=${encodeURIComponent(next)}`,
   /** A blank page that says one may go back, for signing in again beside unsaved work. */
   signedIn: '/signed-in',
   products: '/products',
@@ -17,7 +17,7 @@ export const paths = {
   newMaterial: '/materials/new',
   material: (id: string) => `/materials/${id}`,
   dictionary: '/dictionary',
-  entry: (id: string) => `/dictionary/${encodeURIComponent(id)}`,
+  entry: (inci: string) => `/dictionary/${encodeURIComponent(inci)}`,
   house: '/house',
 } as const;
 

@@ -47,7 +47,7 @@ export function routesOf(client: QueryClient): RouteObject[] {
               ],
             },
             { path: 'dictionary', lazy: page(client, () => import('#src/routes/dictionary.tsx')) },
-            { path: 'dictionary/:id', lazy: page(client, () => import('#src/routes/dictionary-entry.tsx')) },
+            { path: 'dictionary/:inci', lazy: page(client, () => import('#src/routes/dictionary-entry.tsx')) },
             { path: 'house', lazy: page(client, () => import('#src/routes/house.tsx')) },
             { path: '*', Component: NotFoundScreen },
           ],

@@ -12,6 +12,8 @@ export interface ContractFormOptions<Fields extends FieldValues, Body extends z.
   readonly defaultValues: Fields;
   /** What is sent, made from what the fields hold. Without it they are the same. */
   readonly toBody?: (fields: Fields) => unknown;
+  /** Faults that the schema cannot see: how the fields stand to each other. */
+  readonly findFaults?: (body: z.output<Body>) => readonly { pointer: string; message: string }[];
   /** Which field shows a fault found at this path of the body. Without it, the same path. */
   readonly toFieldPath?: (path: Path, fields: Fields) => string;
 }
@@ -33,15 +35,17 @@ export function pointerPath(pointer: string): string[] {
 export function useContractForm<Fields extends FieldValues, Body extends z.ZodType>(
   options: ContractFormOptions<Fields, Body>,
 ): ContractForm<Fields, Body> {
-  const { schema, toBody, toFieldPath } = options;
+  const { schema, toBody, toFieldPath, findFaults } = options;
   const place = useCallback((path: Path, fields: Fields) => (toFieldPath ? toFieldPath(path, fields) : join(path)), [toFieldPath]);
   const form = useForm<Fields>({
     defaultValues: options.defaultValues as DefaultValues<Fields>,
     mode: 'onTouched',
     resolver: (fields) => {
       const read = schema.safeParse(toBody ? toBody(fields) : fields);
-      if (read.success) return { values: fields, errors: {} };
-      return { values: {}, errors: nest(read.error.issues.map((issue) => ({ at: place(issue.path, fields), message: issue.message }))) as FieldErrors<Fields> };
+      const faults = read.success
+        ? (findFaults?.(read.data) ?? []).map((fault) => ({ at: place(pointerPath(fault.pointer), fields), message: fault.message }))
+        : read.error.issues.map((issue) => ({ at: place(issue.path, fields), message: issue.message }));
+      return faults.length === 0 ? { values: fields, errors: {} } : { values: {}, errors: nest(faults) as FieldErrors<Fields> };
     },
   });
 

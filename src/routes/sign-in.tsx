@@ -3,5 +3,5 @@ import { SignInSheet } from '#src/features/session/sign-in-sheet.tsx';
 
 export function Component() {
   const [search] = useSearchParams();
-  return <SignInSheet to={search.get('to') ?? '/'} problem={search.get('problem')} />;
+  return <SignInSheet to={search.get('to') ?? '/'} />;
 }

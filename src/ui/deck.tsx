@@ -1,6 +1,6 @@
 import { useEffect } from 'react';
 import type { ReactNode } from 'react';
-import { NavLink } from 'react-router-dom';
+import { Link, NavLink } from 'react-router-dom';
 
 export interface DeckProps {
   readonly title: string;
@@ -48,17 +48,20 @@ export interface TabLink {
   readonly mark?: ReactNode;
   /** Only this very address, not what lies below it. */
   readonly end?: boolean;
+  /** Said by the caller where the address alone does not tell: tabs that differ in their search. */
+  readonly isCurrent?: boolean;
 }
 /** Words on the sheet's own edge, each its own address. */
 export function TabLinks({ tabs, label }: { tabs: readonly TabLink[]; label: string }) {
   return (
     <nav className="tabs" aria-label={label}>
-      {tabs.map((tab) => (
-        <NavLink key={tab.to} to={tab.to} end={tab.end} preventScrollReset>
-          {tab.word}
-          {tab.mark}
-        </NavLink>
-      ))}
+      {tabs.map((tab) =>
+        tab.isCurrent === undefined ? (
+          <NavLink key={tab.to} to={tab.to} end={tab.end} preventScrollReset>{tab.word}{tab.mark}</NavLink>
+        ) : (
+          <Link key={tab.to} to={tab.to} aria-current={tab.isCurrent ? 'page' : undefined} preventScrollReset>{tab.word}{tab.mark}</Link>
+        ),
+      )}
     </nav>
   );
 }

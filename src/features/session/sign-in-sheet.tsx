@@ -1,16 +1,9 @@
 import { useEffect } from 'react';
 import { paths } from '#src/app/paths.ts';
-import { Banner } from '#src/ui/banner.tsx';
 import './sign-in.css';
 
-const PROBLEMS: Readonly<Record<string, string>> = {
-  refused: 'The sign-in was not finished. Try once more.',
-  'no-house': 'You are known, but no house has you as a member yet. Ask an owner to add you.',
-  expired: 'The sign-in took too long and was set aside. Begin again.',
-};
-
 /** One button: the house's identity service knows who one is. */
-export function SignInSheet({ to, problem }: { to: string; problem: string | null }) {
+export function SignInSheet({ to }: { to: string }) {
   // Only addresses of this app: a link from elsewhere cannot send anyone away after sign-in.
   const back = /^\/(?![/\\])/.test(to) ? to : paths.today;
   useEffect(() => {
@@ -27,7 +20,6 @@ export function SignInSheet({ to, problem }: { to: string; problem: string | nul
         </svg>
         <h1>Colophon</h1>
         <p>From a formula to a lawful, print-ready label, and the evidence behind it.</p>
-        {problem ? <Banner weight="decide" title="Not signed in.">{PROBLEMS[problem] ?? PROBLEMS.refused}</Banner> : null}
         <a className="btn act" href={paths.signInStart(back)}>Sign in through your house</a>
         <hr />
         <p className="small">Your house’s identity service asks who you are; Colophon never sees a password.</p>
