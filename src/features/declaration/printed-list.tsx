@@ -91,7 +91,7 @@ export const PrintedList = memo(function PrintedList({ heading, entries, totalGr
           }}
           triggerRef={{
             get current() {
-              anchor.current = box.current?.querySelector(`[data-word="${CSS.escape(opened.key)}"]`) ?? box.current;
+              anchor.current = [...(box.current?.querySelectorAll<HTMLElement>('[data-word]') ?? [])].find((each) => each.dataset.word === opened.key) ?? box.current;
               return anchor.current;
             },
           }}

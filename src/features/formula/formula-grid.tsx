@@ -9,7 +9,7 @@ import { fixMakeUp, keepGrams, makeUpWith, moveLine, removeLine, setGrams, setPe
 import { PastedSlip, SuspectSlip, type SuspectWords } from './slip-note.tsx';
 import { TotalRow } from './total-row.tsx';
 import { useLineDrag, type Landing } from './use-line-drag.ts';
-import { stepFrom } from './walk.ts';
+import { findRow, stepFrom } from './walk.ts';
 import { contradictsPasted, weighFormula } from './weigh.ts';
 import './formula.css';
 
@@ -65,7 +65,7 @@ export function FormulaGrid(props: FormulaGridProps) {
       onChange(stepLine(lineId, by));
       announce(by < 0 ? 'Moved up.' : 'Moved down.');
       // The row is drawn anew in another phase: the focus follows it.
-      requestAnimationFrame(() => table.current?.querySelector<HTMLElement>(`tr[data-row="${CSS.escape(lineId)}"] ${column ? `input[data-column="${column}"]` : 'button'}`)?.focus());
+      requestAnimationFrame(() => findRow(table.current, lineId)?.querySelector<HTMLElement>(column ? `input[data-column="${column}"]` : 'button')?.focus());
     },
     [onChange, isReadOnly],
   );

@@ -28,6 +28,7 @@ export function PhaseHead({ phase, grams, percent, isFirst, isLast, isReadOnly, 
   return (
     <tr className="phase">
       <th scope="rowgroup">
+        <span className="phase-words">
         {isReadOnly ? null : (
           <Menu
             className="handle-button"
@@ -64,6 +65,7 @@ export function PhaseHead({ phase, grams, percent, isFirst, isLast, isReadOnly, 
             }}
           />
         )}
+        </span>
       </th>
       <td className="num" title={`${toDecimal(grams)} g`}>{toDecimal(grams, 3)}</td>
       <td className="num" title={`${toDecimal(percent)} %`}>{toDecimal(percent, 3)}</td>

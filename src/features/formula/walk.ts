@@ -27,7 +27,12 @@ export function stepFrom(event: KeyboardEvent<HTMLInputElement>): Step {
   return other ? { to: other } : null;
 }
 
+/** The row of a line. */
+export function findRow(grid: HTMLElement | null, lineId: string): HTMLElement | undefined {
+  return [...(grid?.querySelectorAll<HTMLElement>('tr[data-row]') ?? [])].find((row) => row.dataset.row === lineId);
+}
+
 /** Puts the caret into a line's grams. */
 export function focusGrams(grid: HTMLElement | null, lineId: string): void {
-  grid?.querySelector<HTMLInputElement>(`input[data-line="${CSS.escape(lineId)}"][data-column="g"]`)?.focus();
+  findRow(grid, lineId)?.querySelector<HTMLInputElement>('input[data-column="g"]')?.focus();
 }
