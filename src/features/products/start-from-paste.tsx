@@ -14,6 +14,7 @@ import { VerdictWord } from '#src/ui/verdict-mark.tsx';
 import { NewProductForm } from './new-product-form.tsx';
 import { formulaOf, materialFromName, planPaste } from './paste-plan.ts';
 import type { PastePlan } from './paste-plan.ts';
+import './products.css';
 
 /** Every material of the house: a paste is matched against all of them. */
 async function readAllMaterials(signal: AbortSignal): Promise<MaterialSummary[]> {
