@@ -4,7 +4,7 @@ const GREEK: Readonly<Record<string, string>> = {
 };
 const PLAIN_JUNK = /[^a-z0-9]+/g;
 const ANY_JUNK = /[^\p{L}\p{N}]+/gu;
-// eslint-disable-next-line no-control-regex -- the whole of ASCII is meant
+ 
 const IS_ASCII = /^[\x00-\x7f]*$/;
 
 /**

@@ -20,7 +20,7 @@ test('C-03 every answer carries the strict headers, and none of another origin\'
   for (const path of ['/', '/products/anything', '/assets/main-abc123.js', '/api/session', '/api/nothing', '/healthz', '/assets/gone.js']) {
     const { headers } = await request(stage.app).get(path).set('Origin', 'https://elsewhere.example');
     expect(headers['content-security-policy'], path).toBe("default-src 'self';img-src 'self' data: blob:;object-src 'none';base-uri 'none';form-action 'self';frame-ancestors 'none'");
-    expect(headers, path).toMatchObject({ 'x-content-type-options': 'nosniff', 'referrer-policy': 'no-referrer', 'cross-origin-opener-policy': 'same-origin' });
+    expect(headers, path).toMatchObject({ 'x-content-type-options': 'nosniff', 'referrer-policy': 'same-origin', 'cross-origin-opener-policy': 'same-origin' });
     expect(Object.keys(headers).filter((name) => name.startsWith('access-control-') || name === 'x-powered-by'), path).toEqual([]);
   }
 });
