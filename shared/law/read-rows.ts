@@ -22,6 +22,7 @@ function checkMember(member: Member, where: string): Member {
   if (!member.name) throw new DomainError(`${where}: a member without a name`);
   checkDecimal(member.factor?.times, where);
   checkDecimal(member.factor?.over, where);
+  checkDecimal(member.max, where);
   return member;
 }
 

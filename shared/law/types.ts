@@ -58,6 +58,8 @@ export interface Member {
   readonly sharedCas?: readonly string[];
   /** Multiplies a share to express it on the row's basis ("as acid"): exact ratio of molar masses as two decimals. */
   readonly factor?: { readonly times: string; readonly over: string };
+  /** Its own maximum, in percent on the row's basis, where ratios are summed; absent = the provision's. */
+  readonly max?: string;
 }
 
 /** What a row demands in one field of application. */

@@ -24,6 +24,8 @@ export interface Outcome {
   readonly measured?: Interval;
   readonly limit?: Rational;
   readonly limitText?: string;
+  /** Measured and limit are sums of shares over each one's own maximum, not percents. */
+  readonly isRatio?: boolean;
   readonly words?: string;
   readonly wordingId?: string;
   /** The dates of what it rests on, where it is dated. */

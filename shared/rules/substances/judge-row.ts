@@ -93,7 +93,8 @@ function judgeProvision(spoken: Spoken, outcomes: Outcome[]): void {
       continue;
     }
     if (row.list === 'prohibited' && provision.max === undefined) outcomes.push({ ...common, type: 'prohibited' });
-    if (provision.max !== undefined) judgeLimit(common, group, context, outcomes);
+    if (isRatioOf(row, provision, common.parts)) judgeRatios(common, group, context, outcomes);
+    else if (provision.max !== undefined) judgeLimit(common, group, context, outcomes);
     for (const required of provision.requires ?? []) judgeRequirement(common, required, context, outcomes);
     for (const wording of provision.wording ?? []) judgeWording(common, wording, context, outcomes);
   }
@@ -102,15 +103,35 @@ function judgeProvision(spoken: Spoken, outcomes: Outcome[]): void {
 type Common = Omit<Outcome, 'type'>;
 
 function judgeLimit(common: Common, group: readonly Applied[], context: Context, outcomes: Outcome[]): void {
-  const limit = decimal(common.provision.max!);
-  const measured = weighParts(common.parts, context);
+  compareLimit(common, group, { limitText: common.provision.max!, weigh: (parts) => weighParts(parts, context) }, outcomes);
+}
+
+/** Whether the provision adds each member's share over that member's own maximum. */
+function isRatioOf(row: LawRow, provision: Provision, parts: readonly Part[]): boolean {
+  return (provision.together ?? row.together) === 'ratios' && parts.every(({ member }) => (member.max ?? provision.max) !== undefined);
+}
+
+/** The sum of the ratios may not exceed 1; one member alone is told as a plain limit. */
+function judgeRatios(common: Common, group: readonly Applied[], context: Context, outcomes: Outcome[]): void {
+  const { parts, provision } = common;
+  if (parts.length === 1) {
+    compareLimit(common, group, { limitText: parts[0]!.member.max ?? provision.max!, weigh: (some) => weighParts(some, context) }, outcomes);
+    return;
+  }
+  const weigh = (some: readonly Part[]): Interval => weighParts(some, context, (part) => divide(ONE, decimal(part.member.max ?? provision.max!)));
+  compareLimit({ ...common, isRatio: true }, group, { limitText: '1', weigh }, outcomes);
+}
+
+function compareLimit(common: Common, group: readonly Applied[], { limitText, weigh }: { readonly limitText: string; readonly weigh: (parts: readonly Part[]) => Interval }, outcomes: Outcome[]): void {
+  const limit = decimal(limitText);
+  const measured = weigh(common.parts);
   if (compare(measured.max, limit) <= 0) return;
   const certain = group.filter((one) => one.applies === true).map((one) => one.part);
-  const least = certain.length === common.parts.length ? measured.min : certain.length > 0 ? weighParts(certain, context).min : undefined;
+  const least = certain.length === common.parts.length ? measured.min : certain.length > 0 ? weigh(certain).min : undefined;
   const isCertain = least !== undefined && compare(least, limit) > 0;
   // "possible" with nothing missing means: only the upper part of the range exceeds.
   const isRangeOnly = !isCertain && compare(measured.min, limit) <= 0;
-  outcomes.push({ ...common, type: 'limit', certainty: isCertain ? 'certain' : 'possible', needs: isRangeOnly ? [] : common.needs, measured, limit, limitText: common.provision.max! });
+  outcomes.push({ ...common, type: 'limit', certainty: isCertain ? 'certain' : 'possible', needs: isRangeOnly ? [] : common.needs, measured, limit, limitText });
 }
 
 function judgeRequirement(common: Common, required: NonNullable<Provision['requires']>[number], context: Context, outcomes: Outcome[]): void {
@@ -155,14 +176,14 @@ export function weightOf(member: Member, readyForUse: Rational): Rational {
   return multiply(factor, readyForUse);
 }
 
-/** The share of all parts together on the row's basis, exact over everything the ranges allow. */
-export function weighParts(parts: readonly Part[], context: Context): Interval {
+/** The share of all parts together on the row's basis (each times `times`), exact over everything the ranges allow. */
+export function weighParts(parts: readonly Part[], context: Context, times: (part: Part) => Rational = () => ONE): Interval {
   const ready = context.facts.readyForUse;
   if (parts.length === 1) {
     const { substance, member } = parts[0]!;
-    const weight = weightOf(member, ready);
+    const weight = multiply(weightOf(member, ready), times(parts[0]!));
     const { min, typical, max } = substance.total;
     return { min: multiply(min, weight), typical: multiply(typical, weight), max: multiply(max, weight) };
   }
-  return context.mixture.weigh(parts.map(({ substance, member }) => ({ key: substance.key, weight: weightOf(member, ready) })));
+  return context.mixture.weigh(parts.map((part) => ({ key: part.substance.key, weight: multiply(weightOf(part.member, ready), times(part)) })));
 }

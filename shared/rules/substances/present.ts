@@ -19,8 +19,8 @@ export function presentOutcome(outcome: Outcome, context: Context): Finding {
     subject,
     ...(members ? { members } : {}),
     ...(outcome.measured ? measuredFields(outcome.measured) : {}),
-    ...(outcome.limitText !== undefined ? { limit: outcome.limitText, unit: '%' } : {}),
-    ...(outcome.measured && outcome.provision.basis ? { basis: outcome.provision.basis } : {}),
+    ...(outcome.limitText !== undefined ? { limit: outcome.limitText, ...(outcome.isRatio ? {} : { unit: '%' }) } : {}),
+    ...(outcome.measured && basisOf(outcome) ? { basis: basisOf(outcome) } : {}),
     citation: context.law.citation(row, context.facts.market) + letterOf(outcome),
     ...(effective ? { effective } : {}),
     message: messageOf(outcome, kind, subject),
@@ -31,6 +31,12 @@ export function presentOutcome(outcome: Outcome, context: Context): Finding {
     ...(sourcing !== 'official' ? { sourcing } : {}),
     ...(outcome.provision.reading ? { reading: outcome.provision.reading } : {}),
   };
+}
+
+/** What the measured figure is expressed as. */
+function basisOf({ provision, isRatio }: Outcome): string | undefined {
+  if (!isRatio) return provision.basis;
+  return `sum of shares${provision.basis ? ` ${provision.basis}` : ''} over each one's own maximum`;
 }
 
 export function ruleId(outcome: Outcome): string {
@@ -76,14 +82,15 @@ function effectiveOf(outcome: Outcome): Finding['effective'] {
   return { from: from.placed ?? from.available, ...(until ? { to: until.placed ?? until.available } : {}) };
 }
 
-function plain(interval: Interval): string {
+function plain(interval: Interval, unit = ' %'): string {
   const min = toDecimal(interval.min, 6);
   const max = toDecimal(interval.max, 6);
-  return min === max ? `${max} %` : `${min} to ${max} %`;
+  return min === max ? `${max}${unit}` : `${min} to ${max}${unit}`;
 }
 
 function messageOf(outcome: Outcome, kind: FindingKind, subject: string): string {
   const basis = outcome.provision.basis ? ` ${outcome.provision.basis}` : '';
+  if (outcome.isRatio) return ratioMessage(outcome, kind);
   if (outcome.type === 'limit') {
     const who = outcome.parts.length > 1 ? `${outcome.parts.map((part) => part.substance.name).join(', ')} together` : subject;
     const what = `${who}: ${plain(outcome.measured!)}${basis}, and ${outcome.limitText} % is the most`;
@@ -96,11 +103,19 @@ function messageOf(outcome: Outcome, kind: FindingKind, subject: string): string
   return `${subject}: ${outcome.words ?? 'not for this use.'}${open}`;
 }
 
+function ratioMessage(outcome: Outcome, kind: FindingKind): string {
+  const names = outcome.parts.map((part) => part.substance.name).join(', ');
+  const what = `${names}: each share over its own maximum adds up to ${plain(outcome.measured!, '')}, and 1 is the most`;
+  if (kind === 'limit-exceeded') return `${what}.`;
+  return outcome.needs.length > 0 ? `${what} where the open question is answered so.` : `${what}; only part of the range is above it.`;
+}
+
 function remedyOf(outcome: Outcome, kind: FindingKind, subject: string): string {
   if (outcome.certainty === 'possible') {
     if (outcome.needs.includes('purpose')) return `State what ${subject} is there for.`;
     return outcome.needs.length > 0 ? `Answer what is open: ${outcome.needs.join(', ')}.` : 'Ask the supplier for a narrower range.';
   }
+  if (kind === 'limit-exceeded' && outcome.isRatio) return 'Lower one of them until the ratios add up to 1 or less.';
   if (kind === 'limit-exceeded') return `Bring ${subject} to ${outcome.limitText} % or less${outcome.provision.basis ? `, counted ${outcome.provision.basis}` : ''}.`;
   if (outcome.type === 'requires') return 'Change the product so that the condition holds.';
   return `Take ${subject} out, or choose a product kind that the rule allows.`;
@@ -114,13 +129,14 @@ function arithmeticOf(outcome: Outcome, context: Context): NonNullable<Finding['
       steps.push({ step: `${substance.name} from line ${lineNumber(source.line)}`, figure: plain(source.share), from: source.materialId });
     }
     if (substance.sources.length > 1) steps.push({ step: `${substance.name} in all`, figure: plain(substance.total) });
+    if (outcome.isRatio) steps.push({ step: `${substance.name}, over its own maximum of`, figure: `${member.max ?? outcome.provision.max} %` });
     if (member.factor) {
       steps.push({ step: `times ${member.factor.times} over ${member.factor.over} (${outcome.provision.basis ?? 'converted'})`, figure: toDecimal(weightOf(member, { n: 1n, d: 1n }), 9) });
     }
   }
   if (context.facts.readyForUse.n !== context.facts.readyForUse.d) steps.push({ step: 'times the share of the product in the ready-for-use mixture', figure: toDecimal(context.facts.readyForUse, 9) });
-  steps.push({ step: outcome.parts.length > 1 ? 'together, compared' : 'compared', figure: plain(outcome.measured!) });
-  steps.push({ step: 'the most the rule allows', figure: `${outcome.limitText} %` });
+  steps.push({ step: outcome.parts.length > 1 ? 'together, compared' : 'compared', figure: plain(outcome.measured!, outcome.isRatio ? '' : ' %') });
+  steps.push({ step: 'the most the rule allows', figure: outcome.isRatio ? outcome.limitText! : `${outcome.limitText} %` });
   return steps;
 }
 

@@ -3,7 +3,7 @@ import { add, decimal, multiply, ONE, ZERO, type Rational } from '#shared/kernel
 import type { DocumentParticulars, FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { Finding, FindingKind, Interval, Mixture, ProductFacts, Substance } from '#shared/engine/types.ts';
 import { foldName } from '#shared/law/fold.ts';
-import { openLawBook } from '#shared/law/law-book.ts';
+import { openLawBook, type LawBook } from '#shared/law/law-book.ts';
 import { lawTables } from '#shared/law/tables.ts';
 import type { Market, ProductFlag, Purpose } from '#shared/law/types.ts';
 import { judgeLaw, type LawVerdict } from '#shared/rules/judge-law.ts';
@@ -81,7 +81,7 @@ function toDocument(givens: readonly Given[], asked: Asked): FormulaDocument {
 }
 
 /** Judges a small product: substances with their shares, and what the product is. Dates default to 1 December 2026. */
-export function judge(givens: readonly Given[], asked: Asked = {}): LawVerdict {
+export function judge(givens: readonly Given[], asked: Asked = {}, book: LawBook = law): LawVerdict {
   const category = law.categories.get(asked.category ?? 'body-wash')!;
   const none = { under3: false, professionalUseOnly: false, aerosol: false, spray: false, intimateHygiene: false };
   const available = asked.available ?? '2026-12-01';
@@ -94,7 +94,7 @@ export function judge(givens: readonly Given[], asked: Asked = {}): LawVerdict {
     facts: asked.facts ?? {},
     readyForUse: asked.readyForUse ?? ONE,
   };
-  return judgeLaw(facts, toMixture(givens.map(toSubstance)), toDocument(givens, asked), law);
+  return judgeLaw(facts, toMixture(givens.map(toSubstance)), toDocument(givens, asked), book);
 }
 
 /** `kind subject rule` of each finding of the kinds asked for (all but wording when none is). */

@@ -1,4 +1,7 @@
 import { describe, expect, test } from 'vitest';
+import { openLawBook } from '#shared/law/law-book.ts';
+import { lawTables } from '#shared/law/tables.ts';
+import type { RowFileJson } from '#shared/law/tables.types.ts';
 import { judge, said, type Asked, type Given } from '../judging.ts';
 
 const kinds = (given: readonly Given[], asked: Asked = {}): string[] => said(judge(given, asked)).map((line) => line.split(' ')[0]!);
@@ -129,5 +132,42 @@ describe('a rule on its days', () => {
     ['2023-01-28', '2023-07-29', ['limit-exceeded']],
   ])('VI/4 benzophenone-3 at 3 %% in a body lotion, placed %s and available %s: %s', (placed, available, expected) => {
     expect(kinds([{ name: 'Benzophenone-3', percent: '3', purpose: 'uv-filter' }], { category: 'body-lotion', placed, available })).toEqual(expected);
+  });
+});
+
+/**
+ * Annex III, entry 8, footnote 1: the substances may be combined where the sum of the ratios of
+ * each level to the maximum authorised for each does not exceed 1. The names are invented, so
+ * that no other row speaks of them; the salt counts as half its mass of base.
+ */
+describe('a sum of ratios', () => {
+  const file: RowFileJson = {
+    list: 'restricted', instrument: 'eu-1223-2009', id: 'test/{entry}', citation: 'Test, entry {entry}', markets: ['EU'], sourcing: 'official',
+    rows: [{
+      entry: '8', title: 'Dyes', together: 'ratios', provisions: [{ max: '3', basis: 'as free base' }],
+      members: [{ name: 'Testdye base' }, { name: 'Testdye salt', factor: { times: '1', over: '2' } }, { name: 'Testdye strong', max: '0.5' }],
+    }],
+  };
+  const book = openLawBook({ ...lawTables, rows: [...lawTables.rows, file] });
+  const found = (...givens: Given[]) => judge(givens, { category: 'hair-dye-oxidative' }, book).findings.filter(({ rule }) => rule === 'test/8');
+
+  test('exactly 1 is allowed, the least bit more is one finding with its members', () => {
+    // 1.5/3 + 2 × ½/3 + 0.08333…/0.5 is just under 1 with 0.0833 and over it with 0.0834.
+    expect(found({ name: 'Testdye base', percent: '1.5' }, { name: 'Testdye strong', percent: '0.25' })).toEqual([]);
+    expect(found({ name: 'Testdye base', percent: '1.5' }, { name: 'Testdye salt', percent: '2' }, { name: 'Testdye strong', percent: '0.0833' })).toEqual([]);
+    const [over, ...rest] = found({ name: 'Testdye base', percent: '1.5' }, { name: 'Testdye salt', percent: '2' }, { name: 'Testdye strong', percent: '0.0834' });
+    expect(rest).toEqual([]);
+    expect(over).toMatchObject({ kind: 'limit-exceeded', measured: '1.000133333333', limit: '1', members: ['Testdye base', 'Testdye salt', 'Testdye strong'], basis: "sum of shares as free base over each one's own maximum" });
+    expect(over!.unit).toBeUndefined();
+  });
+
+  test('one member alone is held to its own maximum in percent', () => {
+    expect(found({ name: 'Testdye strong', percent: '0.5' })).toEqual([]);
+    expect(found({ name: 'Testdye strong', percent: '0.51' })[0]).toMatchObject({ kind: 'limit-exceeded', measured: '0.51', limit: '0.5', unit: '%' });
+    expect(found({ name: 'Testdye salt', percent: '6' })).toEqual([]);
+  });
+
+  test('a range that only its upper part carries over 1 is uncertain', () => {
+    expect(found({ name: 'Testdye base', percent: '1.5' }, { name: 'Testdye strong', min: '0.2', max: '0.3' })[0]).toMatchObject({ kind: 'limit-uncertain', severity: 'decide' });
   });
 });
