@@ -74,6 +74,8 @@ const marketResult = z.object({
   allergens: z.array(allergen),
   findings: z.array(finding),
   requiredWording: z.array(wording),
+  /** Conditions of the law that nothing entered can decide. */
+  notChecked: z.array(z.string()).optional(),
   headroom: z.array(z.object({ line: z.int(), max: z.string().nullable(), limitedBy: z.string().nullable() })),
 });
 

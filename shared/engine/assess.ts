@@ -100,6 +100,7 @@ function assessMarket(shared: Shared, market: Market): MarketAssessment {
     allergens: verdicts,
     findings: byWeight(findings),
     requiredWording: judged.requiredWording,
+    notChecked: [...new Set(judged.notChecked.map(({ subject, words, citation: source }) => `${subject}: ${words} (${source})`))],
     headroom: () => (headroom ??= findHeadroom(blend.weighed, findings, findingsAt, (line) => isSpokenOf(materialOf(document, line), shared, market))),
   };
 }

@@ -85,6 +85,8 @@ export interface MarketAssessment {
   readonly allergens: readonly AllergenVerdict[];
   readonly findings: readonly Finding[];
   readonly requiredWording: readonly RequiredWording[];
+  /** Conditions of the law that nothing entered can decide, a sentence each with its subject and citation. */
+  readonly notChecked: readonly string[];
   /** Worked out on the first call. */
   headroom(): readonly HeadroomLine[];
 }

@@ -30,6 +30,7 @@ function presentMarket(result: MarketAssessment, totalMass: string, withHeadroom
     allergens: result.allergens.map(presentAllergen),
     findings: result.findings as MarketResult['findings'],
     requiredWording: result.requiredWording as MarketResult['requiredWording'],
+    notChecked: [...result.notChecked],
     headroom: withHeadroom ? [...result.headroom()] : [],
   };
 }

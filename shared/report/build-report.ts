@@ -28,6 +28,8 @@ export interface ReportedResult {
   readonly allergens: readonly { readonly name: string; readonly total: Share; readonly threshold: string; readonly disclose: boolean }[];
   readonly findings: readonly ToldFinding[];
   readonly requiredWording: readonly RequiredWording[];
+  /** Conditions of the law that nothing entered can decide, each beginning with its subject. */
+  readonly notChecked?: readonly string[] | undefined;
 }
 
 export interface ReportInput {
@@ -82,7 +84,7 @@ export function buildReport(input: ReportInput): ReportModel {
     ...(ladder && { ladder }),
     formula: formulaOf(document, input.showShares),
     particulars: particularRows(document),
-    notChecked: document.product.particulars ? NOT_CHECKED : ['Label particulars: none are entered, so none were checked.', ...NOT_CHECKED],
+    notChecked: notCheckedOf(document, results),
     cautions: CAUTIONS,
     dataRelease: input.dataRelease,
     lawReadOn: dayInWords(input.lawReadOn),
@@ -94,6 +96,13 @@ function namesOf(declaration: ReportedResult['declaration']): string[] {
   const lead = `${declaration.heading}: `;
   const body = declaration.text.startsWith(lead) ? declaration.text.slice(lead.length) : declaration.text;
   return body.replace(/\.$/, '').split(', ');
+}
+
+/** What the law asks and nothing entered decides, then what no formula can show. */
+function notCheckedOf(document: FormulaDocument, results: readonly ReportedResult[]): string[] {
+  const particulars = document.product.particulars ? [] : ['Label particulars: none are entered, so none were checked.'];
+  const open = new Set(results.flatMap((result) => result.notChecked ?? []));
+  return [...particulars, ...open, ...NOT_CHECKED];
 }
 
 function subtitleOf(document: FormulaDocument, results: readonly ReportedResult[]): string {

@@ -96,3 +96,9 @@ test.each([
 test('days are written without a chance of confusion', () => {
   expect(dayInWords('2026-12-01')).toBe('1 December 2026');
 });
+
+test('conditions that nothing entered decides stand once in the list of what was not checked', () => {
+  const open = 'Triethanolamine: Nitrosamines must be kept out. (Annex III, entry 62)';
+  const two = { ...input, results: [{ ...result, notChecked: [open] }, { ...result, market: 'UK' as const, notChecked: [open] }], showShares: true };
+  expect(buildReport(two).notChecked.filter((one) => one.startsWith('Triethanolamine'))).toEqual([open]);
+});
