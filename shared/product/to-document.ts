@@ -18,7 +18,7 @@ export interface HouseDefaults {
  * over all phases, so a finding's line number points at the same line on screen. What the
  * product leaves empty is taken from the house, where one is given.
  */
-export function toFormulaDocument(draft: ProductDraft, materials: readonly Material[], house?: HouseDefaults, today?: string): FormulaDocument {
+export function toDocument(draft: ProductDraft, materials: readonly Material[], house?: HouseDefaults, today?: string): FormulaDocument {
   const used = new Set(draft.formula.phases.flatMap((phase) => phase.lines.map((line) => line.materialId)));
   const { readyForUse, netContent, durability } = draft;
   return {
@@ -48,9 +48,6 @@ export function toFormulaDocument(draft: ProductDraft, materials: readonly Mater
     label: toLabel(draft.label),
   };
 }
-
-/** The same, for callers that leave the day open. */
-export const toDocument = toFormulaDocument;
 
 function dayOf(key: 'placedOnMarket' | 'availableOn', day: string | undefined): Partial<Record<typeof key, string>> {
   return day === undefined ? {} : { [key]: day };
