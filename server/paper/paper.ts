@@ -63,6 +63,11 @@ const FOOT_RULE = 281.5;
 /** Lowest baseline of the body. */
 export const BODY_END = 276;
 
+/** A figure and its unit are one word to the line breaker. */
+function bindUnits(text: string): string {
+  return text.replace(/(\d) (?=(?:°[CF]|%|g|kg|mg|ml|mm|h|min)(?![A-Za-z]))/g, '$1\u00a0');
+}
+
 /** Opens an A4 document in the house's paper style. */
 export async function openPaper(options: PaperOptions): Promise<Paper> {
   const pdf = await PDFDocument.create({ updateMetadata: false });
@@ -136,7 +141,7 @@ export async function openPaper(options: PaperOptions): Promise<Paper> {
     width,
     wrap(text, measure, type = {}) {
       const lines: string[] = [];
-      for (const paragraph of text.split('\n')) {
+      for (const paragraph of bindUnits(text).split('\n')) {
         let line = '';
         for (const word of paragraph.split(' ')) {
           const longer = line === '' ? word : `${line} ${word}`;

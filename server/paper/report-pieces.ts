@@ -61,7 +61,7 @@ export function verdict(paper: Paper, finding: MergedFinding): Piece {
   const act = { face: 'SemiBold', size: 13 } as const;
   const markets = finding.markets.join(', ');
   const actLines = paper.wrap(finding.act, measure - paper.width(markets) - 2, act);
-  const whyLines = paper.wrap(finding.why, measure);
+  const whyLines = finding.why ? paper.wrap(finding.why, measure) : [];
   const sums = finding.arithmetic.flatMap((line) => paper.wrap(line, measure, { face: 'Medium' }));
   const cite = [...finding.citations, ...(finding.sourcing ? [finding.sourcing === 'memory' ? 'from memory: re-read before relying on it' : 'from a secondary source'] : [])].join(' · ');
   const citeLines = paper.wrap(cite, measure);
@@ -94,6 +94,8 @@ const DECADES = ['100', '10', '1', '0.1', '0.01', '0.001', '0.0001'];
 const AXIS = 16;
 const DECADE = 18.5;
 const ROW = 4.3;
+/** Kept free over a line for the words that stand on it. */
+const LABEL = 5;
 
 /** Millimetres below the top of the scale; only for drawing, nothing is decided here. */
 function depth(share: string): number {
@@ -113,7 +115,7 @@ function spreadRows(rows: readonly LadderRow[], lines: readonly number[]): numbe
   for (let index = placed.length - 1; index >= 0; index -= 1) {
     const below = index + 1 < placed.length ? placed[index + 1]! : Infinity;
     let ceiling = below - ROW;
-    for (const line of lines) if (wanted[index]! <= line) ceiling = Math.min(ceiling, line - 2.2);
+    for (const line of lines) if (wanted[index]! <= line) ceiling = Math.min(ceiling, line - LABEL);
     if (placed[index]! > ceiling) placed[index] = ceiling;
   }
   return placed;

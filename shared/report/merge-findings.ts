@@ -29,9 +29,9 @@ export function mergeFindings(results: readonly MarketFindings[]): MergedFinding
         rule: finding.rule,
         subject: finding.subject,
         markets: [market],
-        act: finding.remedy ?? finding.message,
-        why: finding.remedy ? finding.message : '',
-        arithmetic: (finding.arithmetic ?? []).map((step) => (step.step ? `${step.step}: ${step.figure}` : step.figure)),
+        act: shorten(finding.remedy ?? finding.message),
+        why: finding.remedy ? shorten(finding.message) : '',
+        arithmetic: [...(finding.arithmetic ?? []).map((step) => shorten(step.step ? `${step.step}: ${step.figure}` : step.figure)), ...(finding.suspects ?? []).map(slipInWords)],
         citations: [finding.citation],
         ...(finding.sourcing && { sourcing: finding.sourcing }),
         ...(finding.reading && { reading: finding.reading }),
@@ -39,6 +39,15 @@ export function mergeFindings(results: readonly MarketFindings[]): MergedFinding
     }
   }
   return [...merged.values()];
+}
+
+/** Figures of more than six decimals are cut, and say so: the exact ones stand in the result document. */
+function shorten(text: string): string {
+  return text.replace(/(\d\.\d{6})\d+/g, '$1…');
+}
+
+function slipInWords({ line, written, perhaps, slip }: NonNullable<ToldFinding['suspects']>[number]): string {
+  return `Line ${line + 1}: perhaps ${perhaps} for ${written}, ${slip === 'digits-exchanged' ? 'two figures exchanged' : 'the point shifted by one place'}`;
 }
 
 /** What a finding is about, without figures: for readers who are not to know the formula. */
