@@ -153,34 +153,36 @@ function ladderOf(result: ReportedResult | undefined, findings: readonly MergedF
   };
 }
 
-/** Grams and percent with two decimals, or as many up to four as are needed to be exact. */
-function figure(value: Rational): string {
-  const exact = toDecimal(value, 4);
-  const [whole, fraction = ''] = exact.split('.');
-  return `${whole}.${fraction.padEnd(2, '0')}`;
+/** A column of figures with the same number of decimals: two, or as many up to four as one of them needs. */
+function column(values: readonly Rational[]): string[] {
+  const texts = values.map((value) => toDecimal(value, 4).split('.'));
+  const places = texts.reduce((most, [, fraction = '']) => (fraction.length > most ? fraction.length : most), 2);
+  return texts.map(([whole, fraction = '']) => `${whole}.${fraction.padEnd(places, '0')}`);
 }
 
 function formulaOf(document: FormulaDocument, isExact: boolean): ReportModel['formula'] {
   const weighed = weighLines(document);
   const names = new Map(document.materials.map((material) => [material.id, material.tradeName || material.id]));
+  const total = { n: weighed.total, d: weighed.den };
+  const masses = weighed.masses.map((mass): Rational => ({ n: mass, d: weighed.den }));
+  const shares = weighed.masses.map((mass): Rational => ({ n: mass * 100n, d: weighed.total === 0n ? 1n : weighed.total }));
+  const grams = column([...masses, total]);
+  const percents = column(shares);
   const phases = new Map<string, { name: string; note: string; grams: string; percent: string }[]>();
   document.formula.lines.forEach((line, index) => {
-    const mass: Rational = { n: weighed.masses[index]!, d: weighed.den };
-    const percent: Rational = { n: weighed.masses[index]! * 100n, d: weighed.total === 0n ? 1n : weighed.total };
     const lines = phases.get(line.phase) ?? [];
     lines.push({
       name: names.get(line.material) ?? line.material,
       note: isExact && line.unit === 'qs' ? 'makes up' : '',
-      grams: isExact ? figure(mass) : '',
-      percent: isExact ? figure(percent) : shareAsBand(percent),
+      grams: isExact ? grams[index]! : '',
+      percent: isExact ? percents[index]! : shareAsBand(shares[index]!),
     });
     phases.set(line.phase, lines);
   });
-  const total = { n: weighed.total, d: weighed.den };
   return {
     basis: isExact ? `As added, ${toDecimal(total, 4)} g` : 'Bands of the Canadian notification form; exact shares are kept by the house',
     isExact,
     phases: [...phases].map(([name, lines]) => ({ name: name || 'Formula', lines })),
-    total: { grams: isExact ? figure(total) : '', percent: isExact ? '100.00' : '100' },
+    total: { grams: isExact ? grams.at(-1)! : '', percent: isExact ? '100.00' : '100' },
   };
 }
