@@ -53,17 +53,31 @@ const CA_ROWS: readonly (readonly [bigint | null, Nanometres])[] = [[32n, 1_600_
 /** Directive 76/211/EEC, Annex I, 3.1 (secondary); the same figures in the Weights and Measures (Packaged Goods) Regulations 2006 (from memory). */
 const METRIC_ROWS: readonly (readonly [bigint | null, Nanometres])[] = [[50n, 2_000_000], [200n, 3_000_000], [1000n, 4_000_000], [null, 6_000_000]];
 
-function usMinimums(area: bigint): Minimums {
+/**
+ * Surface that could carry a label, in square micrometres: the wall of a cylinder, both faces of
+ * a flat pack; taken larger than the label, so that the relief for small packs is never claimed
+ * by a pack that may be larger.
+ */
+function labellingSurface(sheet: Sheet): bigint {
+  return sheet.shape === 'cylinder' ? BigInt(sheet.round) * BigInt(sheet.height + BODY_BEYOND_WRAP) : 2n * panelArea(sheet);
+}
+
+function usMinimums(sheet: Sheet, hasWarnings: boolean): Minimums {
+  const area = panelArea(sheet);
+  // Below 12 square inches the ingredient list may be half as high (21 CFR 701.3, secondary); warnings keep 740.2.
+  const isSmall = !hasWarnings && labellingSurface(sheet) < 12n * SQUARE_INCH;
   const [most, sixteenths] = US_ROWS.find(([limit]) => limit === null || area <= limit * SQUARE_INCH)!;
   return {
-    text: { height: SIXTEENTH, of: 'small o', citation: '21 CFR 701.3(b) and 740.2', because: '1/16 inch' },
+    text: isSmall
+      ? { height: SIXTEENTH / 2, of: 'small o', citation: '21 CFR 701.3', because: '1/32 inch, less than 12 square inches to label' }
+      : { height: SIXTEENTH, of: 'small o', citation: '21 CFR 701.3(b) and 740.2', because: '1/16 inch' },
     netContent: {
       height: sixteenths * SIXTEENTH, of: 'small o', citation: '21 CFR 701.13',
       because: most === null ? 'a panel over 400 square inches' : `a panel of ${most} square inches or less`,
     },
     netContentZone: most === 5n ? 0 : 300,
     eMark: 0,
-    symbolFigure: SIXTEENTH,
+    symbolFigure: isSmall ? SIXTEENTH / 2 : SIXTEENTH,
   };
 }
 
@@ -95,10 +109,11 @@ function metricMinimums(market: Market, quantity: bigint | null): Minimums {
 
 /**
  * The least letter heights of a market on one sheet. `quantity` is the nominal content in g or
- * ml, rounded up to the next whole unit so that a row's edge is never crossed by rounding.
+ * ml, rounded up to the next whole unit so that a row's edge is never crossed by rounding. A label that
+ * carries warnings gets no relief for small packs.
  */
-export function minimumsFor(market: Market, sheet: Sheet, quantity: bigint | null): Minimums {
-  if (market === 'US') return usMinimums(panelArea(sheet));
+export function minimumsFor(market: Market, sheet: Sheet, quantity: bigint | null, hasWarnings = true): Minimums {
+  if (market === 'US') return usMinimums(sheet, hasWarnings);
   if (market === 'CA') return caMinimums(panelArea(sheet));
   return metricMinimums(market, quantity);
 }

@@ -55,7 +55,7 @@ function cutToBleed(item: Item, sheet: Box): Item {
 
 function jobOf(input: LabelInput, sheet: Sheet, metrics: FontMetrics): Job {
   const content = contentOf(input);
-  const minimums = minimumsFor(input.market, sheet, content.net?.quantity ?? null);
+  const minimums = minimumsFor(input.market, sheet, content.net?.quantity ?? null, input.warnings.length > 0 || content.frontWarnings.length > 0);
   const isNorthAmerican = input.market === 'US' || input.market === 'CA';
   const isWrap = sheet.shape === 'cylinder';
   const scale = Math.max(0.5, Math.min(1.45, isWrap ? Math.min(sheet.round / 182_400, sheet.height / 82_000) : Math.min(Math.max(sheet.width, sheet.height * 0.66) / 66_000, Math.max(sheet.height, sheet.width * 0.6) / 84_000)));

@@ -56,3 +56,15 @@ test('a height becomes the smallest em that keeps it', () => {
   expect(3077 * 516).toBeGreaterThanOrEqual(1_587_500);
   expect(3076 * 516).toBeLessThan(1_587_500);
 });
+
+// 21 CFR 701.3 (secondary): less than 12 square inches to label, 1/32 inch; two faces are counted.
+test.each([
+  ['under 12 square inches', 25400 * 2, 25400 * 3 - 1, 793_750],
+  ['12 square inches exactly', 25400 * 2, 25400 * 3, 1_587_500],
+])('US letters on %s', (_, width, height, least) => {
+  expect(minimumsFor('US', face(width, height), 1n, false).text.height).toBe(least);
+});
+
+test('a label with warnings keeps 1/16 inch on the smallest pack', () => {
+  expect(minimumsFor('US', face(25400, 25400), 1n, true).text.height).toBe(1_587_500);
+});
