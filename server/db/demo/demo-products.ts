@@ -127,7 +127,7 @@ const lipBalm = demoDraft(
         phase('Cool-down', [['vitaminE', '1.2']], [{ text: 'Stir in and pour.', warm: ['60', '65'] }]),
       ],
     },
-    label: demoLabel({ shape: 'flat', widthMm: '60', heightMm: '44', name: 'Tin, 12 g' }, { ink: 'black' }),
+    label: demoLabel({ shape: 'flat', widthMm: '66', heightMm: '52', name: 'Carton, 12 g' }, { ink: 'black' }),
   },
   { facts: { physicalForm: 'solid' }, particulars: { batchCode: 'RL-0116', function: 'Lip balm', directions: 'Smooth over the lips.' } },
 );
