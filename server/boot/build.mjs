@@ -5,12 +5,12 @@ import { join } from 'node:path';
 import { readJson, writeJson } from './home.mjs';
 import { follow } from './run.mjs';
 import { Stop } from './say.mjs';
+import { inCheckout } from './turn.mjs';
 
 /** Each program and its source. */
 const PROGRAMS = {
   main: 'server/main.ts',
-  migrate: 'server/db/migrate-main.ts',
-  seed: 'server/db/seed-main.ts',
+  prepare: 'server/db/prepare-main.ts',
   local: 'server/local/main.ts',
   env: 'server/env.ts',
 };
@@ -18,25 +18,51 @@ const PROGRAMS = {
 /** @typedef {{ server: string, client: string }} Stamps */
 
 /** Builds what is out of date.
- * @param {string} checkout @param {(line: string) => void} say
+ * @param {string} checkout @param {(line: string) => void} say @param {AbortSignal} [signal]
  * @returns {Promise<Stamps>} marks of the sources that the build was made from */
-export async function build(checkout, say) {
-  const server = stampOf(checkout, ['server', 'shared', 'migrations', 'data', 'package-lock.json']);
-  const client = stampOf(checkout, ['src', 'shared', 'data', 'index.html', 'tailwind.config.ts', 'vite.config.ts', 'package-lock.json']);
+export async function build(checkout, say, signal) {
+  const stamps = stampsOf(checkout);
+  if (isBuilt(checkout, 'server', stamps) && isBuilt(checkout, 'client', stamps)) return stamps;
+  return inCheckout(checkout, say, () => buildParts(checkout, say, signal), signal);
+}
+
+/** @param {string} checkout @param {(line: string) => void} say @param {AbortSignal} [signal] */
+async function buildParts(checkout, say, signal) {
+  const stamps = stampsOf(checkout);
+  for (const part of /** @type {const} */ (['server', 'client'])) {
+    // Another start may have built it while we waited for it.
+    if (isBuilt(checkout, part, stamps)) continue;
+    signal?.throwIfAborted();
+    say(part === 'server' ? 'Building the server.' : 'Building the pages.');
+    // Without its mark until it is whole: a build that is cut off is made again.
+    keepStamp(checkout, part, undefined);
+    await (part === 'server' ? buildServer(checkout) : buildClient(checkout));
+    keepStamp(checkout, part, stamps[part]);
+  }
+  return stamps;
+}
+
+/** @param {string} checkout @returns {Stamps} */
+function stampsOf(checkout) {
+  return {
+    // The starter itself is no part of what it builds.
+    server: stampOf(checkout, ['server', 'shared', 'migrations', 'data', 'package-lock.json'], join(checkout, 'server/boot')),
+    client: stampOf(checkout, ['src', 'shared', 'data', 'index.html', 'tailwind.config.ts', 'vite.config.ts', 'package-lock.json']),
+  };
+}
+
+const RESULTS = { server: 'build/server/main.js', client: 'build/client/index.html' };
+
+/** @param {string} checkout @param {keyof Stamps} part @param {Stamps} stamps */
+function isBuilt(checkout, part, stamps) {
+  return readJson(join(checkout, 'build/stamp.json'))?.[part] === stamps[part] && existsSync(join(checkout, RESULTS[part]));
+}
+
+/** @param {string} checkout @param {keyof Stamps} part @param {string | undefined} stamp */
+function keepStamp(checkout, part, stamp) {
   const file = join(checkout, 'build/stamp.json');
-  const before = readJson(file) ?? {};
   mkdirSync(join(checkout, 'build'), { recursive: true });
-  if (before['server'] !== server || !existsSync(join(checkout, 'build/server/main.js'))) {
-    say('Building the server.');
-    await buildServer(checkout);
-    writeJson(file, { ...(readJson(file) ?? {}), server });
-  }
-  if (before['client'] !== client || !existsSync(join(checkout, 'build/client/index.html'))) {
-    say('Building the pages.');
-    await buildClient(checkout);
-    writeJson(file, { ...(readJson(file) ?? {}), client });
-  }
-  return { server, client };
+  writeJson(file, { ...(readJson(file) ?? {}), [part]: stamp });
 }
 
 /** Where a program of the build is. @param {string} checkout @param {keyof typeof PROGRAMS} name */
@@ -46,7 +72,7 @@ export function program(checkout, name) {
 
 /** @param {string} checkout */
 async function buildServer(checkout) {
-  const { build: bundle } = await import('esbuild');
+  const { build: bundle, stop } = await import('esbuild');
   rmSync(join(checkout, 'build/server'), { recursive: true, force: true });
   try {
     await bundle({
@@ -66,7 +92,12 @@ async function buildServer(checkout) {
       plugins: [{ name: 'rooms', setup: (/** @type {import('esbuild').PluginBuild} */ building) => rooms(building, checkout) }],
     });
   } catch (error) {
-    throw new Stop(`The server could not be built: ${error instanceof Error ? error.message : String(error)}`);
+    const words = error instanceof Error ? error.message : String(error);
+    if (/no space left|ENOSPC/i.test(words)) throw new Stop('The disk is full while building the server. Free about 500 MB and start again.');
+    throw new Stop(`The server could not be built: ${words}`);
+  } finally {
+    // Else its helper process stays for as long as the product runs.
+    await stop();
   }
 }
 
@@ -82,16 +113,17 @@ async function buildClient(checkout) {
     env: { ...process.env, NODE_ENV: 'production' },
   });
   if (status === 0) return;
-  if (/ENOSPC/.test(tail)) throw new Stop('The disk is full while building the pages. Free about 500 MB and start again.');
+  if (/ENOSPC|no space left/i.test(tail)) throw new Stop('The disk is full while building the pages. Free about 500 MB and start again.');
   throw new Stop(`The pages could not be built:\n${tail.trim()}`);
 }
 
 /** A mark that changes with any file's name, size or time of writing.
- * @param {string} checkout @param {readonly string[]} places */
-function stampOf(checkout, places) {
+ * @param {string} checkout @param {readonly string[]} places @param {string} [except] folder that does not count */
+function stampOf(checkout, places, except) {
   const hash = createHash('sha256').update(process.version);
   for (const place of places) {
     for (const file of filesOf(join(checkout, place))) {
+      if (except && file.startsWith(`${except}/`)) continue;
       const { size, mtimeMs } = statSync(file);
       hash.update(`${file}\0${size}\0${mtimeMs}\n`);
     }

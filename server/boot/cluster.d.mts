@@ -13,6 +13,8 @@ export interface Cluster {
   readonly appUrl: string;
   /** Settles when the server has ended, for whatever reason. */
   readonly ended: Promise<void>;
+  /** After it ended by itself: a sentence for the reader. */
+  why(): string;
   /** Stops the server in order; resolves when it is gone. */
   stop(): Promise<void>;
 }
@@ -29,6 +31,8 @@ export function openCluster(options: {
   port?: number;
   /** PostgreSQL settings for this run only. */
   settings?: Record<string, string>;
+  /** Gives up starting. */
+  signal?: AbortSignal;
 }): Promise<Cluster>;
 /** Asks a server process to stop fast, then insists. */
 export function stopServer(pid: number): Promise<void>;

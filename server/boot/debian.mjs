@@ -20,6 +20,8 @@ export async function requirePackages(names, why, say) {
   if (!command) throw new Stop(`${why} is missing. Run this once, then start again:\n  sudo apt-get update && sudo ${order}`);
   say(`Installing ${why} from Debian (${missing.join(', ')}).`);
   const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' };
+  // Finishes what an installation that was cut off has left half done; does nothing otherwise.
+  await follow(command[0] ?? 'dpkg', [...command.slice(1), ...(command.length > 0 ? ['dpkg'] : []), '--configure', '-a'], { env });
   await aptGet(command, ['update'], env, order);
   await aptGet(command, order.split(' ').slice(1), env, order);
 }
@@ -35,6 +37,7 @@ async function aptGet(before, args, env, order) {
   const [program = '', ...rest] = [...before, 'apt-get', '-q', '-o', 'DPkg::Lock::Timeout=120', ...args];
   const { status, tail } = await follow(program, rest, { env });
   if (status === 0) return;
+  if (/Temporary failure resolving|Could not resolve|Could not connect|Unable to connect/.test(tail)) throw new Stop(`Debian's package server was not reached. Check the network and start again, or install by hand: ${order}`);
   const words = tail.trim().split('\n').slice(-4).join('\n  ');
   if (/No space left|not have enough free space/.test(tail)) throw new Stop(`The disk is full while installing from Debian. Free about 1 GB and start again.\n  ${words}`);
   throw new Stop(`Debian's package manager could not finish. Look at its words, put that right, and start again, or install by hand: ${order}\n  ${words}`);

@@ -11,7 +11,7 @@ import { freePort, isFree, nextFreePort } from './ports.mjs';
 import { findPostgres } from './postgres.mjs';
 import { follow } from './run.mjs';
 import { Stop } from './say.mjs';
-import { startLocalServices, startProgram, waitForServer } from './services.mjs';
+import { startLocalServices, startProgram, waitForServer, whyEnded } from './services.mjs';
 import { takeTurn } from './turn.mjs';
 
 const USUAL_PORT = 4173;
@@ -23,44 +23,52 @@ export async function requirePostgres(say) {
 }
 
 /** Starts the product.
- * @param {{ checkout: string, env: NodeJS.ProcessEnv, say: (line: string) => void }} options
+ * @param {{ checkout: string, env: NodeJS.ProcessEnv, say: (line: string) => void, signal: AbortSignal }} options
  * @returns {Promise<{ address: string, home: string, hasDemo: boolean, ended: Promise<string>, stop: () => Promise<void> }>} */
-export async function launch({ checkout, env, say }) {
+export async function launch({ checkout, env, say, signal }) {
   /** @type {(() => Promise<void> | void)[]} */
   const undo = [];
+  /** @type {import('./services.mjs').Running[]} */
+  const programs = [];
   const stop = async () => {
+    await Promise.all(programs.splice(0).map((each) => each.stop()));
     for (const step of undo.splice(0).reverse()) await step();
   };
   try {
-    const isProduction = env['NODE_ENV'] === 'production';
-    if (isProduction && !env['OIDC_ISSUER']) throw new Stop('OIDC_ISSUER is not set. In production the built-in sign-in is refused: name your identity service with OIDC_ISSUER, OIDC_CLIENT_ID and OIDC_CLIENT_SECRET.');
-    await requireNodePackages(checkout, say);
+    await requireNodePackages(checkout, say, signal);
+    signal.throwIfAborted();
     if (!env['DATABASE_URL']) await requirePostgres(say);
+    signal.throwIfAborted();
     const home = openHome(checkout, env['COLOPHON_DATA']);
     requireRoom(home, 100);
     const turn = takeTurn(home);
     undo.push(turn.release);
-    const stamps = await build(checkout, say);
+    const stamps = await build(checkout, say, signal);
+    // In production there is no stand-in: every fault is told before anything is made.
+    if (env['NODE_ENV'] === 'production') await checkConfiguration(checkout, { ...env, DATABASE_URL: env['DATABASE_URL'] || 'postgres://127.0.0.1/own' });
     const ports = await choosePorts(home, env, say);
-    const database = await openDatabase(home, env, say, undo);
+    const database = await openDatabase(home, env, { say, signal, undo });
+    signal.throwIfAborted();
     const secrets = openSecrets(home);
     const appUrl = env['APP_URL'] || `http://127.0.0.1:${ports.app}`;
-    const local = await openServices({ checkout, home, env, ports, secrets, appUrl, undo });
+    const local = await openServices({ checkout, home, env, ports, secrets, appUrl, programs, signal });
     const hasDemo = local.issuer !== undefined;
-    const serverEnv = { ...env, NODE_ENV: env['NODE_ENV'] || 'development', HOST: env['HOST'] || '127.0.0.1', PORT: String(ports.app), APP_URL: appUrl, ...database, ...local.env };
+    const serverEnv = { ...env, NODE_ENV: env['NODE_ENV'] || 'development', HOST: env['HOST'] || '127.0.0.1', PORT: String(ports.app), APP_URL: appUrl, ...database.env, ...local.env };
     await checkConfiguration(checkout, serverEnv);
-    await prepareDatabase({ checkout, home, env: { ...serverEnv, SEED_DEMO: hasDemo ? 'yes' : 'no' }, mark: `${stamps.server} ${serverEnv.OIDC_ISSUER} ${database.DATABASE_URL}`, say });
+    signal.throwIfAborted();
+    await prepareDatabase({ checkout, home, env: { ...serverEnv, SEED_DEMO: hasDemo ? 'yes' : 'no' }, mark: `${stamps.server} ${serverEnv.OIDC_ISSUER} ${database.env.DATABASE_URL}`, isOwn: database.cluster !== undefined, say });
+    signal.throwIfAborted();
     say('Starting the server.');
     // The server never learns the owner's password.
     const { DATABASE_OWNER_URL: _owner, ...appEnv } = serverEnv;
     const server = startProgram({ file: program(checkout, 'main'), cwd: checkout, log: join(home, 'server.log'), env: appEnv });
-    undo.push(server.stop);
-    await waitForServer(server, new URL(`http://${serverEnv.HOST === '0.0.0.0' ? '127.0.0.1' : serverEnv.HOST}:${ports.app}`));
+    programs.push(server);
+    await waitForServer(server, new URL(`http://${reachable(serverEnv.HOST)}:${ports.app}`), signal);
     turn.announce(appUrl);
     const ended = Promise.race([
-      server.ended.then(() => `The server ended by itself. Its last words are in ${join(home, 'server.log')}.`),
-      ...local.ended.map((each) => each.then(() => `The local stand-ins ended by themselves. Their last words are in ${join(home, 'services.log')}.`)),
-      ...(database.ended ? [database.ended.then(() => `The database ended by itself. Its last words are in ${join(home, 'postgres.log')}.`)] : []),
+      server.ended.then(() => whyEnded(server, join(home, 'server.log'))),
+      ...local.ended.map((each) => each.then(() => `The local stand-ins for sign-in, mail and files ended by themselves. Start again; their last words are in ${join(home, 'services.log')}.`)),
+      ...(database.cluster ? [database.cluster.ended.then(database.cluster.why)] : []),
     ]);
     return { address: appUrl, home, hasDemo, ended, stop };
   } catch (error) {
@@ -78,7 +86,7 @@ async function choosePorts(home, env, say) {
   if (env['PORT']) {
     app = Number(env['PORT']);
     if (!Number.isInteger(app) || app < 1 || app > 65_535) throw new Stop('PORT is not a port. Give a number from 1 to 65535.');
-    if (!(await isFree(app))) throw new Stop(`Port ${app} is taken by another program, or needs root. Set PORT to a free one and start again.`);
+    if (!(await isFree(app, env['HOST'] || undefined))) throw new Stop(`Port ${app} is taken by another program, or needs root. Set PORT to a free one and start again.`);
   } else {
     const usual = remembered('app') ?? USUAL_PORT;
     app = (await isFree(usual)) ? usual : await nextFreePort(USUAL_PORT);
@@ -89,14 +97,22 @@ async function choosePorts(home, env, say) {
   return chosen;
 }
 
-/** @param {string} home @param {NodeJS.ProcessEnv} env @param {(line: string) => void} say @param {(() => Promise<void> | void)[]} undo
- * @returns {Promise<{ DATABASE_URL: string, DATABASE_OWNER_URL: string, ended?: Promise<void> }>} */
-async function openDatabase(home, env, say, undo) {
+/** @param {string} home @param {NodeJS.ProcessEnv} env
+ * @param {{ say: (line: string) => void, signal: AbortSignal, undo: (() => Promise<void> | void)[] }} options
+ * @returns {Promise<{ env: { DATABASE_URL: string, DATABASE_OWNER_URL: string }, cluster?: import('./cluster.mjs').Cluster }>} */
+async function openDatabase(home, env, { say, signal, undo }) {
   const given = env['DATABASE_URL'];
-  if (given) return { DATABASE_URL: given, DATABASE_OWNER_URL: env['DATABASE_OWNER_URL'] || given };
-  const cluster = await openCluster({ home, say });
+  if (given) return { env: { DATABASE_URL: given, DATABASE_OWNER_URL: env['DATABASE_OWNER_URL'] || given } };
+  const cluster = await openCluster({ home, say, signal });
   undo.push(cluster.stop);
-  return Object.defineProperty({ DATABASE_URL: cluster.appUrl, DATABASE_OWNER_URL: cluster.ownerUrl }, 'ended', { value: cluster.ended, enumerable: false });
+  return { env: { DATABASE_URL: cluster.appUrl, DATABASE_OWNER_URL: cluster.ownerUrl }, cluster };
+}
+
+/** Where this machine reaches a server that listens on `host`. @param {string} host */
+function reachable(host) {
+  if (host === '0.0.0.0') return '127.0.0.1';
+  if (host === '::') return '[::1]';
+  return host.includes(':') ? `[${host}]` : host;
 }
 
 /** Generated once: what the product and its stand-ins know each other by. @param {string} home */
@@ -110,8 +126,8 @@ function openSecrets(home) {
 }
 
 /** Starts a stand-in for each service that is not given.
- * @param {{ checkout: string, home: string, env: NodeJS.ProcessEnv, ports: Record<string, number>, secrets: Record<string, string>, appUrl: string, undo: (() => Promise<void> | void)[] }} options */
-async function openServices({ checkout, home, env, ports, secrets, appUrl, undo }) {
+ * @param {{ checkout: string, home: string, env: NodeJS.ProcessEnv, ports: Record<string, number>, secrets: Record<string, string>, appUrl: string, programs: import('./services.mjs').Running[], signal: AbortSignal }} options */
+async function openServices({ checkout, home, env, ports, secrets, appUrl, programs, signal }) {
   const client = { OIDC_CLIENT_ID: 'colophon', OIDC_CLIENT_SECRET: secrets['client'] };
   const wish = {
     ...(env['OIDC_ISSUER'] ? {} : { identity: { port: ports['identity'], publicUrl: appUrl, clientId: client.OIDC_CLIENT_ID, clientSecret: client.OIDC_CLIENT_SECRET } }),
@@ -119,8 +135,8 @@ async function openServices({ checkout, home, env, ports, secrets, appUrl, undo 
     ...(env['S3_ENDPOINT'] ? {} : { storage: { port: ports['storage'], folder: join(home, 'files'), accessKeyId: secrets['accessKey'] } }),
   };
   if (env['NODE_ENV'] === 'production' || Object.keys(wish).length === 0) return { env: {}, issuer: undefined, ended: [] };
-  const started = await startLocalServices({ file: program(checkout, 'local'), checkout, home, wish: { ...wish, mode: env['NODE_ENV'] === 'test' ? 'test' : 'development' } });
-  undo.push(started.stop);
+  const started = await startLocalServices({ file: program(checkout, 'local'), checkout, home, wish: { ...wish, mode: env['NODE_ENV'] === 'test' ? 'test' : 'development' }, signal });
+  programs.push(started);
   const { identity, mail, storage } = started.urls;
   return {
     issuer: identity,
@@ -145,14 +161,16 @@ async function checkConfiguration(checkout, env) {
 }
 
 /** Migrates and seeds when the product, the database or the issuer is not the one of the last time.
- * @param {{ checkout: string, home: string, env: NodeJS.ProcessEnv, mark: string, say: (line: string) => void }} options */
-async function prepareDatabase({ checkout, home, env, mark, say }) {
+ * @param {{ checkout: string, home: string, env: NodeJS.ProcessEnv, mark: string, isOwn: boolean, say: (line: string) => void }} options */
+async function prepareDatabase({ checkout, home, env, mark, isOwn, say }) {
   const file = join(home, 'prepared.json');
-  if (readJson(file)?.['mark'] === mark) return;
-  for (const [name, words] of /** @type {const} */ ([['migrate', 'Bringing the tables up to date.'], ['seed', 'Filling the dictionary and the demonstration.']])) {
-    say(words);
-    const { status, tail } = await follow(process.execPath, ['--enable-source-maps', program(checkout, name)], { cwd: checkout, env });
-    if (status === 0) continue;
+  // Nobody else empties our own; what has happened to one from outside is asked of it at each start.
+  if (isOwn && readJson(file)?.['mark'] === mark) return;
+  say('Bringing the tables up to date, and filling the dictionary.');
+  const { status, tail } = await follow(process.execPath, ['--enable-source-maps', program(checkout, 'prepare')], { cwd: checkout, env });
+  if (status !== 0) {
+    const told = /^Colophon cannot start: ([^]*)$/m.exec(tail)?.[1];
+    if (told) throw new Stop(told.trim());
     if (/No space left|ENOSPC|53100/.test(tail)) throw new Stop('The disk is full while preparing the database. Free about 1 GB and start again; nothing that was saved is lost.');
     if (/ECONNREFUSED|ENOTFOUND|password authentication failed|no pg_hba/.test(tail)) throw new Stop(`The database of DATABASE_URL was not reached: ${tail.trim().split('\n')[0]}`);
     throw new Stop(`The database could not be prepared:\n${tail.trim()}`);

@@ -4,9 +4,17 @@ import { join } from 'node:path';
 import { readJson } from './home.mjs';
 import { follow } from './run.mjs';
 import { Stop } from './say.mjs';
+import { inCheckout } from './turn.mjs';
+
+/** @param {string} checkout @param {(line: string) => void} say @param {AbortSignal} [signal] */
+export async function requireNodePackages(checkout, say, signal) {
+  if (isInstalled(checkout)) return;
+  await inCheckout(checkout, say, () => install(checkout, say), signal);
+}
 
 /** @param {string} checkout @param {(line: string) => void} say */
-export async function requireNodePackages(checkout, say) {
+async function install(checkout, say) {
+  // Another start may have done it while we waited for it.
   if (isInstalled(checkout)) return;
   say('Installing the packages of the lockfile (about half a minute).');
   const { status, tail } = await follow('npm', ['ci', '--ignore-scripts', '--no-audit', '--no-fund'], { cwd: checkout, env: { ...process.env, NODE_ENV: 'development' } });
@@ -14,7 +22,7 @@ export async function requireNodePackages(checkout, say) {
   const words = tail.trim().split('\n').slice(-6).join('\n  ');
   if (/ENOSPC/.test(tail)) throw new Stop('The disk is full while installing packages. Free about 1 GB and start again.');
   if (/EACCES|EPERM/.test(tail)) throw new Stop(`This account may not write to ${checkout}. Start as the owner of that folder.`);
-  if (/ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ETIMEDOUT/.test(tail)) throw new Stop('The npm registry was not reached. Check the network and start again.');
+  if (/ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ECONNRESET|ETIMEDOUT|ENETUNREACH/.test(tail)) throw new Stop('The npm registry was not reached. Check the network and start again.');
   throw new Stop(`The packages could not be installed:\n  ${words}`);
 }
 

@@ -36,7 +36,7 @@ export async function nextFreePort(first, tries = 50) {
   return tryPort(0);
 }
 
-/** @param {number} port */
-export async function isFree(port) {
-  return (await tryPort(port)) === port;
+/** @param {number} port @param {string} [host] address that will listen on it */
+export async function isFree(port, host) {
+  return (await tryPort(port, host)) === port;
 }

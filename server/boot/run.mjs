@@ -17,6 +17,15 @@ export function run(command, args, options = {}) {
   };
 }
 
+/** Programs that follow() waits for at this moment.
+ * @type {Set<import('node:child_process').ChildProcess>} */
+const followed = new Set();
+
+/** Asks every program that is being followed to end: the reader wants to stop. */
+export function endFollowed() {
+  for (const child of followed) child.kill('SIGTERM');
+}
+
 /** Runs a program with its output shown, line by line, behind a margin.
  * @param {string} command
  * @param {readonly string[]} args
@@ -25,6 +34,7 @@ export function run(command, args, options = {}) {
 export function follow(command, args, { show, ...options } = {}) {
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, { stdio: ['ignore', 'pipe', 'pipe'], ...options });
+    followed.add(child);
     let tail = '';
     let line = '';
     const take = (/** @type {Buffer} */ chunk) => {
@@ -38,8 +48,14 @@ export function follow(command, args, { show, ...options } = {}) {
     };
     child.stdout.on('data', take);
     child.stderr.on('data', take);
-    child.on('error', reject);
-    child.on('close', (status) => resolve({ status, tail }));
+    child.on('error', (error) => {
+      followed.delete(child);
+      reject(error);
+    });
+    child.on('close', (status) => {
+      followed.delete(child);
+      resolve({ status, tail });
+    });
   });
 }
 

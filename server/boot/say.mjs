@@ -13,6 +13,9 @@ export class Stop extends Error {
   }
 }
 
+// Whoever read our words may leave before we do (a closed terminal, a pipe that ended): no reason to fail.
+for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {});
+
 /** @param {string} line */
 export function say(line) {
   process.stdout.write(`${line}\n`);

@@ -28,36 +28,47 @@ export function startProgram({ file, cwd, log, env }) {
     ended,
     words: () => readFileSync(log).subarray(from).toString('utf8').trim(),
     stop: async () => {
-      if (child.pid !== undefined && child.exitCode === null && child.signalCode === null) await endProcess(child.pid, [['SIGTERM', 10_000], ['SIGKILL', 2_000]]);
+      if (child.pid !== undefined && child.exitCode === null && child.signalCode === null) await endProcess(child.pid, [['SIGTERM', 3500], ['SIGKILL', 500]]);
     },
   };
 }
 
 /** Starts the stand-ins that are wished for.
- * @param {{ file: string, checkout: string, home: string, wish: Record<string, unknown> }} options
+ * @param {{ file: string, checkout: string, home: string, wish: Record<string, unknown>, signal?: AbortSignal }} options
  * @returns {Promise<Running & { urls: { identity?: string, mail?: string, storage?: string } }>} */
-export async function startLocalServices({ file, checkout, home, wish }) {
+export async function startLocalServices({ file, checkout, home, wish, signal }) {
   const running = startProgram({ file, cwd: checkout, log: join(home, 'services.log'), env: { PATH: process.env['PATH'], NODE_ENV: String(wish['mode']) } });
   running.child.send(wish);
   const answer = await Promise.race([
     new Promise((resolve) => running.child.once('message', resolve)),
     running.ended.then(() => ({ failed: running.words() })),
-    pause(30_000).then(() => ({ failed: 'no answer within half a minute' })),
+    answerless(signal),
   ]);
   if ('failed' in answer) {
     await running.stop();
+    signal?.throwIfAborted();
     throw new Stop(`The local stand-ins for sign-in, mail and files did not start: ${answer.failed}`);
   }
   return { ...running, urls: answer };
 }
 
+/** @param {AbortSignal | undefined} signal
+ * @returns {Promise<{ failed: string }>} */
+function answerless(signal) {
+  return new Promise((resolve) => {
+    const timer = setTimeout(() => resolve({ failed: 'no answer within half a minute' }), 30_000);
+    timer.unref();
+    signal?.addEventListener('abort', () => resolve({ failed: 'stopped' }), { once: true });
+  });
+}
+
 /** Waits until the server answers.
- * @param {Running} server @param {URL} address */
-export async function waitForServer(server, address) {
+ * @param {Running} server @param {URL} address @param {AbortSignal} [signal] gives up waiting */
+export async function waitForServer(server, address, signal) {
   const until = Date.now() + 60_000;
   let ended = false;
   void server.ended.then(() => (ended = true));
-  while (!ended && Date.now() < until) {
+  while (!ended && Date.now() < until && !signal?.aborted) {
     try {
       const answer = await fetch(new URL('/healthz', address), { signal: AbortSignal.timeout(2000) });
       if (answer.ok) return;
@@ -67,11 +78,22 @@ export async function waitForServer(server, address) {
     await pause(40);
   }
   await server.stop();
+  signal?.throwIfAborted();
   throw whyNot(server.words());
+}
+
+/** Why a server that ended by itself did so, as a sentence. @param {Running} server @param {string} record its file of words */
+export function whyEnded(server, record) {
+  const words = server.words();
+  if (/ENOSPC|No space left/.test(words)) return 'The server ended by itself: the disk is full. Free about 1 GB and start again; nothing that was saved is lost.';
+  return `The server ended by itself. Start again; its last words are in ${record}.`;
 }
 
 /** @param {string} words */
 function whyNot(words) {
+  // A fault that the server knows is told in its own sentence.
+  const told = /^Colophon cannot start: ([^]*)$/m.exec(words)?.[1];
+  if (told) return new Stop(told.trim());
   if (/EADDRINUSE/.test(words)) return new Stop('The port was taken by another program just now. Start again, or set PORT to a free one.');
   if (/ENOSPC|No space left/.test(words)) return new Stop('The disk is full. Free about 1 GB and start again; nothing that was saved is lost.');
   return new Stop(`The server did not start. Its last words:\n${words.split('\n').slice(-30).join('\n')}`);

@@ -5,6 +5,7 @@
 import { writeFileSync } from 'node:fs';
 import { CHECKOUT } from './home.mjs';
 import { launch } from './launch.mjs';
+import { endFollowed } from './run.mjs';
 import { explain, say } from './say.mjs';
 
 /** People of the demonstration, as server/local/demo-people.ts seeds them. */
@@ -13,6 +14,7 @@ const PEOPLE = ['Ines Tarrow, formulator', 'Maud Pellow, owner and formulator', 
 requireNode();
 const began = Date.now();
 let isStopping = false;
+const asked = new AbortController();
 /** @type {Awaited<ReturnType<typeof launch>> | undefined} */
 let running;
 
@@ -21,12 +23,14 @@ for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
     if (isStopping) return;
     isStopping = true;
     say('\nStopping.');
+    asked.abort();
+    endFollowed();
     if (running) void finish(0);
   });
 }
 
 try {
-  running = await launch({ checkout: CHECKOUT, env: process.env, say: (line) => isStopping || say(line) });
+  running = await launch({ checkout: CHECKOUT, env: process.env, say: (line) => isStopping || say(line), signal: asked.signal });
   if (isStopping) await finish(0);
   show(running);
   const why = await running.ended;
