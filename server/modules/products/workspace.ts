@@ -2,6 +2,7 @@ import type { z } from 'zod';
 import type { dictionaryEntry } from '#shared/contracts/dictionary.contract.ts';
 import type { ProductWorkspace } from '#shared/contracts/products.contract.ts';
 import type { Dictionary, DictionaryEntry } from '#shared/dictionary/types.ts';
+import { materialNames } from '#shared/product/material-names.ts';
 import type { Dossier } from './dossier.ts';
 
 const SUGGESTIONS = 5;
@@ -22,10 +23,7 @@ export function presentWorkspace({ product, materials }: Dossier, dictionary: Di
     const successor = entry.supersededBy === undefined ? undefined : dictionary.resolve(entry.supersededBy);
     if (successor) keep(successor.entry);
   };
-  for (const material of materials) {
-    for (const line of material.composition) look(line.inci, line.cas, true);
-    for (const line of material.constituents) look(line.name, line.cas, false);
-  }
+  for (const material of materials) for (const { name, cas, isListed } of materialNames(material)) look(name, cas, isListed);
   for (const { inci } of product.draft.mayContain) look(inci, undefined, true);
   return {
     product,

@@ -3,6 +3,7 @@ import { useQueryClient } from '@tanstack/react-query';
 import { resolveNames } from '#shared/contracts/dictionary.contract.ts';
 import { getMaterial, type Material } from '#shared/contracts/materials.contract.ts';
 import type { ProductWorkspace } from '#shared/contracts/products.contract.ts';
+import { materialNames } from '#shared/product/material-names.ts';
 import { call } from '#src/lib/api/call.ts';
 import type { Names } from './engine.ts';
 
@@ -36,7 +37,7 @@ export function useMaterialShelf(workspace: ProductWorkspace): MaterialShelf {
     [workspace.entries, workspace.unknown, workspace.dictionaryRelease, added.entries, added.unknown],
   );
   const put = useCallback(async (material: Material) => {
-    const written = [...material.composition.map((part) => ({ name: part.inci, cas: part.cas })), ...material.constituents.map((part) => ({ name: part.name, cas: part.cas }))];
+    const written = materialNames(material).map(({ name, cas }) => ({ name, cas }));
     const resolved = written.length > 0 ? (await call(resolveNames, { body: { names: written } })).items : [];
     setAdded((before) => ({
       materials: [...before.materials.filter((each) => each.id !== material.id), material],
