@@ -3,9 +3,10 @@ import type { LawBook } from '#shared/law/law-book.ts';
 import type { AllergenGroup, Exposure, Market } from '#shared/law/types.ts';
 import { compare, decimal, ONE, toDecimal, type Rational } from '#shared/kernel/rational.ts';
 import type { Blend, BlendedSubstance } from './blend.ts';
-import type { EntrySource } from './assessment.ts';
+import type { EntrySource, SourceShare } from './assessment.ts';
+import type { MixingPlan, PlannedSubstance } from './mixing-plan.ts';
 import type { PreparedPart } from './prepare-material.ts';
-import { sourcesOf } from './sources.ts';
+import { sharesOf, sourcesOf } from './sources.ts';
 import type { Finding, Interval } from './types.ts';
 
 /** One allergen group of a market, judged for the product. */
@@ -19,27 +20,39 @@ export interface AllergenVerdict {
   readonly citation: string;
   readonly substances: readonly BlendedSubstance[];
   readonly sources: readonly EntrySource[];
+  /** The same in short, as texts. */
+  readonly shares: readonly SourceShare[];
 }
 
 const ONCE: Rational = ONE;
 
-/** Which groups the product's substances belong to; the same for every market. */
+const groupings = new WeakMap<LawBook, WeakMap<MixingPlan, ReadonlyMap<AllergenGroup, readonly number[]>>>();
+
+/** Which groups the product's substances belong to; the same for every market and every amount. */
 export function groupAllergens(blend: Blend, law: LawBook): ReadonlyMap<AllergenGroup, readonly BlendedSubstance[]> {
-  const found = new Map<AllergenGroup, BlendedSubstance[]>();
-  for (const substance of blend.substances) {
+  let known = groupings.get(law);
+  if (!known) groupings.set(law, (known = new WeakMap()));
+  let places = known.get(blend.plan);
+  if (!places) known.set(blend.plan, (places = groupPlan(blend.plan, law)));
+  return new Map([...places].map(([group, list]) => [group, list.map((at) => blend.substances[at]!)]));
+}
+
+function groupPlan(plan: MixingPlan, law: LawBook): ReadonlyMap<AllergenGroup, readonly number[]> {
+  const found = new Map<AllergenGroup, number[]>();
+  for (const substance of plan.substances) {
     // One substance, one group: its own name decides before a shared number.
     const group = groupOf(substance, law);
     if (!group) continue;
     const list = found.get(group);
-    if (list) list.push(substance);
-    else found.set(group, [substance]);
+    if (list) list.push(substance.at);
+    else found.set(group, [substance.at]);
   }
   return found;
 }
 
 const groups = new WeakMap<LawBook, WeakMap<PreparedPart, AllergenGroup | null>>();
 
-function groupOf(substance: BlendedSubstance, law: LawBook): AllergenGroup | undefined {
+function groupOf(substance: PlannedSubstance, law: LawBook): AllergenGroup | undefined {
   let known = groups.get(law);
   if (!known) groups.set(law, (known = new WeakMap()));
   for (const { group } of substance.occurrences) {
@@ -90,6 +103,9 @@ export function judgeAllergens(
       ...(disclose && { certainty: isCertain ? ('certain' as const) : ('possible' as const) }),
       get sources() {
         return sourcesOf(blend, substances, 'all');
+      },
+      get shares() {
+        return sharesOf(blend, substances, 'all');
       },
     });
   }

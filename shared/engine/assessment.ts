@@ -35,9 +35,9 @@ export interface DeclarationEntry {
   readonly zone: Zone;
   readonly share: Interval;
   readonly sources: readonly EntrySource[];
-  readonly certainty?: 'certain' | 'possible';
+  readonly certainty?: 'certain' | 'possible' | undefined;
   /** INCI names printed together under this one. */
-  readonly members?: readonly string[];
+  readonly members?: readonly string[] | undefined;
   /** Why this name and this place, a sentence each. */
   readonly why: readonly string[];
   readonly citation: string;
@@ -45,6 +45,14 @@ export interface DeclarationEntry {
   readonly straddles: boolean;
   /** Substance keys in the blend; empty for shades that the formula itself does not hold. */
   readonly keys: readonly string[];
+  /** Each material's usual share as text, largest first: `sources` without the sums behind them. */
+  readonly shares: readonly SourceShare[];
+}
+
+/** What one material brings to an entry, in percent as an exact decimal text. */
+export interface SourceShare {
+  readonly material: string;
+  readonly share: string;
 }
 
 /** Two neighbours whose order some allowed composition turns round. */

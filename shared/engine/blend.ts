@@ -1,9 +1,13 @@
-import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
+import type { DocumentMaterial, FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { Dictionary } from '#shared/dictionary/types.ts';
-import type { Purpose } from '#shared/law/types.ts';
+import { SAFE_BELOW, toSafe, type Figure } from '#shared/kernel/figure.ts';
 import type { Rational } from '#shared/kernel/rational.ts';
+import type { Purpose } from '#shared/law/types.ts';
+import { FigureInterval } from './figure-interval.ts';
+import { lcm, planMixing, type MixingPlan, type Occurrence, type PlannedSubstance } from './mixing-plan.ts';
 import { leastOf, rangeOf, type Goal } from './optimum.ts';
-import { gcd, prepareMaterial, type Figures, type PreparedGroup, type PreparedMaterial, type PreparedPart, type Way } from './prepare-material.ts';
+import { prepareMaterial, type Figures, type PreparedMaterial, type PreparedPart, type Way } from './prepare-material.ts';
+import { slotFigures, type Slots } from './slot-figures.ts';
 import type { Interval, Mixture, Source, Substance } from './types.ts';
 import { weighLines, type WeighedLines } from './weigh-lines.ts';
 
@@ -17,14 +21,10 @@ export interface BlendedMaterial {
   readonly weight: bigint;
 }
 
-/** Where a substance comes from: one group of one material. */
-export interface Occurrence {
-  readonly at: number;
-  readonly group: PreparedGroup;
-}
-
 /** One substance, merged over all materials. */
 export interface BlendedSubstance extends Substance {
+  /** Its place among the blend's substances, and in the plan. */
+  readonly at: number;
   readonly occurrences: readonly Occurrence[];
   readonly first: PreparedPart;
 }
@@ -34,23 +34,23 @@ export interface BlendedSubstance extends Substance {
  * Shares are as added: the sum of the lines is the product.
  */
 export interface Blend extends Mixture {
+  readonly plan: MixingPlan;
   readonly weighed: WeighedLines;
   readonly den: bigint;
+  /** The same denominator as the figures of intervals have it. */
+  readonly figureDen: Figure;
   readonly materials: readonly BlendedMaterial[];
   readonly substances: readonly BlendedSubstance[];
   find(key: string): BlendedSubstance | undefined;
+  /** Bounds of one substance's share as an ingredient; `undefined` where it is none. */
+  asIngredient(at: number): FigureInterval | undefined;
   /** Bounds of what these substances add up to as ingredients. */
-  ingredientShare(keys: readonly string[]): Interval;
+  ingredientShare(keys: readonly string[]): FigureInterval;
   /** The least that `first` minus `second` can be, both as ingredients: negative where some composition turns them round. */
   leastLead(first: readonly string[], second: readonly string[]): Rational;
   share(figure: bigint): Rational;
-}
-
-interface Gathering {
-  key: string;
-  first: PreparedPart;
-  ways: Partial<Record<Way, { lo: bigint; typ: bigint; hi: bigint }>>;
-  occurrences: Occurrence[];
+  /** A share of a material's figure as text: `figure` over the material's own denominator. */
+  weightOf(at: number): Figure;
 }
 
 /**
@@ -58,66 +58,87 @@ interface Gathering {
  * uses, or that weigh nothing, take no part.
  */
 export function blendFormula(document: FormulaDocument, dictionary: Dictionary, weighed: WeighedLines = weighLines(document)): Blend {
-  const materials = blendMaterials(document, dictionary, weighed);
-  const common = materials.reduce((least, one) => lcm(least, one.prepared.den), 1n);
-  const den = weighed.total * common;
-  const weighted = materials.map((one): BlendedMaterial => ({ ...one, weight: one.mass * (common / one.prepared.den) }));
-  return new ExactBlend(weighed, den, weighted);
-}
-
-function blendMaterials(document: FormulaDocument, dictionary: Dictionary, weighed: WeighedLines): Omit<BlendedMaterial, 'weight'>[] {
-  const byId = new Map(document.materials.map((material) => [material.id, material]));
-  const used = new Map<string, { lines: number[]; mass: bigint }>();
+  const used = new Map<DocumentMaterial, { lines: number[]; mass: bigint }>();
+  const byId = materialsById(document.materials);
   document.formula.lines.forEach((line, index) => {
     const mass = weighed.masses[index]!;
-    if (mass === 0n) return;
-    const entry = used.get(line.material);
+    const material = mass === 0n ? undefined : byId.get(line.material);
+    if (!material) return;
+    const entry = used.get(material);
     if (entry) {
       entry.lines.push(index);
       entry.mass += mass;
-    } else used.set(line.material, { lines: [index], mass });
+    } else used.set(material, { lines: [index], mass });
   });
-  return [...used].flatMap(([id, { lines, mass }]) => {
-    const material = byId.get(id);
-    return material ? [{ prepared: prepareMaterial(material, dictionary), lines, mass }] : [];
-  });
+  const prepared: PreparedMaterial[] = [];
+  for (const material of used.keys()) prepared.push(prepareMaterial(material, dictionary));
+  const plan = planMixing(prepared);
+  const materials = [...used.values()].map(({ lines, mass }, at): BlendedMaterial => ({ prepared: prepared[at]!, lines, mass, weight: mass * plan.scales[at]! }));
+  return new ExactBlend(plan, weighed, materials);
 }
 
-function lcm(a: bigint, b: bigint): bigint {
-  if (a % b === 0n) return a;
-  return (a / gcd(a, b)) * b;
+const byIds = new WeakMap<readonly DocumentMaterial[], ReadonlyMap<string, DocumentMaterial>>();
+
+export function materialsById(materials: readonly DocumentMaterial[]): ReadonlyMap<string, DocumentMaterial> {
+  let found = byIds.get(materials);
+  if (!found) byIds.set(materials, (found = new Map(materials.map((material) => [material.id, material]))));
+  return found;
 }
 
 class ExactBlend implements Blend {
+  readonly plan: MixingPlan;
+  readonly shape: object;
   readonly weighed: WeighedLines;
   readonly den: bigint;
+  readonly figureDen: Figure;
   readonly materials: readonly BlendedMaterial[];
-  readonly substances: readonly BlendedSubstance[];
-  readonly #byKey = new Map<string, BlendedSubstance>();
+  readonly #weights: readonly Figure[];
+  readonly #slots: Slots;
+  readonly #intervals: (FigureInterval | undefined)[];
+  #substances: readonly MixedSubstance[] | undefined;
 
-  constructor(weighed: WeighedLines, den: bigint, materials: readonly BlendedMaterial[]) {
+  constructor(plan: MixingPlan, weighed: WeighedLines, materials: readonly BlendedMaterial[]) {
+    this.plan = plan;
+    this.shape = plan;
     this.weighed = weighed;
-    this.den = den === 0n ? 1n : den;
     this.materials = materials;
-    const substances: BlendedSubstance[] = [];
-    for (const gathering of gather(materials).values()) {
-      const substance = new MixedSubstance(this, gathering);
-      substances.push(substance);
-      this.#byKey.set(substance.key, substance);
-    }
-    this.substances = substances;
+    const den = weighed.total * plan.common;
+    this.den = den === 0n ? 1n : den;
+    // No figure of the product is larger than all greatest figures of all materials together.
+    let most = this.den;
+    materials.forEach(({ weight }, at) => (most += weight * plan.most[at]!));
+    const isSafe = plan.safe !== undefined && most < SAFE_BELOW;
+    this.figureDen = isSafe ? toSafe(this.den) : this.den;
+    this.#weights = materials.map(({ weight }) => (isSafe ? toSafe(weight) : weight));
+    this.#slots = slotFigures(plan, this.#weights, isSafe);
+    this.#intervals = [];
+  }
+
+  get substances(): readonly MixedSubstance[] {
+    return (this.#substances ??= this.plan.substances.map((planned) => new MixedSubstance(this, planned)));
   }
 
   find(key: string): BlendedSubstance | undefined {
-    return this.#byKey.get(key);
+    const at = this.plan.byKey.get(key);
+    return at === undefined ? undefined : this.substances[at];
   }
 
   share(figure: bigint): Rational {
     return { n: figure, d: this.den };
   }
 
-  interval(figures: Figures): Interval {
-    return { min: this.share(figures.lo), typical: this.share(figures.typ), max: this.share(figures.hi) };
+  weightOf(at: number): Figure {
+    return this.#weights[at]!;
+  }
+
+  /** The interval of a slot of the plan. */
+  slot(slot: number): FigureInterval {
+    return (this.#intervals[slot] ??= new FigureInterval(this.#slots.at(slot), this.figureDen));
+  }
+
+  asIngredient(at: number): FigureInterval | undefined {
+    const slot = this.plan.substances[at]!.slots.ingredient;
+    return slot === undefined ? undefined : this.slot(slot);
   }
 
   weigh(terms: readonly { readonly key: string; readonly weight: Rational }[]): Interval {
@@ -125,15 +146,16 @@ class ExactBlend implements Blend {
     for (const { weight } of terms) den = lcm(den, weight.d);
     const weights = new Map<string, bigint>();
     for (const { key, weight } of terms) weights.set(key, (weights.get(key) ?? 0n) + weight.n * (den / weight.d));
-    const sum = this.#total(weights, 'all', rangeOf);
-    const all = this.den * den;
-    return { min: { n: sum.lo, d: all }, typical: { n: sum.typ, d: all }, max: { n: sum.hi, d: all } };
+    return new FigureInterval(this.#total(weights, 'all', rangeOf), this.den * den);
   }
 
-  ingredientShare(keys: readonly string[]): Interval {
-    const only = keys.length === 1 ? this.find(keys[0]!)?.as.ingredient : undefined;
-    if (only) return only;
-    return this.interval(this.#total(new Map(keys.map((key) => [key, 1n])), 'ingredient', rangeOf));
+  ingredientShare(keys: readonly string[]): FigureInterval {
+    if (keys.length === 1) {
+      const at = this.plan.byKey.get(keys[0]!);
+      const only = at === undefined ? undefined : this.asIngredient(at);
+      if (only) return only;
+    }
+    return new FigureInterval(this.#total(new Map(keys.map((key) => [key, 1n])), 'ingredient', rangeOf), this.den);
   }
 
   leastLead(first: readonly string[], second: readonly string[]): Rational {
@@ -145,7 +167,10 @@ class ExactBlend implements Blend {
   /** Adds the optimum over each material that holds any of the substances: materials vary independently. */
   #total(weights: ReadonlyMap<string, bigint>, ways: Goal['ways'], optimum: typeof rangeOf): Figures {
     const touched = new Set<number>();
-    for (const key of weights.keys()) for (const { at } of this.find(key)?.occurrences ?? []) touched.add(at);
+    for (const key of weights.keys()) {
+      const at = this.plan.byKey.get(key);
+      if (at !== undefined) for (const one of this.plan.substances[at]!.occurrences) touched.add(one.at);
+    }
     let lo = 0n;
     let typ = 0n;
     let hi = 0n;
@@ -160,82 +185,71 @@ class ExactBlend implements Blend {
   }
 }
 
-function gather(materials: readonly BlendedMaterial[]): Map<string, Gathering> {
-  const found = new Map<string, Gathering>();
-  materials.forEach(({ prepared, weight }, at) => {
-    for (const group of prepared.groups) {
-      let gathering = found.get(group.key);
-      if (!gathering) found.set(group.key, (gathering = { key: group.key, first: group.parts[0]!, ways: {}, occurrences: [] }));
-      gathering.occurrences.push({ at, group });
-      const way = gathering.ways[group.way];
-      if (way) {
-        way.lo += weight * group.lo;
-        way.typ += weight * group.typ;
-        way.hi += weight * group.hi;
-      } else gathering.ways[group.way] = { lo: weight * group.lo, typ: weight * group.typ, hi: weight * group.hi };
-    }
-  });
-  return found;
-}
+const WAYS: readonly Way[] = ['ingredient', 'hidden', 'incidental'];
 
 class MixedSubstance implements BlendedSubstance {
+  readonly at: number;
   readonly key: string;
-  readonly first: PreparedPart;
-  readonly occurrences: readonly Occurrence[];
-  readonly as: Substance['as'];
+  readonly name: string;
   readonly #blend: ExactBlend;
+  readonly #planned: PlannedSubstance;
   #total: Interval | undefined;
-  #cas: readonly string[] | undefined;
-  #purposes: readonly Purpose[] | undefined;
+  #as: Substance['as'] | undefined;
 
-  constructor(blend: ExactBlend, { key, first, ways, occurrences }: Gathering) {
+  constructor(blend: ExactBlend, planned: PlannedSubstance) {
     this.#blend = blend;
-    this.key = key;
-    this.first = first;
-    this.occurrences = occurrences;
-    this.as = {
-      ...(ways.ingredient && { ingredient: blend.interval(ways.ingredient) }),
-      ...(ways.hidden && { hidden: blend.interval(ways.hidden) }),
-      ...(ways.incidental && { incidental: blend.interval(ways.incidental) }),
-    };
+    this.#planned = planned;
+    this.at = planned.at;
+    this.key = planned.key;
+    this.name = planned.name;
   }
 
-  get name(): string {
-    return this.first.inci;
-  }
   get nano(): boolean {
-    return this.first.isNano;
+    return this.#planned.nano;
   }
   get cas(): readonly string[] {
-    return (this.#cas ??= uniq(this.occurrences, (part) => part.cas));
+    return this.#planned.cas;
   }
   get purposes(): readonly Purpose[] {
-    return (this.#purposes ??= uniq(this.occurrences, (part) => (part.purpose ? [part.purpose] : [])));
+    return this.#planned.purposes;
+  }
+  get first(): PreparedPart {
+    return this.#planned.first;
+  }
+  get occurrences(): readonly Occurrence[] {
+    return this.#planned.occurrences;
+  }
+  get as(): Substance['as'] {
+    return (this.#as ??= this.#findWays());
   }
   get total(): Interval {
     return (this.#total ??= this.#findTotal());
   }
   get sources(): readonly Source[] {
-    const { materials, weighed } = this.#blend;
+    const { materials, weighed, den } = this.#blend;
     return this.occurrences.flatMap(({ at, group }) => {
       const { prepared, lines, mass, weight } = materials[at]!;
       return lines.map((line): Source => {
         // A line holds its part of the material's mass.
-        const part = (figure: bigint): Rational => ({ n: weight * figure * weighed.masses[line]!, d: this.#blend.den * mass });
+        const part = (figure: bigint): Rational => ({ n: weight * figure * weighed.masses[line]!, d: den * mass });
         return { materialId: prepared.material.id, line, share: { min: part(group.lo), typical: part(group.typ), max: part(group.hi) } };
       });
     });
   }
 
-  #findTotal(): Interval {
-    const ways = [this.as.ingredient, this.as.hidden, this.as.incidental].filter((one) => one !== undefined);
-    if (ways.length === 1) return ways[0]!;
-    return this.#blend.weigh([{ key: this.key, weight: { n: 1n, d: 1n } }]);
+  #findWays(): Substance['as'] {
+    const as: Partial<Record<Way, Interval>> = {};
+    for (const way of WAYS) {
+      const slot = this.#planned.slots[way];
+      if (slot !== undefined) as[way] = this.#blend.slot(slot);
+    }
+    return as;
   }
-}
 
-function uniq<T>(occurrences: readonly Occurrence[], of: (part: PreparedPart) => readonly T[]): readonly T[] {
-  const found = new Set<T>();
-  for (const { group } of occurrences) for (const part of group.parts) for (const one of of(part)) found.add(one);
-  return [...found];
+  #findTotal(): Interval {
+    const { ingredient, hidden, incidental } = this.#planned.slots;
+    const only = ingredient ?? hidden ?? incidental!;
+    const isOne = (ingredient === undefined ? 0 : 1) + (hidden === undefined ? 0 : 1) + (incidental === undefined ? 0 : 1) === 1;
+    return isOne ? this.#blend.slot(only) : this.#blend.weigh([{ key: this.key, weight: { n: 1n, d: 1n } }]);
+  }
 }

@@ -4,13 +4,14 @@ import { foldName } from '#shared/law/fold.ts';
 import type { Category, Market } from '#shared/law/types.ts';
 import { larger, smaller, ZERO, compare } from '#shared/kernel/rational.ts';
 import type { AllergenVerdict } from './allergens.ts';
-import type { Declaration, DeclarationEntry, UncertainPair, Zone } from './assessment.ts';
+import type { Declaration, DeclarationEntry, UncertainPair } from './assessment.ts';
 import type { Blend, BlendedSubstance } from './blend.ts';
 import { LIST_LAW, type ListLaw } from './list-law.ts';
 import { isColourant, printedName, type PrintedName } from './market-names.ts';
-import type { PreparedPart } from './prepare-material.ts';
+import { ListedEntry, placeReason, type Named } from './entry.ts';
+import type { MixingPlan, PlannedSubstance } from './mixing-plan.ts';
 import { settleName } from './resolve-name.ts';
-import { sourcesOf } from './sources.ts';
+import { sharesOf, sourcesOf } from './sources.ts';
 import type { Interval } from './types.ts';
 
 export interface DeclareInput {
@@ -23,13 +24,9 @@ export interface DeclareInput {
 }
 
 /** An entry in the making. */
-interface Draft {
-  name: string;
-  inci: string;
+interface Draft extends Named {
   substances: BlendedSubstance[];
   isColourant: boolean;
-  verdict?: AllergenVerdict;
-  why: string[];
 }
 
 /** A declared name that could be several, for a finding. */
@@ -40,29 +37,32 @@ export interface Ambiguity {
 
 /** Sets the ingredient list of one market: names, order, zones, allergens, colourants and shades. */
 export function declare(input: DeclareInput): { declaration: Declaration; ambiguities: readonly Ambiguity[] } {
-  const law = LIST_LAW[input.market];
+  const { blend, document, market } = input;
+  const law = LIST_LAW[market];
   const ambiguities: Ambiguity[] = [];
-  const drafts = draftEntries(input, law, ambiguities);
-  const zones: Record<'ordered' | 'free' | 'colourant', DeclarationEntry[]> = { ordered: [], free: [], colourant: [] };
-  for (const draft of drafts) {
-    const share = input.blend.ingredientShare(draft.substances.map(({ key }) => key));
-    const zone = draft.isColourant ? 'colourant' : law.isOrdered(share.typical) ? 'ordered' : 'free';
-    zones[zone].push(makeEntry(input.blend, law, draft, zone, share));
+  const ordered: ListedEntry[] = [];
+  const free: ListedEntry[] = [];
+  const colourants: ListedEntry[] = [];
+  for (const draft of draftEntries(input, law, ambiguities)) {
+    const { substances } = draft;
+    const share = substances.length === 1 ? blend.asIngredient(substances[0]!.at)! : blend.ingredientShare(substances.map(({ key }) => key));
+    const zone = draft.isColourant ? 'colourant' : law.isOrdered(share.typ, share.den) ? 'ordered' : 'free';
+    const entry = new ListedEntry(blend, law, draft, { zone, share, substances });
+    (zone === 'colourant' ? colourants : zone === 'ordered' ? ordered : free).push(entry);
   }
   const allergens = allergenEntries(input, law);
-  for (const list of [zones.ordered, zones.free, zones.colourant, allergens]) list.sort(byShare);
-  const chosen = input.document.declaration?.freeOrder?.[input.market] ?? [];
-  const free = arrange([...zones.free, ...allergens], chosen);
-  const colourants = arrange(zones.colourant, chosen);
-  const shades = shadeEntries(input, law, [...zones.ordered, ...free, ...colourants], ambiguities);
-  const listed = [...zones.ordered, ...free, ...colourants];
+  for (const list of [ordered, free, colourants]) list.sort(byShare);
+  allergens.sort(byExactShare);
+  const chosen = document.declaration?.freeOrder?.[market] ?? [];
+  const listed = [...ordered, ...arrange([...free, ...allergens], chosen), ...arrange(colourants, chosen)];
+  const shades = document.product.mayContain.length === 0 ? [] : shadeEntries(input, law, listed, ambiguities);
   const shadeText = shades.length > 0 ? law.mayContain(shades.map(({ name }) => name).join(', ')) : '';
   return {
     declaration: {
       heading: law.heading,
       text: `${law.heading}: ${listed.map(({ name }) => name).join(', ')}${listed.length === 0 ? shadeText.replace(/^[,.] /, '') : shadeText}`,
       entries: [...listed, ...shades],
-      uncertainPairs: findUncertainPairs(input.blend, zones.ordered),
+      uncertainPairs: findUncertainPairs(blend, ordered),
       freeLine: law.line,
       citation: law.citation,
     },
@@ -70,65 +70,74 @@ export function declare(input: DeclareInput): { declaration: Declaration; ambigu
   };
 }
 
-function draftEntries({ blend, market, document, category, allergens }: DeclareInput, law: ListLaw, ambiguities: Ambiguity[]): Draft[] {
-  const joined = document.declaration?.joinedNames ?? false;
-  const groupOf = law.usesGroupNames ? prescribedGroups(allergens) : new Map<BlendedSubstance, AllergenVerdict>();
-  const areHairColours = category.tags.includes('hair-dye');
+function draftEntries({ blend, market, document, category, allergens }: DeclareInput, law: ListLaw, ambiguities: Ambiguity[]): Iterable<Draft> {
+  const names = namesFor(blend.plan, { market, joined: document.declaration?.joinedNames ?? false, areHairColours: category.tags.includes('hair-dye') });
+  const groupOf = law.usesGroupNames ? prescribedGroups(allergens) : NO_GROUPS;
   const byName = new Map<string, Draft>();
-  for (const substance of blend.substances) {
-    const share = substance.as.ingredient;
-    if (!share || share.max.n <= 0n) continue;
+  const { substances } = blend;
+  for (let at = 0; at < substances.length; at += 1) {
+    const share = blend.asIngredient(at);
+    if (!share || share.hi <= 0) continue;
+    const substance = substances[at]!;
     const verdict = groupOf.get(substance);
-    const printed: PrintedName = verdict
-      ? { name: verdict.name, why: `The name that ${verdict.citation} prescribes for the group.` }
-      : nameFor(substance, market, joined);
-    if (printed.ambiguous) ambiguities.push({ inci: substance.name, names: printed.ambiguous });
-    const draft: Draft = {
-      name: printed.name,
-      inci: verdict ? verdict.name : substance.name,
-      substances: [substance],
-      isColourant: !areHairColours && isColourant(ingredientPurposes(substance), substance.first, hasPlainUse(substance)),
-      why: [printed.why],
-      ...(verdict && { verdict }),
-    };
+    const own = names[at]!;
+    if (own.ambiguous && !verdict) ambiguities.push({ inci: substance.name, names: own.ambiguous });
+    const name = verdict?.name ?? own.name;
     // The same printed name stands once: nano and plain forms in the US, several numbers under one US colour name.
-    const before = byName.get(printed.name);
-    if (!before) byName.set(printed.name, draft);
-    else {
+    const before = byName.get(name);
+    if (before) {
       before.substances.push(substance);
-      before.isColourant &&= draft.isColourant;
-    }
+      before.isColourant &&= own.isColourant;
+    } else if (verdict) {
+      byName.set(name, { name, inci: name, substances: [substance], isColourant: own.isColourant, why: `The name that ${verdict.citation} prescribes for the group.`, verdict });
+    } else byName.set(name, { name, inci: substance.name, substances: [substance], isColourant: own.isColourant, why: own.why });
   }
-  return [...byName.values()];
+  return byName.values();
 }
 
-const names = new WeakMap<PreparedPart, Map<string, PrintedName>>();
+const NO_GROUPS: ReadonlyMap<BlendedSubstance, AllergenVerdict> = new Map();
 
-/** The printed name, remembered with the part that a material brings. */
-function nameFor(substance: BlendedSubstance, market: Market, joined: boolean): PrintedName {
-  const { usName } = usNameOf(substance);
-  let known = names.get(substance.first);
-  if (!known) names.set(substance.first, (known = new Map()));
-  const id = `${market}${joined ? '+' : ''}${usName ?? ''}`;
+interface NameChoice {
+  readonly market: Market;
+  readonly joined: boolean;
+  readonly areHairColours: boolean;
+}
+
+type PlannedName = PrintedName & { readonly isColourant: boolean };
+
+const planned = new WeakMap<MixingPlan, Map<string, readonly PlannedName[]>>();
+
+/** The printed names of all substances, remembered with the plan: they do not depend on amounts. */
+function namesFor(plan: MixingPlan, { market, joined, areHairColours }: NameChoice): readonly PlannedName[] {
+  let known = planned.get(plan);
+  if (!known) planned.set(plan, (known = new Map()));
+  const id = `${market} ${joined} ${areHairColours}`;
   let found = known.get(id);
-  if (!found) known.set(id, (found = printedName({ ...naming(substance), ...(usName !== undefined && { usName }) }, market, joined)));
+  if (!found) {
+    found = plan.substances.map((substance) => ({
+      ...printedName(naming(substance), market, joined),
+      isColourant: !areHairColours && isColourant(ingredientPurposes(substance), substance.first, hasPlainUse(substance)),
+    }));
+    known.set(id, found);
+  }
   return found;
 }
 
-function naming(substance: BlendedSubstance): { inci: string; written: string; isNano: boolean; entry?: NonNullable<BlendedSubstance['first']['entry']>; usName?: string } {
-  const { inci, written, entry, usName } = substance.first;
+function naming(substance: PlannedSubstance): { inci: string; written: string; isNano: boolean; entry?: NonNullable<PlannedSubstance['first']['entry']>; usName?: string } {
+  const { inci, written, entry } = substance.first;
+  const usName = usNameOf(substance);
   return { inci, written, isNano: substance.nano, ...(entry && { entry }), ...(usName !== undefined && { usName }) };
 }
 
 /** A US colour name given with any of the materials. */
-function usNameOf(substance: BlendedSubstance): { usName?: string } {
+function usNameOf(substance: PlannedSubstance): string | undefined {
   for (const { group } of substance.occurrences) {
-    for (const { usName } of group.parts) if (usName !== undefined) return { usName };
+    for (const { usName } of group.parts) if (usName !== undefined) return usName;
   }
-  return {};
+  return undefined;
 }
 
-function ingredientPurposes(substance: BlendedSubstance): string[] {
+function ingredientPurposes(substance: PlannedSubstance): string[] {
   const found = new Set<string>();
   for (const { group } of substance.occurrences) {
     if (group.way === 'ingredient') for (const { purpose } of group.parts) if (purpose) found.add(purpose);
@@ -137,7 +146,7 @@ function ingredientPurposes(substance: BlendedSubstance): string[] {
 }
 
 /** Some of it is there without being said to colour. */
-function hasPlainUse(substance: BlendedSubstance): boolean {
+function hasPlainUse(substance: PlannedSubstance): boolean {
   if (/^CI \d/i.test(substance.name)) return false;
   return substance.occurrences.some(({ group }) => group.way === 'ingredient' && group.parts.some(({ purpose }) => purpose === undefined));
 }
@@ -154,43 +163,6 @@ function prescribedGroups(allergens: readonly AllergenVerdict[]): Map<BlendedSub
 
 function isListed(substance: BlendedSubstance): boolean {
   return substance.as.ingredient !== undefined && substance.as.ingredient.max.n > 0n;
-}
-
-function makeEntry(blend: Blend, law: ListLaw, draft: Draft, zone: Zone, share: Interval): DeclarationEntry {
-  const { substances, verdict } = draft;
-  const isOrdered = zone === 'ordered';
-  const straddles = zone !== 'colourant' && (isOrdered ? !law.isOrdered(share.min) : law.isOrdered(share.max));
-  const members = substances.map(({ name }) => name);
-  return {
-    name: draft.name,
-    inci: draft.inci,
-    zone,
-    share,
-    get sources() {
-      return sourcesOf(blend, substances, 'ingredient');
-    },
-    ...(verdict?.certainty && { certainty: verdict.certainty }),
-    ...((verdict || members.length > 1) && { members: [...new Set(members)] }),
-    why: [...draft.why, placeReason(zone, law)],
-    citation: verdict?.citation ?? law.citation,
-    straddles,
-    keys: substances.map(({ key }) => key),
-  };
-}
-
-function placeReason(zone: Zone, law: ListLaw): string {
-  switch (zone) {
-    case 'ordered':
-      return 'It stands in descending order of its share.';
-    case 'free':
-      return `It is ${law.line}, so it may stand in any order after the others.`;
-    case 'colourant':
-      return 'Colourants may close the list, whatever their share.';
-    case 'allergen':
-      return 'It is not an ingredient of its own: it comes inside other materials and has to be named.';
-    case 'may-contain':
-      return 'A colourant of other shades of the range.';
-  }
 }
 
 /** Disclosed allergens that are no ingredients of their own. */
@@ -212,6 +184,9 @@ function allergenEntry(blend: Blend, law: ListLaw, verdict: AllergenVerdict, nam
     share,
     get sources() {
       return sourcesOf(blend, substances, 'all');
+    },
+    get shares() {
+      return sharesOf(blend, substances, 'all');
     },
     certainty: verdict.certainty ?? 'possible',
     ...((members.length > 1 || members[0] !== name) && { members }),
@@ -235,20 +210,28 @@ function shadeEntries({ document, dictionary, market }: DeclareInput, law: ListL
     if (seen.has(printed.name)) return [];
     seen.add(printed.name);
     if (printed.ambiguous) ambiguities.push({ inci: settled.inci, names: printed.ambiguous });
-    return [{ name: printed.name, inci: settled.inci, zone: 'may-contain', share: none, sources: [], why: [printed.why, placeReason('may-contain', law)], citation: law.citation, straddles: false, keys: [] }];
+    return [{ name: printed.name, inci: settled.inci, zone: 'may-contain', share: none, sources: [], shares: [], why: [printed.why, placeReason('may-contain', law)], citation: law.citation, straddles: false, keys: [] }];
   });
 }
 
-/** Descending typical share, equal shares by label name. */
-function byShare(a: DeclarationEntry, b: DeclarationEntry): number {
-  const order = compare(b.share.typical, a.share.typical);
-  if (order !== 0) return order;
+/** Descending typical share, equal shares by label name; all over one denominator. */
+function byShare(a: ListedEntry, b: ListedEntry): number {
+  if (a.share.typ > b.share.typ) return -1;
+  if (a.share.typ < b.share.typ) return 1;
+  return byName(a, b);
+}
+
+function byExactShare(a: DeclarationEntry, b: DeclarationEntry): number {
+  return compare(b.share.typical, a.share.typical) || byName(a, b);
+}
+
+function byName(a: DeclarationEntry, b: DeclarationEntry): number {
   return a.name < b.name ? -1 : a.name > b.name ? 1 : 0;
 }
 
 /** Applies a chosen order: names that are not there are passed over, the rest follows as it was. */
-function arrange(entries: readonly DeclarationEntry[], chosen: readonly string[]): DeclarationEntry[] {
-  if (chosen.length === 0) return [...entries];
+function arrange(entries: readonly DeclarationEntry[], chosen: readonly string[]): readonly DeclarationEntry[] {
+  if (chosen.length === 0) return entries;
   const left = new Set(entries);
   const first: DeclarationEntry[] = [];
   for (const name of chosen) {
@@ -264,14 +247,17 @@ function arrange(entries: readonly DeclarationEntry[], chosen: readonly string[]
 }
 
 /** Neighbours of the ordered part that some allowed composition puts the other way round. */
-function findUncertainPairs(blend: Blend, ordered: readonly DeclarationEntry[]): UncertainPair[] {
-  return ordered.slice(1).flatMap((second, index) => {
-    const first = ordered[index]!;
+function findUncertainPairs(blend: Blend, ordered: readonly ListedEntry[]): UncertainPair[] {
+  const pairs: UncertainPair[] = [];
+  for (let index = 1; index < ordered.length; index += 1) {
+    const first = ordered[index - 1]!;
+    const second = ordered[index]!;
     // Ranges that do not overlap need no proof.
-    if (compare(first.share.min, second.share.max) >= 0) return [];
+    if (first.share.lo >= second.share.hi) continue;
     const lead = blend.leastLead(first.keys, second.keys);
-    if (lead.n >= 0n) return [];
+    if (lead.n >= 0n) continue;
     const overlap = { min: larger(first.share.min, second.share.min), max: smaller(first.share.max, second.share.max) };
-    return [{ first, second, overlap, byAtMost: { n: -lead.n, d: lead.d } }];
-  });
+    pairs.push({ first, second, overlap, byAtMost: { n: -lead.n, d: lead.d } });
+  }
+  return pairs;
 }

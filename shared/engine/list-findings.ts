@@ -4,11 +4,15 @@ import { isZero, toDecimal, type Rational } from '#shared/kernel/rational.ts';
 import type { Declaration, DeclarationEntry } from './assessment.ts';
 import type { Blend, BlendedSubstance } from './blend.ts';
 import type { Ambiguity } from './declare.ts';
+import { FigureInterval } from './figure-interval.ts';
 import { LIST_LAW } from './list-law.ts';
+import type { MixingPlan } from './mixing-plan.ts';
 import type { Finding, Interval } from './types.ts';
 
 /** An interval as decimal texts. */
-export function rangeText({ min, typical, max }: Interval): { min: string; typical: string; max: string } {
+export function rangeText(interval: Interval): { min: string; typical: string; max: string } {
+  if (interval instanceof FigureInterval) return interval.text;
+  const { min, typical, max } = interval;
   const text = toDecimal(typical);
   // Most shares are fixed: one text serves all three.
   return { min: isSame(min, typical) ? text : toDecimal(min), typical: text, max: isSame(max, typical) ? text : toDecimal(max) };
@@ -51,7 +55,8 @@ export function judgeCompositions(blend: Blend, citation: string): Finding[] {
 /** `unknown-ingredient` and `name-superseded`, for every name that would be listed. */
 export function judgeNames(blend: Blend, dictionary: Dictionary, market: Market): Finding[] {
   const { citation } = LIST_LAW[market];
-  return blend.substances.flatMap((substance): Finding[] => {
+  return spokenNames(blend.plan).flatMap((at): Finding[] => {
+    const substance = blend.substances[at]!;
     if (!substance.as.ingredient || isZero(substance.as.ingredient.max)) return [];
     const { entry } = substance.first;
     if (!entry) return [unknownFinding(substance, dictionary, citation)];
@@ -67,6 +72,18 @@ export function judgeNames(blend: Blend, dictionary: Dictionary, market: Market)
       suggestions: [entry.supersededBy],
     }];
   });
+}
+
+const spoken = new WeakMap<MixingPlan, readonly number[]>();
+
+/** Names that have something to be said of: unknown ones and former ones. */
+function spokenNames(plan: MixingPlan): readonly number[] {
+  let found = spoken.get(plan);
+  if (!found) {
+    found = plan.substances.filter(({ first, slots }) => slots.ingredient !== undefined && (!first.entry || first.entry.supersededBy !== undefined)).map(({ at }) => at);
+    spoken.set(plan, found);
+  }
+  return found;
 }
 
 function unknownFinding(substance: BlendedSubstance, dictionary: Dictionary, citation: string): Finding {

@@ -1,5 +1,5 @@
 import type { Market, Sourcing } from '#shared/law/types.ts';
-import { compare, ONE, type Rational } from '#shared/kernel/rational.ts';
+import type { Figure } from '#shared/kernel/figure.ts';
 
 /** What each market says on how the list is set out. */
 export interface ListLaw {
@@ -8,14 +8,17 @@ export interface ListLaw {
   readonly sourcing?: Exclude<Sourcing, 'official'>;
   /** The words for the line between the ordered and the free part. */
   readonly line: string;
-  readonly isOrdered: (share: Rational) => boolean;
+  /** Whether a share of `n / d` percent stands in the ordered part. */
+  readonly isOrdered: (n: Figure, d: Figure) => boolean;
+  /** Whether exactly 1 % is in the ordered part. */
+  readonly ordersOne: boolean;
   readonly usesGroupNames: boolean;
   readonly marksNano: boolean;
   readonly mayContain: (names: string) => string;
 }
 
-const isAtLeastOne = (share: Rational): boolean => compare(share, ONE) >= 0;
-const isOverOne = (share: Rational): boolean => compare(share, ONE) > 0;
+const isAtLeastOne = (n: Figure, d: Figure): boolean => n >= d;
+const isOverOne = (n: Figure, d: Figure): boolean => n > d;
 const bracketed = (names: string): string => `, [+/- ${names}]`;
 
 export const LIST_LAW: Readonly<Record<Market, ListLaw>> = {
@@ -24,6 +27,7 @@ export const LIST_LAW: Readonly<Record<Market, ListLaw>> = {
     citation: 'Regulation (EC) No 1223/2009, Article 19(1)(g)',
     line: 'below 1 %',
     isOrdered: isAtLeastOne,
+    ordersOne: true,
     usesGroupNames: true,
     marksNano: true,
     mayContain: bracketed,
@@ -34,6 +38,7 @@ export const LIST_LAW: Readonly<Record<Market, ListLaw>> = {
     sourcing: 'secondary',
     line: 'below 1 %',
     isOrdered: isAtLeastOne,
+    ordersOne: true,
     usesGroupNames: true,
     marksNano: true,
     mayContain: bracketed,
@@ -45,6 +50,7 @@ export const LIST_LAW: Readonly<Record<Market, ListLaw>> = {
     sourcing: 'secondary',
     line: '1 % or less',
     isOrdered: isOverOne,
+    ordersOne: false,
     usesGroupNames: false,
     marksNano: false,
     mayContain: (names) => `. May contain: ${names}`,
@@ -54,6 +60,7 @@ export const LIST_LAW: Readonly<Record<Market, ListLaw>> = {
     citation: 'Cosmetic Regulations, C.R.C., c. 869, s. 21.4',
     line: '1 % or less',
     isOrdered: isOverOne,
+    ordersOne: false,
     usesGroupNames: false,
     marksNano: false,
     mayContain: bracketed,

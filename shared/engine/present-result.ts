@@ -1,7 +1,7 @@
 import type { MarketResult, ResultDocument } from '#shared/contracts/result-document.ts';
 import { toDecimal } from '#shared/kernel/rational.ts';
 import type { AllergenVerdict } from './allergens.ts';
-import type { Assessment, DeclarationEntry, EntrySource, MarketAssessment } from './assessment.ts';
+import type { Assessment, DeclarationEntry, MarketAssessment } from './assessment.ts';
 import { rangeText } from './list-findings.ts';
 
 /**
@@ -36,14 +36,12 @@ function presentMarket(result: MarketAssessment, totalMass: string, withHeadroom
 }
 
 function presentEntry(entry: DeclarationEntry): MarketResult['declaration']['entries'][number] {
-  const share = rangeText(entry.share);
-  const { sources } = entry;
   return {
     name: entry.name,
     inci: entry.inci,
     zone: entry.zone,
-    share,
-    sources: sources.length === 1 && entry.zone !== 'allergen' ? [{ material: sources[0]!.materialId, share: share.typical }] : sources.map(presentSource),
+    share: rangeText(entry.share),
+    sources: [...entry.shares],
     ...(entry.certainty && { certainty: entry.certainty }),
     ...(entry.members && { members: [...entry.members] }),
   };
@@ -56,12 +54,8 @@ function presentAllergen(verdict: AllergenVerdict): MarketResult['allergens'][nu
     threshold: verdict.threshold,
     disclose: verdict.disclose,
     ...(verdict.certainty && { certainty: verdict.certainty }),
-    sources: verdict.sources.map(presentSource),
+    sources: [...verdict.shares],
     members: verdict.substances.map(({ name }) => name),
     citation: verdict.citation,
   };
-}
-
-function presentSource(source: EntrySource): { material: string; share: string } {
-  return { material: source.materialId, share: toDecimal(source.share.typical) };
 }

@@ -1,7 +1,8 @@
 import type { Rational } from '#shared/kernel/rational.ts';
-import type { EntrySource } from './assessment.ts';
+import { figureToDecimal, toSafe, type Figure } from '#shared/kernel/figure.ts';
+import type { EntrySource, SourceShare } from './assessment.ts';
 import type { Blend, BlendedSubstance } from './blend.ts';
-import type { Way } from './prepare-material.ts';
+import type { PreparedGroup, Way } from './prepare-material.ts';
 
 /** Where a set of substances comes from, one row for each material, largest share first. */
 export function sourcesOf(blend: Blend, substances: readonly BlendedSubstance[], ways: 'ingredient' | 'all'): EntrySource[] {
@@ -34,4 +35,30 @@ export function sourcesOf(blend: Blend, substances: readonly BlendedSubstance[],
     };
   });
   return rows.sort((a, b) => (a.share.typical.n > b.share.typical.n ? -1 : a.share.typical.n < b.share.typical.n ? 1 : 0));
+}
+
+const usual = new WeakMap<PreparedGroup, number>();
+
+/** A group's usual figure as a double; asked for only where the blend keeps its figures so. */
+function safeUsual(group: PreparedGroup): number {
+  let found = usual.get(group);
+  if (found === undefined) usual.set(group, (found = toSafe(group.typ)));
+  return found;
+}
+
+/** What each material brings, as text, largest first: the short form of {@link sourcesOf}. */
+export function sharesOf(blend: Blend, substances: readonly BlendedSubstance[], ways: 'ingredient' | 'all'): SourceShare[] {
+  const rows: { at: number; figure: Figure }[] = [];
+  for (const { occurrences } of substances) {
+    for (const { at, group } of occurrences) {
+      if (ways === 'ingredient' && group.way !== 'ingredient') continue;
+      const weight = blend.weightOf(at);
+      const figure: Figure = typeof weight === 'bigint' ? weight * group.typ : weight * safeUsual(group);
+      const known = occurrences.length === 1 && substances.length === 1 ? undefined : rows.find((row) => row.at === at);
+      if (known) known.figure = typeof figure === 'bigint' ? (known.figure as bigint) + figure : (known.figure as number) + figure;
+      else rows.push({ at, figure });
+    }
+  }
+  if (rows.length > 1) rows.sort((a, b) => (a.figure > b.figure ? -1 : a.figure < b.figure ? 1 : 0));
+  return rows.map(({ at, figure }) => ({ material: blend.materials[at]!.prepared.material.id, share: figureToDecimal(figure, blend.figureDen) }));
 }

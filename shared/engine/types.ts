@@ -49,6 +49,8 @@ export interface Substance {
 
 /** The product as a mixture of substances: what rules ask. */
 export interface Mixture {
+  /** The same object for mixtures of the same substances in the same order: what depends on these alone is remembered with it. */
+  readonly shape?: object;
   readonly substances: readonly Substance[];
   find(key: string): Substance | undefined;
   /**
