@@ -24,10 +24,11 @@ export function GlassBar({ onFind }: { onFind: () => void }) {
           {rooms.map((room) => <NavLink key={room.to} to={room.to} end={room.end}>{room.word}</NavLink>)}
         </nav>
         <div className="end">
-          <button type="button" className="find" aria-label="Find a name, INCI or CAS" aria-keyshortcuts="Control+K Meta+K" onClick={onFind}>
+          <button type="button" className="find" aria-keyshortcuts="Control+K Meta+K" onClick={onFind}>
             <Icon name="find" />
+            <span className="sr-only">Find</span>
             <span>Name, INCI or CAS</span>
-            <kbd>{isApple ? '⌘ K' : 'Ctrl K'}</kbd>
+            <kbd aria-hidden="true">{isApple ? '⌘ K' : 'Ctrl K'}</kbd>
           </button>
           <button type="button" className="plain" onClick={turn} aria-label={theme === 'dark' ? 'Turn to the light theme' : 'Turn to the dark theme'}>{theme === 'dark' ? 'Light' : 'Dark'}</button>
           <HouseMenu session={session} />

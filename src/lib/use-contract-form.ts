@@ -1,4 +1,4 @@
-import { useCallback, useMemo } from 'react';
+import { useCallback, useMemo, useRef } from 'react';
 import { useForm } from 'react-hook-form';
 import type { DefaultValues, FieldErrors, FieldPath, FieldValues, UseFormReturn } from 'react-hook-form';
 import type { z } from 'zod';
@@ -37,14 +37,18 @@ export function useContractForm<Fields extends FieldValues, Body extends z.ZodTy
 ): ContractForm<Fields, Body> {
   const { schema, toBody, toFieldPath, findFaults } = options;
   const place = useCallback((path: Path, fields: Fields) => (toFieldPath ? toFieldPath(path, fields) : join(path)), [toFieldPath]);
+  // A field left empty on the way to another is no fault before one asks to send: its message would
+  // also push the page from under the very press that left it.
+  const isAsked = useRef(false);
   const form = useForm<Fields>({
     defaultValues: options.defaultValues as DefaultValues<Fields>,
     mode: 'onTouched',
     resolver: (fields) => {
       const read = schema.safeParse(toBody ? toBody(fields) : fields);
-      const faults = read.success
+      const found = read.success
         ? (findFaults?.(read.data) ?? []).map((fault) => ({ at: place(pointerPath(fault.pointer), fields), message: fault.message }))
         : read.error.issues.map((issue) => ({ at: place(issue.path, fields), message: issue.message }));
+      const faults = isAsked.current ? found : found.filter(({ at }) => valueAt(fields, at) !== '');
       return faults.length === 0 ? { values: fields, errors: {} } : { values: {}, errors: nest(faults) as FieldErrors<Fields> };
     },
   });
@@ -62,17 +66,27 @@ export function useContractForm<Fields extends FieldValues, Body extends z.ZodTy
   );
 
   const submit = useCallback(
-    (send: (body: z.output<Body>) => Promise<unknown>) =>
-      form.handleSubmit(async (fields) => {
+    (send: (body: z.output<Body>) => Promise<unknown>) => {
+      const handle = form.handleSubmit(async (fields) => {
         try {
           await send(schema.parse(toBody ? toBody(fields as Fields) : fields));
+          isAsked.current = false;
         } catch (error) {
           if (!showIssues(error)) throw error;
         }
-      }),
+      });
+      return (event?: { preventDefault(): void }) => {
+        isAsked.current = true;
+        return handle(event as Parameters<typeof handle>[0]);
+      };
+    },
     [form, schema, toBody, showIssues],
   );
   return useMemo(() => ({ ...form, submit, showIssues }) as ContractForm<Fields, Body>, [form, submit, showIssues]);
+}
+
+function valueAt(fields: FieldValues, at: string): unknown {
+  return at.split('.').reduce<unknown>((here, key) => (typeof here === 'object' && here !== null ? (here as Record<string, unknown>)[key] : undefined), fields);
 }
 
 /** Errors as the form library nests them: `composition.2.inci` under its own keys. */

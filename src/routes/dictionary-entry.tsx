@@ -5,11 +5,16 @@ import { NotFoundScreen } from '#src/app/error-screens.tsx';
 import { paths } from '#src/app/paths.ts';
 import { EntrySheet } from '#src/features/dictionary/entry-sheet.tsx';
 import { dictionaryQueries } from '#src/features/dictionary/queries.ts';
+import { sessionQueries } from '#src/features/session/queries.ts';
 import { LinkButton } from '#src/ui/button.tsx';
 import { Deck } from '#src/ui/deck.tsx';
 import { Sheet } from '#src/ui/sheet.tsx';
 
-export const loader: PageLoader = (client, { params }) => client.ensureQueryData(dictionaryQueries.entry(params.inci!));
+export const loader: PageLoader = async (client, { params }) => {
+  // The names are sent in a body, so the session's token has to be there first.
+  await client.ensureQueryData(sessionQueries.current());
+  return client.ensureQueryData(dictionaryQueries.entry(params.inci!));
+};
 
 export function Component() {
   const { inci = '' } = useParams();

@@ -25,7 +25,7 @@ export interface ComboboxProps {
   readonly error?: string;
   readonly hint?: ReactNode;
   readonly inputRef?: Ref<HTMLInputElement>;
-  /** Shown in the list when nothing is found. */
+  /** Shown in the list when nothing is found; absent while the answer is on its way. */
   readonly none?: ReactNode;
   readonly className?: string;
 }
@@ -43,7 +43,8 @@ export function Combobox({ label, bare = false, value, onType, options, onChoose
       onInputChange={onType}
       items={options}
       allowsCustomValue
-      allowsEmptyCollection={none !== undefined && value !== ''}
+      // It opens with the first letter, before an answer is there: a list that waits for one would stay shut after a paste.
+      allowsEmptyCollection={value !== ''}
       menuTrigger="input"
       defaultFilter={everything}
       selectedKey={null}
@@ -58,7 +59,7 @@ export function Combobox({ label, bare = false, value, onType, options, onChoose
       {hint ? <span className="hint">{hint}</span> : null}
       {error ? <FieldFault id={errorId}>{error}</FieldFault> : null}
       <Popover className="popover" offset={4} maxHeight={360} placement="bottom start">
-        <ListBox className="options" renderEmptyState={() => <p className="option-note">{none}</p>}>
+        <ListBox className="options" renderEmptyState={() => <p className="option-note">{none ?? 'One moment'}</p>}>
           {(option: ComboboxOption) => (
             <ListBoxItem id={option.id} textValue={option.text} className="option">
               <span>{option.shown ?? option.text}</span>
