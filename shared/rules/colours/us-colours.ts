@@ -56,12 +56,25 @@ function usNames(context: Context): ReadonlyMap<string, string> {
 }
 
 function findColours(name: string, usName: string | undefined, context: Context): readonly UsColourJson[] {
-  const live = context.law.usColours.filter((one) => !one.from || hasBegun({ available: one.from.available as never }, context.days));
-  const asked = foldName(usName ?? name).replace(/lake$/, '');
-  const byName = live.filter((one) => [one.name, one.fullName, ...(one.otherNames ?? [])].some((known) => foldName(known) === asked));
+  const isLive = (one: UsColourJson): boolean => !one.from || hasBegun({ available: one.from.available as never }, context.days);
+  const byName = (indexOf(context.law.usColours).get(foldName(usName ?? name).replace(/lake$/, '')) ?? []).filter(isLive);
   if (byName.length > 0) return byName;
   const ci = /\d{5}/.exec(isColourIndexName(name) ? name : '')?.[0];
-  return ci ? live.filter((one) => one.ci.includes(ci)) : [];
+  return ci ? context.law.usColours.filter((one) => one.ci.includes(ci) && isLive(one)) : [];
+}
+
+const indexes = new WeakMap<readonly UsColourJson[], ReadonlyMap<string, readonly UsColourJson[]>>();
+
+/** The colours under each of their folded names. */
+function indexOf(colours: readonly UsColourJson[]): ReadonlyMap<string, readonly UsColourJson[]> {
+  const known = indexes.get(colours);
+  if (known) return known;
+  const made = new Map<string, UsColourJson[]>();
+  for (const colour of colours) {
+    for (const key of new Set([colour.name, colour.fullName, ...(colour.otherNames ?? [])].map(foldName))) made.set(key, [...(made.get(key) ?? []), colour]);
+  }
+  indexes.set(colours, made);
+  return made;
 }
 
 function judgeCandidates(substance: Substance, candidates: readonly UsColourJson[], context: Context): Finding[] {

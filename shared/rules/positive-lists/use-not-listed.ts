@@ -3,6 +3,7 @@ import { isInForce } from '#shared/law/as-at.ts';
 import type { LawRow, Purpose, RowList } from '#shared/law/types.ts';
 import type { Context } from '../context.ts';
 import { bindsPurpose, isColourIndexName } from '../substances/binding.ts';
+import { spokenOf } from '../substances/spoken-of.ts';
 
 const LISTS: readonly { readonly purpose: Purpose; readonly list: RowList; readonly annex: string; readonly noun: string }[] = [
   { purpose: 'colourant', list: 'colourant', annex: 'Annex IV', noun: 'colourants' },
@@ -19,7 +20,8 @@ export function judgePositiveLists(context: Context): Finding[] {
   const { market } = context.facts;
   if (market !== 'EU' && market !== 'UK') return [];
   const findings: Finding[] = [];
-  for (const substance of context.mixture.substances) {
+  for (const at of spokenOf(context.mixture, context.law).purposeful) {
+    const substance = context.mixture.substances[at]!;
     if (!substance.as.ingredient) continue;
     for (const list of LISTS) {
       if (isUsedAs(substance, list.purpose, context) && !isListed(substance, list.list, context)) findings.push(present(substance.name, list, context));

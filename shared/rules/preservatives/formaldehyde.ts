@@ -4,16 +4,12 @@ import type { Dates } from '#shared/law/types.ts';
 import type { Interval, Mixture, ProductFacts, Substance } from '#shared/engine/types.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { Context } from '../context.ts';
+import { spokenOf } from '../substances/spoken-of.ts';
 import type { DueWording } from '../wording/require-wording.ts';
 
 /** The releasers of Annex V that the product holds, with the weight of formaldehyde each percent could set free. */
 function findReleasers(mixture: Mixture, law: LawBook): { readonly substance: Substance; readonly times: string; readonly over: string }[] {
-  const found = [];
-  for (const substance of mixture.substances) {
-    const member = law.releaserFor(substance);
-    if (member?.factor) found.push({ substance, ...member.factor });
-  }
-  return found;
+  return spokenOf(mixture, law).releasers.map(({ at, factor }) => ({ substance: mixture.substances[at]!, ...factor }));
 }
 
 /**

@@ -1,4 +1,4 @@
-import type { Finding, Substance } from '#shared/engine/types.ts';
+import type { Finding, Mixture, Substance } from '#shared/engine/types.ts';
 import { foldName } from '#shared/law/fold.ts';
 import type { Context } from '../context.ts';
 
@@ -11,8 +11,8 @@ import type { Context } from '../context.ts';
 export function judgeIsothiazolinones(context: Context): Finding[] {
   const { market } = context.facts;
   if (market !== 'EU' && market !== 'UK') return [];
-  const chloro = find(context, 'Methylchloroisothiazolinone');
-  const plain = chloro && find(context, 'Methylisothiazolinone');
+  const chloro = find(context.mixture, 'Methylchloroisothiazolinone');
+  const plain = chloro && find(context.mixture, 'Methylisothiazolinone');
   if (!chloro || !plain) return [];
   const withChloro = new Set(chloro.sources.map((source) => source.materialId));
   const alone = plain.sources.filter((source) => !withChloro.has(source.materialId));
@@ -33,7 +33,7 @@ export function judgeIsothiazolinones(context: Context): Finding[] {
   ];
 }
 
-/** A name of the same length is folded and compared; most are told apart by their length alone. */
-function find(context: Context, name: string): Substance | undefined {
-  return context.mixture.substances.find((one) => one.name.length === name.length && foldName(one.name) === foldName(name));
+/** Substances merge under their folded names. */
+function find(mixture: Mixture, name: string): Substance | undefined {
+  return mixture.find(foldName(name));
 }
