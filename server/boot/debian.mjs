@@ -17,7 +17,7 @@ export async function requirePackages(names, why, say) {
   const order = `apt-get install -y --no-install-recommends ${missing.join(' ')}`;
   const command = rootCommand();
   if (run('apt-get', ['--version']).missing) throw new Stop(`${why} is missing, and this is no Debian system. Install the like of these packages and start again: ${missing.join(', ')}.`);
-  if (!command) throw new Stop(`${why} is missing. Run this once, then start again:\n  sudo apt-get update && sudo ${order}`);
+  if (!command) throw new Stop(`${why} is missing, and this account may not install it. Run this once as root, then start again:\n  apt-get update && ${order}`);
   say(`Installing ${why} from Debian (${missing.join(', ')}).`);
   const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' };
   // Finishes what an installation that was cut off has left half done; does nothing otherwise.

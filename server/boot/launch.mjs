@@ -35,9 +35,10 @@ export async function launch({ checkout, env, say, signal }) {
     for (const step of undo.splice(0).reverse()) await step();
   };
   try {
-    await requireNodePackages(checkout, say, signal);
-    signal.throwIfAborted();
+    // First what may have to be said at once to an account that may not install it.
     if (!env['DATABASE_URL']) await requirePostgres(say);
+    signal.throwIfAborted();
+    await requireNodePackages(checkout, say, signal);
     signal.throwIfAborted();
     const home = openHome(checkout, env['COLOPHON_DATA']);
     requireRoom(home, 100);
