@@ -1,0 +1,130 @@
+import type { ReadingDocument } from '#shared/contracts/reading-document.ts';
+import type { Finding, Severity } from '#shared/engine/types.ts';
+import { foldName } from '#shared/law/fold.ts';
+import { add, HUNDRED, smaller, toDecimal, ZERO } from '#shared/kernel/rational.ts';
+import { boundShares, type Bounds, type Place } from './bound-shares.ts';
+import { findCap, type Cap } from './find-cap.ts';
+import { judgeImpossible, judgeList, judgeNames, judgePlaces } from './judge-list.ts';
+import { isColourant, type ListName, type ReadingOptions } from './list-facts.ts';
+import { matchName, type MatchedName } from './match-name.ts';
+import { splitList } from './split-list.ts';
+
+/** Longest text and longest list that are read; both far beyond any label. */
+export const LONGEST_TEXT = 200_000;
+export const MOST_NAMES = 500;
+
+/** A pasted list, read: or why it cannot be. */
+export type Reading = { readonly document: ReadingDocument } | { readonly mistake: string };
+
+/**
+ * Reads a pasted ingredient list: its names, the exact bounds on each one's share, and what
+ * the market's rules say as far as a list goes. Pure; shares in percent as exact decimals.
+ */
+export function readList(text: string, options: ReadingOptions): Reading {
+  if (text.length > LONGEST_TEXT) return { mistake: `The text is longer than ${LONGEST_TEXT} letters.` };
+  const names = recognise(text, options);
+  if (names.length === 0) return { mistake: 'The text holds no ingredient names.' };
+  if (names.length > MOST_NAMES) return { mistake: `The text holds more than ${MOST_NAMES} names.` };
+  const { boundsOf, impossible, caps } = findBounds(names, options);
+  const findings = [...impossible, ...judgeList(names, boundsOf, options), ...judgePlaces(names, boundsOf, options), ...judgeNames(names, options)];
+  return {
+    document: {
+      document: 'reading/1',
+      dataRelease: `law ${options.law.release}, dictionary ${options.dictionary.release}`,
+      market: options.market,
+      category: options.category.slug,
+      entries: names.map(({ written, entry, match, suggestions }) => ({ written, inci: entry?.inci ?? null, match, suggestions: [...suggestions] })),
+      bounds: presentBounds(names, boundsOf, impossible.length > 0 ? new Map() : caps),
+      findings: byWeight(distinct(findings)),
+    },
+  };
+}
+
+function recognise(text: string, { dictionary }: ReadingOptions): ListName[] {
+  const known = new Map<string, MatchedName>();
+  const match = (name: string): MatchedName => {
+    let found = known.get(name);
+    if (!found) known.set(name, (found = matchName(name, dictionary)));
+    return found;
+  };
+  const written = splitList(text, (name) => dictionary.resolve(name)?.entry.inci);
+  return written.map((one) => {
+    const matched = match(one.written);
+    return { ...one, ...matched, name: matched.entry?.inci ?? one.written, isColourant: isColourant(matched.entry, one.written) };
+  });
+}
+
+/** Words for a scent or a flavour, which Canada lets close the list. */
+const SCENT = ['parfum', 'aroma', 'fragrance', 'flavor'];
+const isScent = (one: ListName): boolean => SCENT.includes(foldName(one.name));
+const isAllergen = (one: ListName): boolean => one.entry !== undefined && one.entry.properties.includes('fragrance-allergen') && !one.entry.properties.includes('botanical');
+const carriesScent = (one: ListName): boolean => isScent(one) || (one.entry?.properties.includes('botanical') ?? false);
+
+/** Where order binds: what closes the list by right does not take part in it. */
+function placesOf(names: readonly ListName[], caps: ReadonlyMap<ListName, Cap>, { market, category }: ReadingOptions): Place[] {
+  const isHairDye = category.tags.includes('hair-dye');
+  const hasCarrier = names.some(carriesScent);
+  const list = names.filter((one) => one.block === 'list' && !one.isInside);
+  let end = list.length;
+  while (end > 0 && !isHairDye && list[end - 1]!.isColourant) end -= 1;
+  const closing = new Set(list.slice(end));
+  // A list of colourants alone is in order like any other.
+  if (closing.size === list.length) closing.clear();
+  if (market === 'CA') for (let at = end - 1; at > 0 && (isScent(list[at]!) || isAllergen(list[at]!)); at -= 1) if (isScent(list[at]!)) closing.add(list[at]!);
+  return names.map((one) => {
+    const cap = caps.get(one)?.share;
+    const isLoose = one.block !== 'list' || one.isInside || closing.has(one);
+    const isPartOfOther = one.isInside || one.block === 'may-contain' || (hasCarrier && isAllergen(one));
+    return { kind: isLoose ? 'loose' : 'ordered', ...(cap && { cap }), ...(isPartOfOther && { isPartOfOther }) };
+  });
+}
+
+interface Found {
+  readonly boundsOf: ReadonlyMap<ListName, Bounds>;
+  readonly impossible: readonly Finding[];
+  readonly caps: ReadonlyMap<ListName, Cap>;
+}
+
+function findBounds(names: readonly ListName[], options: ReadingOptions): Found {
+  const caps = new Map<ListName, Cap>();
+  for (const one of names) {
+    const cap = one.block === 'may-contain' ? undefined : findCap(one, names, options);
+    if (cap) caps.set(one, cap);
+  }
+  const asMap = (bounds: readonly Bounds[]): Map<ListName, Bounds> => new Map(names.map((one, index) => [one, bounds[index]!]));
+  const bounds = boundShares(placesOf(names, caps, options));
+  if (bounds) return { boundsOf: asMap(bounds), impossible: [], caps };
+  const culprits = [...caps].flatMap(([name, cap]) => {
+    const without = new Map([...caps].filter(([other]) => other !== name));
+    const min = boundShares(placesOf(names, without, options))?.[names.indexOf(name)]?.min;
+    return min ? [{ name, cap, min }] : [];
+  });
+  // What remains without the caps is the order alone; a list of nothing but shades has not even that.
+  const plain = boundShares(placesOf(names, new Map(), options)) ?? names.map(() => ({ min: ZERO, max: HUNDRED }));
+  return { boundsOf: asMap(plain), impossible: judgeImpossible(culprits, options), caps };
+}
+
+/** One line for each ingredient: a name that stands twice adds up, and its cap holds for both together. */
+function presentBounds(names: readonly ListName[], boundsOf: ReadonlyMap<ListName, Bounds>, caps: ReadonlyMap<ListName, Cap>): ReadingDocument['bounds'] {
+  const byName = new Map<string, Bounds>();
+  for (const one of names) {
+    const bounds = boundsOf.get(one)!;
+    const known = byName.get(one.name);
+    byName.set(one.name, known ? { min: add(known.min, bounds.min), max: smaller(caps.get(one)?.share ?? HUNDRED, add(known.max, bounds.max)) } : bounds);
+  }
+  return [...byName].map(([inci, { min, max }]) => ({ inci, min: toDecimal(min), max: toDecimal(max) }));
+}
+
+/** One finding of a kind for each subject and rule, as an ingredient may stand twice. */
+function distinct(findings: readonly Finding[]): Finding[] {
+  const seen = new Set<string>();
+  return findings.filter((one) => {
+    const id = `${one.kind} ${one.rule} ${one.subject}`;
+    return !seen.has(id) && seen.add(id);
+  });
+}
+
+const WEIGHTS: readonly Severity[] = ['stop', 'decide', 'note'];
+function byWeight(findings: readonly Finding[]): ReadingDocument['findings'] {
+  return WEIGHTS.flatMap((severity) => findings.filter((finding) => finding.severity === severity)).map((one) => ({ ...one }));
+}
