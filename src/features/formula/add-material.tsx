@@ -21,6 +21,11 @@ function toOption(item: MaterialSummary, typed: string): ComboboxOption {
   return { id: item.id, text: item.tradeName, shown: <Lit text={item.tradeName} typed={typed} />, under: names, side: item.supplier };
 }
 
+function isTypedOn(key: readonly unknown[] | undefined, find: string): boolean {
+  const { find: before = '' } = (key?.[2] ?? {}) as { find?: string };
+  return before !== '' && find.startsWith(before);
+}
+
 /** Finds one of the house's materials by trade name, INCI or CAS; Enter adds it as the next line. */
 export function AddMaterial({ onChoose, onNew, onPaste, inputRef }: AddMaterialProps) {
   const [typed, setTyped] = useState('');
@@ -29,7 +34,8 @@ export function AddMaterial({ onChoose, onNew, onPaste, inputRef }: AddMaterialP
     queryKey: ['materials', 'list', { find }],
     queryFn: ({ signal }) => call(listMaterials, { query: { find } }, signal),
     enabled: find !== '',
-    placeholderData: (before) => before,
+    // What an earlier word found may stand only while that word is being typed on: Enter must never take another's material.
+    placeholderData: (before, query) => (isTypedOn(query?.queryKey, find) ? before : undefined),
   });
   const found = find === '' ? [] : (data?.items ?? []).slice(0, 8).map((item) => toOption(item, find));
   const options: ComboboxOption[] = find === '' ? [] : [...found, { id: NEW, text: find, shown: <>New material “{find}”</>, under: 'Add it here, complete its composition later' }];

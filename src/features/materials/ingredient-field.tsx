@@ -1,5 +1,5 @@
 import { memo, useMemo } from 'react';
-import { keepPreviousData, useQuery } from '@tanstack/react-query';
+import { useQuery } from '@tanstack/react-query';
 import { useController, useFormContext } from 'react-hook-form';
 import type { z } from 'zod';
 import type { dictionaryEntry } from '#shared/contracts/dictionary.contract.ts';
@@ -21,14 +21,15 @@ export interface IngredientFieldProps {
 
 /**
  * A name found as it is typed. Each keystroke asks at once and drops the question before it:
- * waiting would be felt. The list keeps what it shows until the next answer is there.
+ * waiting would be felt. The list keeps what it shows until the next answer is there, as long as the
+ * word is only typed on: Enter must never take what another word had found.
  */
 export const IngredientField = memo(function IngredientField({ name, label, onChoose, placeholder }: IngredientFieldProps) {
   const { control } = useFormContext();
   const { field, fieldState } = useController({ control, name });
   const typed = String(field.value ?? '');
   const asked = fieldState.isDirty || fieldState.isTouched ? typed.trim() : '';
-  const { data, isFetching } = useQuery({ ...ingredientQueries.search(asked), placeholderData: keepPreviousData });
+  const { data, isFetching } = useQuery({ ...ingredientQueries.search(asked), placeholderData: (before, query) => (isTypedOn(query?.queryKey[2], asked) ? before : undefined) });
   const items = useMemo(() => (asked === '' ? [] : (data?.items ?? [])), [asked, data]);
   const options = useMemo(() => items.map((item) => optionOf(item.entry, item.by === 'inci' ? '' : item.matched, asked)), [items, asked]);
   return (
@@ -52,6 +53,10 @@ export const IngredientField = memo(function IngredientField({ name, label, onCh
     />
   );
 });
+
+function isTypedOn(before: string | undefined, asked: string): boolean {
+  return before !== undefined && before !== '' && asked.startsWith(before);
+}
 
 function optionOf(entry: Entry, matched: string, typed: string): ComboboxOption {
   return {
