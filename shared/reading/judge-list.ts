@@ -1,10 +1,10 @@
 import type { Finding, FindingKind, Interval } from '#shared/engine/types.ts';
 import { LIST_LAW } from '#shared/engine/list-law.ts';
-import { compare, ONE, toDecimal, type Rational } from '#shared/kernel/rational.ts';
+import { toDecimal, type Rational } from '#shared/kernel/rational.ts';
 import { judgeLaw } from '#shared/rules/judge-law.ts';
 import type { Bounds } from './bound-shares.ts';
 import type { Cap } from './find-cap.ts';
-import { asDocument, asMixture, asSubstance, factsOf, type ListName, type ReadingOptions } from './list-facts.ts';
+import { asDocument, asMixture, asSubstance, carriesScent, factsOf, isAllergen, type ListName, type ReadingOptions } from './list-facts.ts';
 
 /** What a list alone can settle; limits that only perhaps are exceeded say nothing without the formula. */
 const SETTLED: readonly FindingKind[] = ['prohibited', 'not-for-this-use', 'use-not-listed', 'wording-required', 'may-contain-misplaced', 'limit-exceeded'];
@@ -42,21 +42,20 @@ export function judgeNames(names: readonly ListName[], { market }: ReadingOption
   });
 }
 
-const fragrant = (one: ListName): boolean => one.entry !== undefined && one.entry.properties.includes('fragrance-allergen') && !one.entry.properties.includes('botanical');
-
 /** Names that stand where the order of the list cannot have them. */
-export function judgePlaces(names: readonly ListName[], boundsOf: ReadonlyMap<ListName, Bounds>, options: ReadingOptions): Finding[] {
+export function judgePlaces(names: readonly ListName[], options: ReadingOptions): Finding[] {
   const { citation } = LIST_LAW[options.market];
   const list = names.filter((one) => one.block === 'list' && !one.isInside);
   const last = list.findLastIndex((one) => !one.isColourant);
   const isHairDye = options.category.tags.includes('hair-dye');
   return list.flatMap((one, index): Finding[] => {
     const min = boundsOf.get(one)!.min;
-    if (fragrant(one) && compare(min, ONE) >= 0 && index > 0) {
+    const carrier = isAllergen(one) && !list.slice(0, index).some(carriesScent) ? list.slice(index + 1).find(carriesScent) : undefined;
+    if (carrier) {
       return [{
-        kind: 'order-uncertain', severity: 'decide', rule: 'list-order', subject: one.name, measured: toDecimal(min), unit: '%', citation, certainty: 'possible',
-        message: `${one.name} stands where only names of at least ${toDecimal(min, 2)} % may stand; an allergen of a perfume is hardly ever so much.`,
-        remedy: 'Put allergens after the ordered part of the list.',
+        kind: 'order-uncertain', severity: 'decide', rule: 'list-order', subject: one.name, members: [one.name, carrier.name], citation, certainty: 'possible',
+        message: `${one.name} stands before ${carrier.name}, which brings it. That is right only where both are in the part of the list without order.`,
+        remedy: 'Check its share, or put it after the ordered part of the list.',
       }];
     }
     if (one.isColourant && !isHairDye && index < last && !names.some((other) => other.block === 'active')) {

@@ -30,6 +30,14 @@ export function isColourant(entry: DictionaryEntry | undefined, written: string)
   return (entry?.properties.includes('colourant') ?? false) || /^c\.?\s?i\.?\s?\d{5}/i.test(entry?.inci ?? written);
 }
 
+/** Words for a scent or a flavour, which Canada lets close the list. */
+const SCENT = ['parfum', 'aroma', 'fragrance', 'flavor'];
+export const isScent = (one: Pick<ListName, 'name'>): boolean => SCENT.includes(foldName(one.name));
+/** A fragrance allergen named on its own, not an oil or extract. */
+export const isAllergen = (one: ListName): boolean => one.entry !== undefined && one.entry.properties.includes('fragrance-allergen') && !one.entry.properties.includes('botanical');
+/** What can bring fragrance allergens: a perfume, a flavour, anything of a plant. */
+export const carriesScent = (one: ListName): boolean => isScent(one) || (one.entry?.properties.includes('botanical') ?? false);
+
 /** What rules know of a product of which only the list is known: its category's own answers. */
 export function factsOf({ market, category, placedOnMarket, availableOn }: ReadingOptions): ProductFacts {
   const flags = category.flags;

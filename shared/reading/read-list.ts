@@ -1,11 +1,10 @@
 import type { ReadingDocument } from '#shared/contracts/reading-document.ts';
 import type { Finding, Severity } from '#shared/engine/types.ts';
-import { foldName } from '#shared/law/fold.ts';
 import { add, HUNDRED, smaller, toDecimal, ZERO } from '#shared/kernel/rational.ts';
 import { boundShares, type Bounds, type Place } from './bound-shares.ts';
 import { findCap, type Cap } from './find-cap.ts';
 import { judgeImpossible, judgeList, judgeNames, judgePlaces } from './judge-list.ts';
-import { isColourant, type ListName, type ReadingOptions } from './list-facts.ts';
+import { carriesScent, isAllergen, isColourant, isScent, type ListName, type ReadingOptions } from './list-facts.ts';
 import { matchName, type MatchedName } from './match-name.ts';
 import { splitList } from './split-list.ts';
 
@@ -26,7 +25,7 @@ export function readList(text: string, options: ReadingOptions): Reading {
   if (names.length === 0) return { mistake: 'The text holds no ingredient names.' };
   if (names.length > MOST_NAMES) return { mistake: `The text holds more than ${MOST_NAMES} names.` };
   const { boundsOf, impossible, caps } = findBounds(names, options);
-  const findings = [...impossible, ...judgeList(names, boundsOf, options), ...judgePlaces(names, boundsOf, options), ...judgeNames(names, options)];
+  const findings = [...impossible, ...judgeList(names, boundsOf, options), ...judgePlaces(names, options), ...judgeNames(names, options)];
   return {
     document: {
       document: 'reading/1',
@@ -53,12 +52,6 @@ function recognise(text: string, { dictionary }: ReadingOptions): ListName[] {
     return { ...one, ...matched, name: matched.entry?.inci ?? one.written, isColourant: isColourant(matched.entry, one.written) };
   });
 }
-
-/** Words for a scent or a flavour, which Canada lets close the list. */
-const SCENT = ['parfum', 'aroma', 'fragrance', 'flavor'];
-const isScent = (one: ListName): boolean => SCENT.includes(foldName(one.name));
-const isAllergen = (one: ListName): boolean => one.entry !== undefined && one.entry.properties.includes('fragrance-allergen') && !one.entry.properties.includes('botanical');
-const carriesScent = (one: ListName): boolean => isScent(one) || (one.entry?.properties.includes('botanical') ?? false);
 
 /** Where order binds: what closes the list by right does not take part in it. */
 function placesOf(names: readonly ListName[], caps: ReadonlyMap<ListName, Cap>, { market, category }: ReadingOptions): Place[] {

@@ -19,7 +19,7 @@ test.each([
   ['Butyrospermum Parkii (Shea) Butter', 'synonym Butyrospermum Parkii Butter'],
   ['Titanium Dioxide [nano]', 'exact Titanium Dioxide'],
   ['Phenoxyetanol', 'respelt Phenoxyethanol'],
-  ['Cocoamidopropyl Betaine', 'respelt Cocamidopropyl Betaine'],
+  ['Cocamidopropyl Betane', 'respelt Cocamidopropyl Betaine'],
   ['Sodium Laurth Sulfate', 'respelt Sodium Laureth Sulfate'],
 ])('%s is %s', (written, expected) => {
   expect(match(written)).toBe(expected);
