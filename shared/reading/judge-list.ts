@@ -49,7 +49,6 @@ export function judgePlaces(names: readonly ListName[], options: ReadingOptions)
   const last = list.findLastIndex((one) => !one.isColourant);
   const isHairDye = options.category.tags.includes('hair-dye');
   return list.flatMap((one, index): Finding[] => {
-    const min = boundsOf.get(one)!.min;
     const carrier = isAllergen(one) && !list.slice(0, index).some(carriesScent) ? list.slice(index + 1).find(carriesScent) : undefined;
     if (carrier) {
       return [{
