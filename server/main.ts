@@ -51,7 +51,8 @@ await startOrTell(async () => {
     process.stderr.write(`Colophon cannot start: ${error.message}. Set PORT to a free port, HOST to an address of this machine, and start again.\n`);
     process.exit(1);
   });
-  server.listen(env.port, env.host);
+  // Whoever started us is told by us: at our address another program might answer.
+  server.listen(env.port, env.host, () => process.send?.('listening'));
 
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     process.once(signal, () => {

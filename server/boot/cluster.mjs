@@ -248,6 +248,12 @@ function whyNot(place, log, what = 'The database did not start') {
   return new Stop(`${what}: ${lastWords(log)} ${what.endsWith('made') ? 'Put that right and start again.' : `The whole record is in ${join(place.home, 'postgres.log')}.`}`);
 }
 
+/** @param {Place} place @param {string} log */
+function whyEnded(place, log) {
+  if (/(PANIC|FATAL): .*No space left on device/.test(log)) return whyNot(place, log).message;
+  return `The database ended by itself. Start again; its last words are in ${join(place.home, 'postgres.log')}.`;
+}
+
 /** @param {string} log */
 function lastWords(log) {
   const lines = log.split('\n').filter((line) => line.trim() !== '');
@@ -271,7 +277,7 @@ function present(place, port, { pid, ended, words }) {
     adminUrl: url(ADMIN, 'postgres'),
     ownerUrl: url(OWNER),
     appUrl: url(APP),
-    why: () => whyNot(place, words(), 'The database ended by itself').message,
+    why: () => whyEnded(place, words()),
     stop: async () => {
       await stopServer(pid);
       await waitForEnd(pid, 1000);

@@ -11,7 +11,7 @@ import { freePort, isFree, nextFreePort } from './ports.mjs';
 import { findPostgres } from './postgres.mjs';
 import { follow } from './run.mjs';
 import { Stop } from './say.mjs';
-import { startLocalServices, startProgram, waitForServer, whyEnded } from './services.mjs';
+import { startLocalServices, startProgram, toldIn, waitForServer, whyEnded } from './services.mjs';
 import { takeTurn } from './turn.mjs';
 
 const USUAL_PORT = 4173;
@@ -170,8 +170,8 @@ async function prepareDatabase({ checkout, home, env, mark, isOwn, say }) {
   say('Bringing the tables up to date, and filling the dictionary.');
   const { status, tail } = await follow(process.execPath, ['--enable-source-maps', program(checkout, 'prepare')], { cwd: checkout, env });
   if (status !== 0) {
-    const told = /^Colophon cannot start: ([^]*)$/m.exec(tail)?.[1];
-    if (told) throw new Stop(told.trim());
+    const told = toldIn(tail);
+    if (told) throw new Stop(told);
     if (/No space left|ENOSPC|53100/.test(tail)) throw new Stop('The disk is full while preparing the database. Free about 1 GB and start again; nothing that was saved is lost.');
     if (/ECONNREFUSED|ENOTFOUND|password authentication failed|no pg_hba/.test(tail)) throw new Stop(`The database of DATABASE_URL was not reached: ${tail.trim().split('\n')[0]}`);
     throw new Stop(`The database could not be prepared:\n${tail.trim()}`);

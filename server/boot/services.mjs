@@ -67,15 +67,19 @@ function answerless(signal) {
 export async function waitForServer(server, address, signal) {
   const until = Date.now() + 60_000;
   let ended = false;
+  let listens = false;
   void server.ended.then(() => (ended = true));
+  // Its own word first: at its address another program might answer.
+  server.child.once('message', () => (listens = true));
   while (!ended && Date.now() < until && !signal?.aborted) {
+    await pause(20);
+    if (!listens) continue;
     try {
       const answer = await fetch(new URL('/healthz', address), { signal: AbortSignal.timeout(2000) });
       if (answer.ok) return;
     } catch {
-      // It does not listen yet.
+      // Its database is still waking up.
     }
-    await pause(40);
   }
   await server.stop();
   signal?.throwIfAborted();
@@ -89,12 +93,18 @@ export function whyEnded(server, record) {
   return `The server ended by itself. Start again; its last words are in ${record}.`;
 }
 
+/** The sentence in which a program of ours has told why it does not start. @param {string} words */
+export function toldIn(words) {
+  const told = /^Colophon cannot start: ([^]*)$/m.exec(words)?.[1]?.trim();
+  return told && `${told.charAt(0).toUpperCase()}${told.slice(1)}`;
+}
+
 /** @param {string} words */
 function whyNot(words) {
-  // A fault that the server knows is told in its own sentence.
-  const told = /^Colophon cannot start: ([^]*)$/m.exec(words)?.[1];
-  if (told) return new Stop(told.trim());
   if (/EADDRINUSE/.test(words)) return new Stop('The port was taken by another program just now. Start again, or set PORT to a free one.');
+  // A fault that the server knows is told in its own sentence.
+  const told = toldIn(words);
+  if (told) return new Stop(told);
   if (/ENOSPC|No space left/.test(words)) return new Stop('The disk is full. Free about 1 GB and start again; nothing that was saved is lost.');
   return new Stop(`The server did not start. Its last words:\n${words.split('\n').slice(-30).join('\n')}`);
 }
