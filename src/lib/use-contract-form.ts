@@ -82,7 +82,9 @@ export function useContractForm<Fields extends FieldValues, Body extends z.ZodTy
     },
     [form, schema, toBody, showIssues],
   );
-  return useMemo(() => ({ ...form, submit, showIssues }) as ContractForm<Fields, Body>, [form, submit, showIssues]);
+  // The library keeps one object and changes its `formState`: a copy has to follow that, or faults are never shown.
+  const { formState } = form;
+  return useMemo(() => ({ ...form, formState, submit, showIssues }) as ContractForm<Fields, Body>, [form, formState, submit, showIssues]);
 }
 
 function valueAt(fields: FieldValues, at: string): unknown {

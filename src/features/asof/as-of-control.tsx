@@ -9,12 +9,15 @@ import './as-of.css';
 const MARKETS: readonly Market[] = ['EU', 'UK', 'US', 'CA'];
 const MARKET_WORDS: Readonly<Record<Market, string>> = { EU: 'European Union', UK: 'Great Britain', US: 'United States', CA: 'Canada' };
 
+const NO_CHANGES: readonly LawDay[] = [];
+
 export interface AsOfControlProps {
   readonly asOf: AsOf;
   /** Markets in which the product is sold; the others are a trial. */
   readonly sold: readonly Market[];
   readonly today: string;
-  readonly changes: readonly LawDay[];
+  /** `null` while they are still being worked out: then nothing is said of them. */
+  readonly changes: readonly LawDay[] | null;
   /** The law data's covered days: beyond them nothing is guessed. */
   readonly covered: { readonly from: string; readonly until: string };
   readonly release: string;
@@ -71,8 +74,8 @@ export function AsOfControl({ asOf, sold, today, changes, covered, release, onCh
       <TimeRule
         day={showsShelf ? asOf.available : asOf.placed}
         today={today}
-        changes={changes}
-        none={`No dated change for this product in data release ${release}`}
+        changes={changes ?? NO_CHANGES}
+        none={changes === null ? '' : `No dated change for this product in data release ${release}`}
         label={showsShelf ? 'Still on the shelf on' : 'First sold on'}
         onDay={showsShelf ? setAvailable : setPlaced}
       />

@@ -19,11 +19,13 @@ export interface CompositionRowProps {
   readonly end: number;
   readonly isLast: boolean;
   readonly said: NameSaid | undefined;
+  /** The dictionary's number, where none is written. */
+  readonly knownCas: string | undefined;
   readonly onRemove: (index: number) => void;
 }
 
 /** One ingredient of the material: name, share or range, and its step of the staircase. */
-export function CompositionRow({ index, part, end, isLast, said, onRemove }: CompositionRowProps) {
+export function CompositionRow({ index, part, end, isLast, said, knownCas, onRemove }: CompositionRowProps) {
   const detailsId = useId();
   const [open, setOpen] = useState(false);
   const { setValue, setFocus } = useFormContext<MaterialForm>();
@@ -40,7 +42,7 @@ export function CompositionRow({ index, part, end, isLast, said, onRemove }: Com
           <IngredientField name={`${at}.inci`} label={`Ingredient ${index + 1}`} onChoose={chosen} placeholder={index === 0 ? 'INCI, common name or CAS' : undefined} />
           <PartTags index={index} />
         </td>
-        <td className="cas"><CasText index={index} /></td>
+        <td className="cas"><CasText index={index} known={knownCas} /></td>
         <ShareInputs at={at} name={`ingredient ${index + 1}`} derived={part?.isFilled ? toDecimal(part.typical, 4) : ''} row={index} />
         <td className="bar">{part ? <Step part={part} end={end} isFirst={index === 0} isLast={isLast} /> : null}</td>
         <td className="tools">
@@ -67,9 +69,9 @@ const NameNote = memo(function NameNote({ said, onTake }: { said: NameSaid; onTa
   );
 });
 
-function CasText({ index }: { index: number }) {
+function CasText({ index, known }: { index: number; known: string | undefined }) {
   const cas = useWatch<MaterialForm, `composition.${number}.cas`>({ name: `composition.${index}.cas` });
-  return <>{cas}</>;
+  return <>{cas || known}</>;
 }
 
 const PURPOSES = [['preservative', 'preservative'], ['fragrance', 'fragrance'], ['colourant', 'colourant'], ['uv-filter', 'UV filter'], ['other', 'other']] as const;

@@ -11,7 +11,7 @@ import { emptyPart } from './material-form.ts';
 import type { MaterialForm } from './material-form.ts';
 import { scaleEnd } from './scale.ts';
 import { Axis, Hatches, Together } from './stair.tsx';
-import { useKnownNames } from './use-known-names.ts';
+import { useKnownNames, useKnownNumbers } from './use-known-names.ts';
 import { walkRows } from './walk-rows.ts';
 
 /** What the material is made of: a staircase that has to land on 100. */
@@ -23,6 +23,7 @@ export function CompositionTable({ onPaste }: { onPaste: () => void }) {
   const judgement = useMemo(() => judgeComposition(written, declareAs), [written, declareAs]);
   const names = useMemo(() => written.map((part) => part.inci), [written]);
   const said = useKnownNames(names);
+  const numbers = useKnownNumbers(names);
   const end = scaleEnd(judgement.most);
   const addRow = () => append({ ...emptyPart }, { focusName: `composition.${fields.length}.inci` });
   const fault = (formState.errors.root as Record<string, { message?: string }> | undefined)?.composition?.message;
@@ -43,7 +44,7 @@ export function CompositionTable({ onPaste }: { onPaste: () => void }) {
         </thead>
         <tbody>
           {fields.map((field, index) => (
-            <CompositionRow key={field.id} index={index} part={judgement.parts[index]} end={end} isLast={index === fields.length - 1} said={said.get(names[index]?.trim() ?? '')} onRemove={remove} />
+            <CompositionRow key={field.id} index={index} part={judgement.parts[index]} end={end} isLast={index === fields.length - 1} said={said.get(names[index]?.trim() ?? '')} knownCas={numbers.get(names[index]?.trim() ?? '')} onRemove={remove} />
           ))}
         </tbody>
         <Sum judgement={judgement} end={end} />

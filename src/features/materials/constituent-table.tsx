@@ -12,6 +12,7 @@ import { OilDialog } from './oil-dialog.tsx';
 import { asNumber, constituentScale } from './scale.ts';
 import { ShareInputs } from './share-inputs.tsx';
 import { Axis, RangeBar } from './stair.tsx';
+import { useKnownNumbers } from './use-known-names.ts';
 import { walkRows } from './walk-rows.ts';
 
 interface Drawn {
@@ -26,6 +27,7 @@ export function ConstituentTable() {
   const { control } = useFormContext<MaterialForm>();
   const { fields, append, remove, replace } = useFieldArray({ control, name: 'constituents' });
   const written = useWatch<MaterialForm, 'constituents'>({ name: 'constituents' });
+  const numbers = useKnownNumbers(useMemo(() => written.map((line) => line.name), [written]));
   const [prefilling, setPrefilling] = useState(false);
   const drawn = useMemo(() => written.map(draw), [written]);
   const scale = constituentScale(Math.max(0, ...drawn.map((one) => one?.most ?? 0)));
@@ -52,7 +54,7 @@ export function ConstituentTable() {
           </thead>
           <tbody>
             {fields.map((field, index) => (
-              <ConstituentRow key={field.id} index={index} fields={written[index] ?? emptyConstituent} drawn={drawn[index] ?? null} end={scale.end} onRemove={remove} />
+              <ConstituentRow key={field.id} index={index} fields={written[index] ?? emptyConstituent} drawn={drawn[index] ?? null} end={scale.end} knownCas={numbers.get(written[index]?.name.trim() ?? '')} onRemove={remove} />
             ))}
           </tbody>
         </table>
@@ -81,9 +83,11 @@ interface RowProps {
   readonly fields: ConstituentFields;
   readonly drawn: Drawn | null;
   readonly end: number;
+  /** The dictionary's number, where none is written. */
+  readonly knownCas: string | undefined;
   readonly onRemove: (index: number) => void;
 }
-function ConstituentRow({ index, fields, drawn, end, onRemove }: RowProps) {
+function ConstituentRow({ index, fields, drawn, end, knownCas, onRemove }: RowProps) {
   const { setValue, setFocus } = useFormContext<MaterialForm>();
   const at = `constituents.${index}` as const;
   const chosen = useCallback((entry: Entry) => {
@@ -96,7 +100,7 @@ function ConstituentRow({ index, fields, drawn, end, onRemove }: RowProps) {
         <IngredientField name={`${at}.name`} label={`Constituent ${index + 1}`} onChoose={chosen} />
         {fields.basis === 'published' ? <span className="mt-1 flex"><Tag>published range, not your lot</Tag></span> : null}
       </td>
-      <td className="cas">{fields.cas}</td>
+      <td className="cas">{fields.cas || knownCas}</td>
       <ShareInputs at={at} name={`constituent ${index + 1}`} derived={drawn?.midpoint ?? ''} row={index} />
       <td className="bar">{drawn ? <RangeBar {...drawn} end={end} /> : null}</td>
       <td className="tools"><span className="flex justify-end"><IconButton icon="close" word={`Take out constituent ${index + 1}`} onClick={() => onRemove(index)} /></span></td>

@@ -2,7 +2,7 @@ import { useId, useState } from 'react';
 import type { ChangeEvent, DragEvent } from 'react';
 import type { MaterialDocument } from '#shared/contracts/materials.contract.ts';
 import { ApiError, sayError } from '#src/lib/api/error.ts';
-import { sayBytes } from '#src/lib/say.ts';
+import { sayBytes, sayDay } from '#src/lib/say.ts';
 import { Button } from '#src/ui/button.tsx';
 import { FieldFault, SelectField, TextField } from '#src/ui/field.tsx';
 import { Progress } from '#src/ui/progress.tsx';
@@ -60,8 +60,8 @@ function UploadForm({ file, materialId, onDone }: { file: File; materialId: stri
         <SelectField label="Kind" value={kind} onChange={(event) => setKind(event.target.value as MaterialDocument['kind'])}>
           {Object.entries(DOCUMENT_KINDS).map(([key, word]) => <option key={key} value={key}>{word}</option>)}
         </SelectField>
-        <TextField type="date" label="Dated" value={dated} onChange={(event) => setDated(event.target.value)} error={issue('dated')} />
-        <TextField type="date" label="Runs out, if it does" value={runsOut} onChange={(event) => setRunsOut(event.target.value)} error={issue('runsOut')} />
+        <TextField type="date" label="Dated" value={dated} onChange={(event) => setDated(event.target.value)} hint={dated ? sayDay(dated) : undefined} error={issue('dated')} />
+        <TextField type="date" label="Runs out, if it does" value={runsOut} onChange={(event) => setRunsOut(event.target.value)} hint={runsOut ? sayDay(runsOut) : undefined} error={issue('runsOut')} />
       </div>
       {add.isPending ? <Progress label={`Sending ${file.name}`} done={Math.round(sent * 100)} all={100} /> : null}
       {add.error ? <FieldFault>{sayError(add.error)}</FieldFault> : null}

@@ -8,11 +8,21 @@ export interface NameSaid {
   readonly take: readonly string[];
 }
 
-/** What the dictionary says of names as written; nothing for a name it prints as it stands. */
-export function useKnownNames(names: readonly string[]): ReadonlyMap<string, NameSaid> {
+function useResolved(names: readonly string[]) {
   const asked = useSettled(useDeferredValue(names.join('\n')));
   const list = useMemo(() => [...new Set(asked.split('\n').map((name) => name.trim()).filter((name) => name.length > 1))], [asked]);
-  const { data } = useQuery(ingredientQueries.resolve(list.map((name) => ({ name }))));
+  return useQuery(ingredientQueries.resolve(list.map((name) => ({ name })))).data;
+}
+
+/** The dictionary's CAS number of each name that it knows, for names whose number is not written. */
+export function useKnownNumbers(names: readonly string[]): ReadonlyMap<string, string> {
+  const data = useResolved(names);
+  return useMemo(() => new Map((data?.items ?? []).flatMap((item) => (item.match !== 'unknown' && item.match !== 'respelt' && item.entry?.cas[0] ? [[item.name, item.entry.cas[0]] as const] : []))), [data]);
+}
+
+/** What the dictionary says of names as written; nothing for a name it prints as it stands. */
+export function useKnownNames(names: readonly string[]): ReadonlyMap<string, NameSaid> {
+  const data = useResolved(names);
   return useMemo(() => {
     const said = new Map<string, NameSaid>();
     for (const item of data?.items ?? []) {

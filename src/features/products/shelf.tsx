@@ -31,7 +31,7 @@ function PlainFront({ product }: { product: ProductSummary }) {
   return (
     <span className="front slip" aria-hidden="true">
       <span className="front-brand">{product.brand}</span>
-      <span className="front-name">{first}<br />{rest.slice(0, 2).join(' ')}</span>
+      <span className="front-name">{first}{rest.length > 0 ? <br /> : null}{rest.join(' ')}</span>
       <span className="front-foot"><span>{product.category.replaceAll('-', ' ')}</span><span>{product.netContent}</span></span>
     </span>
   );

@@ -2,6 +2,7 @@ import { memo, type ReactNode } from 'react';
 import type { House } from '#shared/contracts/house.contract.ts';
 import type { ProductDraft } from '#shared/contracts/product-draft.ts';
 import { MARKETS, type Category, type Market, type ProductFlag } from '#shared/law/types.ts';
+import { sayDay } from '#src/lib/say.ts';
 import { AreaField, CheckField, SelectField, TextField } from '#src/ui/field.tsx';
 import { TextButton } from '#src/ui/button.tsx';
 import { FLAG_WORDS } from './aspects.ts';
@@ -125,7 +126,7 @@ function Group({ title, children }: { title: string; children: ReactNode }) {
 function DayField({ label, day, today, isReadOnly, onDay }: { label: string; day: string | null; today: string; isReadOnly: boolean; onDay: (day: string | null) => void }) {
   return (
     <div className="day-field">
-      <TextField label={label} type="date" readOnly={isReadOnly} value={day ?? today} onChange={(event) => event.target.value !== '' && onDay(event.target.value)} hint={day === null ? 'always today' : undefined} />
+      <TextField label={label} type="date" readOnly={isReadOnly} value={day ?? today} onChange={(event) => event.target.value !== '' && onDay(event.target.value)} hint={day === null ? `${sayDay(today)}, always today` : sayDay(day)} />
       {day !== null && !isReadOnly ? <TextButton mini onClick={() => onDay(null)}>always today<span className="sr-only">: {label}</span></TextButton> : null}
     </div>
   );

@@ -26,7 +26,8 @@ export interface LiveAssessment {
   /** All four markets, a moment later. */
   readonly all: ReadonlyMap<Market, MarketAssessment>;
   readonly isBehind: boolean;
-  readonly lawDays: readonly ProductLawDay[];
+  /** `null` until they are worked out. */
+  readonly lawDays: readonly ProductLawDay[] | null;
   /** Judges another draft for the same market and days: for trying a remedy before it is offered. */
   readonly tryWith: (draft: ProductDraft) => MarketAssessment;
 }
@@ -57,7 +58,7 @@ export function useAssessment(input: AssessmentInput): LiveAssessment {
     return () => clearTimeout(timer);
   }, [judge, document, placed, available, today, view]);
 
-  const [lawDays, setLawDays] = useState<readonly ProductLawDay[]>([]);
+  const [lawDays, setLawDays] = useState<readonly ProductLawDay[] | null>(null);
   useEffect(() => {
     const stop = new AbortController();
     const since = `${Number(today.slice(0, 4)) - 1}-01-01`;
