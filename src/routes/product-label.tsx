@@ -6,7 +6,7 @@ import { sayError } from '#src/lib/api/error.ts';
 
 /** The label at true size, its settings, and the press file. */
 export function Component() {
-  const { id, desk, live, house, asOf, isReadOnly } = useProductPage();
+  const { id, desk, live, house, asOf, isLabelLocked } = useProductPage();
   const { market } = desk.draft.label;
   const result = live.all.get(market) ?? (live.view.result.market === market ? live.view.result : undefined);
 
@@ -26,7 +26,7 @@ export function Component() {
   return (
     <div className="wrap full">
       <LabelStudio
-        draft={desk.draft} result={result} house={house} isLocked={isReadOnly}
+        draft={desk.draft} result={result} house={house} isLocked={isLabelLocked}
         onChange={(label) => desk.change((draft) => ({ ...draft, label }), 'label')}
         onPressFile={fetchPressFile}
       />

@@ -44,6 +44,7 @@ function ProductDesk({ id, workspace }: { id: string; workspace: ProductWorkspac
   const house = useSuspenseQuery(houseQueries.current()).data;
   const store = useDraftStore(session.house.id, 'product', id, isDraft);
   const isReadOnly = !can({ roles: session.house.roles }, 'edit', 'products') || workspace.product.archived;
+  const isLabelLocked = !can({ roles: session.house.roles }, 'edit', 'labels') || workspace.product.archived;
   const desk = useDraftDesk(workspace.product, productQueries.detail(id).queryKey, store);
   const shelf = useMaterialShelf(workspace);
   const { draft } = desk;
@@ -58,7 +59,7 @@ function ProductDesk({ id, workspace }: { id: string; workspace: ProductWorkspac
   useUndoKeys(desk);
   useMissingMaterials(desk.draft, shelf);
 
-  const page: ProductPage = { id, desk, shelf, house, engine, live, asOf, today, isReadOnly, handling, nameOf, search: search.size > 0 ? `?${search}` : '' };
+  const page: ProductPage = { id, desk, shelf, house, engine, live, asOf, today, isReadOnly, isLabelLocked, handling, nameOf, search: search.size > 0 ? `?${search}` : '' };
   const category = engine.law.categories.get(draft.category);
   const facts = [
     house.name,
@@ -75,7 +76,7 @@ function ProductDesk({ id, workspace }: { id: string; workspace: ProductWorkspac
         acts={
           <>
             <SaveWords save={desk.save} version={desk.version} onRetry={desk.saveNow} />
-            {isReadOnly ? null : (
+            {isLabelLocked ? null : (
               <span className="undo-pair">
                 <IconButton icon="undo" word="Undo (Ctrl Z)" disabled={!desk.canUndo} onClick={desk.undo} />
                 <IconButton icon="redo" word="Redo (Ctrl Shift Z)" disabled={!desk.canRedo} onClick={desk.redo} />
@@ -96,7 +97,7 @@ function ProductDesk({ id, workspace }: { id: string; workspace: ProductWorkspac
           onChange={setAsOf}
         />
       </Deck>
-      {desk.kept && !isReadOnly ? <KeptDraft kept={desk.kept} version={workspace.product.version} onTake={desk.takeKept} onDrop={desk.dropKept} /> : null}
+      {desk.kept && !isLabelLocked ? <KeptDraft kept={desk.kept} version={workspace.product.version} onTake={desk.takeKept} onDrop={desk.dropKept} /> : null}
       {desk.save.kind === 'conflict' ? <ConflictDialog base={desk.base()} mine={draft} theirs={desk.save.theirs} nameOf={nameOf} onResolve={desk.resolve} /> : null}
       <Outlet context={page} />
       <p className="wrap product-foot">

@@ -18,6 +18,8 @@ export interface ProductPage {
   readonly asOf: { readonly market: Market; readonly placed: string; readonly available: string };
   readonly today: string;
   readonly isReadOnly: boolean;
+  /** The label part may be open to someone who changes nothing else. */
+  readonly isLabelLocked: boolean;
   readonly handling: readonly Finding[];
   readonly nameOf: (materialId: string) => string;
   /** The address's search part, so that tabs keep market and days. */
