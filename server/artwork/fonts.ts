@@ -46,9 +46,18 @@ export function loadFont(weight: Weight): LoadedFont {
   const file = createRequire(import.meta.url).resolve(`@ibm/plex-sans/fonts/complete/woff/IBMPlexSans-${STYLES[weight]}.woff`);
   const { flavour, tables } = unwrapWoff(readFileSync(file));
   const bytes = joinFont({ flavour, tables: stripHinting(tables) });
-  const entry: LoadedFont = { weight, bytes, font: fontkit.create(bytes) as unknown as ParsedFont };
+  const entry: LoadedFont = { weight, bytes, font: knowCharacters(fontkit.create(bytes) as unknown as ParsedFont) };
   loaded.set(weight, entry);
   return entry;
+}
+
+/**
+ * A glyph keeps the characters it was first met with, for as long as the font is parsed. Met first without
+ * any, the text of every later file would lack it: `346 25` for 346.25.
+ */
+function knowCharacters(font: ParsedFont): ParsedFont {
+  for (const codePoint of font.characterSet) font.glyphForCodePoint(codePoint);
+  return font;
 }
 
 /** PostScript name of a weight, as the embedded font is called after its subset tag. */
