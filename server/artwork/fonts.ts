@@ -56,7 +56,10 @@ export function loadFont(weight: Weight): LoadedFont {
  * any, the text of every later file would lack it: `346 25` for 346.25.
  */
 function knowCharacters(font: ParsedFont): ParsedFont {
-  for (const codePoint of font.characterSet) font.glyphForCodePoint(codePoint);
+  for (const codePoint of font.characterSet) {
+    // A ligature is to be met as the letters it stands for.
+    if (codePoint < 0xfb00 || codePoint > 0xfb06) font.glyphForCodePoint(codePoint);
+  }
   return font;
 }
 
