@@ -1,6 +1,6 @@
-import { useEffect } from 'react';
+import { useEffect, useRef } from 'react';
 import type { ReactNode } from 'react';
-import { Link, NavLink } from 'react-router-dom';
+import { Link, NavLink, useLocation } from 'react-router-dom';
 
 export interface DeckProps {
   readonly title: string;
@@ -53,8 +53,17 @@ export interface TabLink {
 }
 /** Words on the sheet's own edge, each its own address. */
 export function TabLinks({ tabs, label }: { tabs: readonly TabLink[]; label: string }) {
+  const row = useRef<HTMLElement>(null);
+  const { key } = useLocation();
+  // On a phone the row runs on past the edge: the tab one is on has to be in sight.
+  useEffect(() => {
+    const [nav, current] = [row.current, row.current?.querySelector<HTMLElement>('[aria-current="page"]')];
+    if (!nav || !current) return;
+    const past = current.offsetLeft + current.offsetWidth - (nav.offsetLeft + nav.clientWidth);
+    if (past > nav.scrollLeft) nav.scrollLeft = past + 16;
+  }, [key]);
   return (
-    <nav className="tabs" aria-label={label}>
+    <nav className="tabs" aria-label={label} ref={row}>
       {tabs.map((tab) =>
         tab.isCurrent === undefined ? (
           <NavLink key={tab.to} to={tab.to} end={tab.end} preventScrollReset>{tab.word}{tab.mark}</NavLink>
