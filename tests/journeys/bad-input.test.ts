@@ -185,7 +185,7 @@ test('another house’s product and material are not there', async () => {
 });
 
 test('a hostile file is refused and one over 20 MB is not even sent', async () => {
-  await page.goto('/materials');
+  await page.goto('/materials?find=shea');
   await page.getByRole('link', { name: /^Shea butter/ }).click();
   const papers = page.getByRole('group', { name: 'Add a document' });
   await papers.getByLabel('Add a document').setInputFiles(HOSTILE);
