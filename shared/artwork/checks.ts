@@ -63,7 +63,7 @@ function eMarkCheck({ job, scene }: Subject): Check[] {
   if (!mark) return [];
   const height = heightAt(mark.size, 722);
   return [{
-    id: 'e-mark', state: height < job.minimums.eMark ? 'stop' : 'note', what: '℮ beside the net content',
+    id: 'e-mark', state: height < job.minimums.eMark ? 'stop' : 'note', what: 'e-mark beside the net content',
     detail: 'it says that the batch was filled and checked by the average rule', figure: `${mm(height)} / 3 mm`, citation: 'Directive 76/211/EEC, Annex I, 3.3',
   }];
 }
