@@ -34,18 +34,28 @@ export const DICTIONARY_TABLES: readonly string[] = [
   'create index dictionary_term_words on dictionary_term using gin (words gin_trgm_ops)',
   // The planner thinks comparing letter groups costs nothing and would read the whole table;
   // here it may not, so each way in goes by its index.
+  // Part of a longer name is looked for only where whole names and beginnings give nothing near:
+  // that way in costs as much as all the others together.
   `create function dictionary_near(asked text, pattern text, shortest int, longest int) returns setof dictionary_term
-   language plpgsql stable set enable_seqscan = off set pg_trgm.similarity_threshold = 0.35 as $near$
+   language plpgsql stable set enable_seqscan = off set pg_trgm.similarity_threshold = 0.4 as $near$
+   declare
+     begun int;
+     nearest real;
+     found dictionary_term;
    begin
-     return query execute $sql$
-       (select * from dictionary_term where folded like $2 order by length(folded), folded limit 40)
-       union all
-       (select * from dictionary_term where words % $1 and kind <> 'cas' order by similarity(words, $1) desc limit 50)
-       union all
-       (select * from dictionary_term where $1 <% words and kind <> 'cas' order by word_similarity($1, words) desc, length(words) limit 30)
-       union all
-       (select * from dictionary_term where length(folded) <= 8 and length(folded) between $3 and $4 and kind <> 'cas')
-     $sql$ using asked, pattern, shortest, longest;
+     return query execute 'select * from dictionary_term where folded like $1 order by length(folded), folded limit 40' using pattern;
+     get diagnostics begun = row_count;
+     nearest := 0;
+     for found in execute 'select * from dictionary_term where words % $1 and kind <> ''cas'' order by similarity(words, $1) desc limit 50' using asked loop
+       nearest := greatest(nearest, similarity(found.words, asked));
+       return next found;
+     end loop;
+     if begun < 8 and nearest < 0.5 then
+       return query execute 'select * from dictionary_term where $1 <% words and kind <> ''cas'' order by word_similarity($1, words) desc, length(words) limit 30' using asked;
+     end if;
+     if longest >= shortest then
+       return query execute 'select * from dictionary_term where length(folded) <= 8 and length(folded) between $1 and $2 and kind <> ''cas''' using shortest, longest;
+     end if;
    end $near$`,
 ];
 
