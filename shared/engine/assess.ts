@@ -1,22 +1,17 @@
-import type { DocumentMaterial, FormulaDocument } from '#shared/contracts/formula-document.ts';
+import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { Dictionary } from '#shared/dictionary/types.ts';
 import { DomainError } from '#shared/kernel/errors.ts';
 import { parsePlainDate, type PlainDate } from '#shared/kernel/plain-date.ts';
 import { decimal, ONE, type Rational } from '#shared/kernel/rational.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { AllergenGroup, Category, Market, ProductFlag } from '#shared/law/types.ts';
-import { judgeLaw } from '#shared/rules/judge-law.ts';
-import { groupAllergens, judgeAllergens } from './allergens.ts';
+import { groupAllergens } from './allergens.ts';
 import type { Assessment, MarketAssessment } from './assessment.ts';
 import { blendFormula, type Blend, type BlendedSubstance } from './blend.ts';
-import { declare } from './declare.ts';
-import { judgeSum } from './formula-findings.ts';
-import { findHeadroom, type FindingsAt } from './headroom.ts';
-import { judgeAmbiguities, judgeCompositions, judgeNames, judgeOrder } from './list-findings.ts';
-import { LIST_LAW } from './list-law.ts';
-import { prepareMaterial, type PreparedMaterial } from './prepare-material.ts';
+import { findHeadroom } from './headroom.ts';
+import { headroomOf, judgeBlend, type JudgedProduct } from './judge-blend.ts';
 import type { Finding, ProductFacts, Severity } from './types.ts';
-import { totalMass, withShare } from './weigh-lines.ts';
+import { totalMass } from './weigh-lines.ts';
 
 export interface AssessOptions {
   readonly law: LawBook;
@@ -69,27 +64,10 @@ interface Shared {
 }
 
 function assessMarket(shared: Shared, market: Market): MarketAssessment {
-  const { document, options, category, blend, grouped } = shared;
-  const { law, dictionary } = options;
+  const { document, options, category, blend } = shared;
   const facts = productFacts(document, category, market, options);
-  const { verdicts, upcoming } = judgeAllergens(blend, grouped, { ...facts, exposure: category.exposure });
-  const { declaration, ambiguities } = declare({ document, blend, dictionary, market, category, allergens: verdicts });
-  const { citation } = LIST_LAW[market];
-  const judged = judgeLaw(facts, blend, document, law);
-  const findings = [
-    ...judgeSum(document, blend.weighed, citation),
-    ...judgeCompositions(blend, citation),
-    ...judgeNames(blend, dictionary, market),
-    ...judgeAmbiguities(ambiguities, market),
-    ...judgeOrder(declaration, market),
-    ...judged.findings,
-    ...upcoming,
-  ];
-  const findingsAt: FindingsAt = (line, share) => {
-    const other = blendFormula(document, dictionary, withShare(blend.weighed, line, share));
-    const found = judgeAllergens(other, groupAllergens(other, law), { ...facts, exposure: category.exposure });
-    return [...judgeLaw(facts, other, document, law).findings, ...found.upcoming];
-  };
+  const product: JudgedProduct = { document, facts, law: options.law, dictionary: options.dictionary };
+  const { declaration, verdicts, judged, findings } = judgeBlend(product, blend, shared.grouped);
   let headroom: ReturnType<MarketAssessment['headroom']> | undefined;
   return {
     market,
@@ -100,38 +78,9 @@ function assessMarket(shared: Shared, market: Market): MarketAssessment {
     allergens: verdicts,
     findings: byWeight(findings),
     requiredWording: judged.requiredWording,
-    notChecked: [...new Set(judged.notChecked.map(({ subject, words, citation: source }) => `${subject}: ${words} (${source})`))],
-    headroom: () => (headroom ??= findHeadroom(blend.weighed, findings, findingsAt, (line) => isSpokenOf(materialOf(document, line), shared, market))),
+    notChecked: [...new Set(judged.notChecked.map(({ subject, words, citation }) => `${subject}: ${words} (${citation})`))],
+    headroom: () => (headroom ??= findHeadroom(headroomOf(product, blend, { declaration, findings }))),
   };
-}
-
-function materialOf(document: FormulaDocument, line: number): DocumentMaterial | undefined {
-  const id = document.formula.lines[line]?.material;
-  return document.materials.find((material) => material.id === id);
-}
-
-const spokenOf = new WeakMap<LawBook, WeakMap<PreparedMaterial, Map<Market, boolean>>>();
-
-/** Whether any row of the market's law, or any allergen group, speaks of something in the material. */
-function isSpokenOf(material: DocumentMaterial | undefined, { options }: Shared, market: Market): boolean {
-  if (!material) return false;
-  const { law, dictionary } = options;
-  const prepared = prepareMaterial(material, dictionary);
-  let ofLaw = spokenOf.get(law);
-  if (!ofLaw) spokenOf.set(law, (ofLaw = new WeakMap()));
-  let known = ofLaw.get(prepared);
-  if (!known) ofLaw.set(prepared, (known = new Map()));
-  let found = known.get(market);
-  if (found === undefined) known.set(market, (found = findSpokenOf(prepared, law, market)));
-  return found;
-}
-
-function findSpokenOf({ parts, constituents }: PreparedMaterial, law: LawBook, market: Market): boolean {
-  return [...parts, ...constituents].some(({ inci, written, cas, purpose }) => {
-    if (purpose === 'colourant' || purpose === 'preservative' || purpose === 'uv-filter' || /^CI \d/i.test(inci)) return true;
-    const named = { name: inci, cas };
-    return law.rowsFor(named).some(({ row }) => row.markets.includes(market)) || law.allergenGroupsFor(named).length > 0 || law.rowsFor({ name: written, cas: [] }).length > 0;
-  });
 }
 
 const WEIGHTS: readonly Severity[] = ['stop', 'decide', 'note'];

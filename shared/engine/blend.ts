@@ -77,6 +77,19 @@ export function blendFormula(document: FormulaDocument, dictionary: Dictionary, 
   return new ExactBlend(plan, weighed, materials);
 }
 
+const alone = new WeakMap<PreparedMaterial, Blend>();
+
+/** A product of one material and nothing else. */
+export function blendAlone(prepared: PreparedMaterial): Blend {
+  let found = alone.get(prepared);
+  if (!found) {
+    const plan = planMixing([prepared]);
+    const weighed: WeighedLines = { den: 1n, masses: [1n], total: 1n, batch: 1n, hasBatchSize: false };
+    alone.set(prepared, (found = new ExactBlend(plan, weighed, [{ prepared, lines: [0], mass: 1n, weight: plan.scales[0]! }])));
+  }
+  return found;
+}
+
 const byIds = new WeakMap<readonly DocumentMaterial[], ReadonlyMap<string, DocumentMaterial>>();
 
 export function materialsById(materials: readonly DocumentMaterial[]): ReadonlyMap<string, DocumentMaterial> {

@@ -55,7 +55,8 @@ function usNames(context: Context): ReadonlyMap<string, string> {
   return names;
 }
 
-function findColours(name: string, usName: string | undefined, context: Context): readonly UsColourJson[] {
+/** The listed colours that a name can mean. */
+export function findColours(name: string, usName: string | undefined, context: Pick<Context, 'law' | 'days'>): readonly UsColourJson[] {
   const isLive = (one: UsColourJson): boolean => !one.from || hasBegun({ available: one.from.available as never }, context.days);
   const byName = (indexOf(context.law.usColours).get(foldName(usName ?? name).replace(/lake$/, '')) ?? []).filter(isLive);
   if (byName.length > 0) return byName;
