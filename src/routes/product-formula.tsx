@@ -1,4 +1,4 @@
-import { useCallback, useMemo, useState } from 'react';
+import { useCallback, useDeferredValue, useMemo, useState } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import type { FormulaLine } from '#shared/contracts/product-draft.ts';
 import { paths } from '#src/app/paths.ts';
@@ -30,7 +30,9 @@ export function Component() {
   const navigate = useNavigate();
   const [light, setLight] = useState<Light>(null);
   const [asTable, setAsTable] = useState(false);
-  const { view } = live;
+  // The list follows the keystroke itself; ladder and verdicts are drawn when it stands.
+  const now = live.view;
+  const view = useDeferredValue(now);
   const { result } = view;
   const lines = useMemo(() => draft.formula.phases.flatMap((phase) => phase.lines), [draft.formula.phases]);
   const everything = useMemo(() => [...view.entries, ...view.unnamed], [view]);
@@ -111,9 +113,9 @@ export function Component() {
             ) : null}
           </Panel>
           <div className="right">
-            <Panel title="Declaration" end={<CopyText text={hasLines ? result.declaration.text : ''} />}>
+            <Panel title="Declaration" end={<CopyText text={hasLines ? now.result.declaration.text : ''} />}>
               <div className="printed-wrap">
-                <PrintedList heading={result.declaration.heading} entries={view.entries} totalGrams={view.totalGrams} lit={lit.keys} onLight={lightKey} market={asOf.market} label={`Ingredients for ${asOf.market}, as printed`} />
+                <PrintedList heading={now.result.declaration.heading} entries={now.entries} totalGrams={now.totalGrams} lit={lit.keys} onLight={lightKey} market={asOf.market} label={`Ingredients for ${asOf.market}, as printed`} />
                 <PrintedSpec market={asOf.market} allergens={result.allergens.length === 0 ? null : result.allergens.filter((allergen) => allergen.disclose).length} />
               </div>
               <p className="hint mt-2">True size. Dotted words wait for a decision; the dots are not printed.</p>

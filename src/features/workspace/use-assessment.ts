@@ -21,7 +21,7 @@ export interface AssessmentInput {
 }
 
 export interface LiveAssessment {
-  /** The market at hand: as fresh as the page can be without holding up typing. */
+  /** The market at hand, judged with the very keystroke; what is costly to draw from it defers it. */
   readonly view: MarketView;
   /** All four markets, a moment later. */
   readonly all: ReadonlyMap<Market, MarketAssessment>;
@@ -40,8 +40,7 @@ const DATES_AFTER = 700;
 /** Runs the engine as someone types: the market at hand first, everything else when there is time. */
 export function useAssessment(input: AssessmentInput): LiveAssessment {
   const { engine, names, materials, house, market, placed, available, today } = input;
-  // Typing is painted before anything is judged.
-  const draft = useDeferredValue(input.draft);
+  const { draft } = input;
   const judge = useMemo(() => engine.withNames(names), [engine, names]);
   const document = useMemo(() => toDocument(draft, materials, house), [draft, materials, house]);
   const view = useMemo(() => {
