@@ -1,4 +1,4 @@
-import { useCallback, useDeferredValue, useEffect, useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useState } from 'react';
 import type { ProductDraft } from '#shared/contracts/product-draft.ts';
 import type { Material } from '#shared/contracts/materials.contract.ts';
 import type { MarketAssessment } from '#shared/engine/assessment.ts';
