@@ -37,7 +37,7 @@ export const DICTIONARY_TABLES: readonly string[] = [
   // Part of a longer name is looked for only where whole names and beginnings give nothing near:
   // that way in costs as much as all the others together.
   `create function dictionary_near(asked text, pattern text, shortest int, longest int) returns setof dictionary_term
-   language plpgsql stable set enable_seqscan = off set pg_trgm.similarity_threshold = 0.4 as $near$
+   language plpgsql stable set enable_seqscan = off set pg_trgm.similarity_threshold = 0.45 as $near$
    declare
      begun int;
      nearest real;
