@@ -1,7 +1,7 @@
 /** Builds the server's programs with esbuild and the pages with vite, each only when its sources have changed. */
 import { createHash } from 'node:crypto';
 import { existsSync, mkdirSync, readdirSync, rmSync, statSync } from 'node:fs';
-import { join } from 'node:path';
+import { join, relative } from 'node:path';
 import { readJson, writeJson } from './home.mjs';
 import { follow } from './run.mjs';
 import { Stop } from './say.mjs';
@@ -125,7 +125,8 @@ function stampOf(checkout, places, except) {
     for (const file of filesOf(join(checkout, place))) {
       if (except && file.startsWith(`${except}/`)) continue;
       const { size, mtimeMs } = statSync(file);
-      hash.update(`${file}\0${size}\0${mtimeMs}\n`);
+      // Within the checkout, which may have been moved.
+      hash.update(`${relative(checkout, file)}\0${size}\0${mtimeMs}\n`);
     }
   }
   return hash.digest('hex');

@@ -50,8 +50,9 @@ export async function inCheckout(checkout, say, work, signal) {
       return take(file);
     } catch (error) {
       const code = error instanceof Error && 'code' in error ? error.code : undefined;
-      if (code !== 'EROFS' && code !== 'EACCES' && code !== 'EPERM') throw error;
-      throw new Stop(`Packages or programs have to be made in ${checkout}, and this account may not write there. Start as the owner of that folder, or copy it to a place of your own and start there.`);
+      // On a read-only disk a folder that cannot be made is told as one that is not there.
+      if (code !== 'EROFS' && code !== 'EACCES' && code !== 'EPERM' && code !== 'ENOENT') throw error;
+      throw new Stop(`Packages or programs have to be made in ${checkout}, and nothing can be written there. Start as the owner of that folder, or copy it to a place of your own and start there.`);
     }
   }
 }
