@@ -112,6 +112,8 @@ function finish() {
   for (const { name, passed, failed, skipped, seconds, note } of outcomes) {
     say(`${failed > 0 ? 'FAILED' : 'ok    '}  ${name.padEnd(16)} ${String(passed).padStart(6)} passed ${String(failed).padStart(4)} failed ${String(skipped).padStart(4)} skipped ${seconds.toFixed(0).padStart(5)} s${note ? `  (${note})` : ''}`);
   }
+  // The registry's audit is not reached everywhere: it is never counted as passed.
+  say('Audit not run: known weaknesses of packages were not looked up. The lockfile itself is checked by the tests.');
   const sum = (/** @type {'passed' | 'failed'} */ key) => outcomes.reduce((total, each) => total + each[key], 0);
   const failed = sum('failed') + (outcomes.length === 0 ? 1 : 0);
   say(`${sum('passed')} passed, ${failed} failed`);
