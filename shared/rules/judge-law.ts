@@ -4,6 +4,7 @@ import type { Finding, Mixture, ProductFacts, RequiredWording, Substance } from 
 import { foldName } from '#shared/law/fold.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { LawRow } from '#shared/law/types.ts';
+import { judgeClaims } from './claims/judge-claims.ts';
 import { judgeUsColours } from './colours/us-colours.ts';
 import type { Context } from './context.ts';
 import { judgeParticulars } from './particulars/judge-particulars.ts';
@@ -52,6 +53,7 @@ export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: Formul
     ...judgeMayContain(context),
     ...judgeWordings(due, context),
     ...judgeParticulars(context),
+    ...judgeClaims(context, notChecked),
     ...judgeUpcoming(rows, outcomes, context),
     ...presentUpcomingWordings(formaldehydeNow, judgeFormaldehyde(later), context),
   ];
