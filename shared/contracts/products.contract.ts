@@ -4,6 +4,7 @@ import { dateField, idField, marketField, nameField, versionField } from './fiel
 import { dictionaryEntry } from './dictionary.contract.ts';
 import { material } from './materials.contract.ts';
 import { productDraft } from './product-draft.ts';
+import type { FrontView } from '#shared/artwork/crop-to-front.ts';
 
 const byId = z.strictObject({ id: idField });
 
@@ -85,6 +86,10 @@ export const importFormulaDocument = endpoint({ method: 'POST', path: '/products
 /** The result document as the server computes it. */
 export const getResultDocument = endpoint({ method: 'GET', path: '/products/:id/result', params: byId, query: z.strictObject(asOf), response: z.unknown() });
 export const getLabelPdf = endpoint({ method: 'GET', path: '/products/:id/label.pdf', params: byId, query: z.strictObject(asOf), response: z.unknown(), answers: 'pdf' });
+/** The front of the label, to show small; null while there is none to show: no formula yet, or it does not fit. */
+const productFront = z.object({ front: z.custom<FrontView>((value) => typeof value === 'object' && value !== null && 'scene' in value && 'view' in value).nullable() });
+export type ProductFront = z.infer<typeof productFront>;
+export const getProductFront = endpoint({ method: 'GET', path: '/products/:id/front', params: byId, response: productFront });
 export const getReportPdf = endpoint({
   method: 'GET',
   path: '/products/:id/report.pdf',

@@ -40,6 +40,7 @@ const MATRIX: Readonly<Record<string, readonly Role[]>> = {
   'POST /products/:id/archive': MAKERS,
   'GET /products/:id/formula-document': ALL,
   'GET /products/:id/result': ALL,
+  'GET /products/:id/front': ALL,
   'GET /products/:id/label.pdf': ALL,
   'GET /products/:id/report.pdf': ALL,
   'GET /products/:id/weigh-out.pdf': ALL,

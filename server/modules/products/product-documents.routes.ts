@@ -1,6 +1,7 @@
 import {
   getFormulaDocument,
   getLabelPdf,
+  getProductFront,
   getReportPdf,
   getResultDocument,
   getWeighOutPdf,
@@ -12,6 +13,7 @@ import { attachment } from '#server/http/file-answer.ts';
 import { DOCUMENT_LIMIT, route, type Route } from '#server/http/route.ts';
 import { getDossier, judge, type AsOf, type Knowledge } from './dossier.ts';
 import { importFormulaDocument } from './import-document.ts';
+import { createFronts } from './fronts.ts';
 import { presentProduct } from './products.present.ts';
 import type { SaveContext } from './products.service.ts';
 import { makeLabelPdf, makeReportPdf, makeWeighOutPdf } from './sheets.ts';
@@ -23,6 +25,7 @@ interface Deps {
 
 /** Documents in and out of a product, and what is printed from it. The database is let go before anything is painted. */
 export function documentRoutes({ knows, context }: Deps): Route[] {
+  const drawFront = createFronts();
   return [
     route(importContract, { may: ['edit', 'products'], bodyLimit: DOCUMENT_LIMIT }, ({ inHouse, actor, body }) =>
       inHouse(async (em) => presentProduct(await importFormulaDocument(em, actor, body.document, context()))),
@@ -39,6 +42,7 @@ export function documentRoutes({ knows, context }: Deps): Route[] {
     route(getLabelPdf, { may: ['read', 'downloads'] }, async ({ inHouse, actor, params, query }) =>
       makeLabelPdf(await inHouse((em) => getDossier(em, actor, params.id)), knows(), { ...asOf(query), ...(query.market ? { market: query.market } : {}) }),
     ),
+    route(getProductFront, { may: ['read', 'products'] }, async ({ inHouse, actor, params }) => drawFront(await inHouse((em) => getDossier(em, actor, params.id)), knows())),
     route(getReportPdf, { may: ['read', 'downloads'] }, async ({ inHouse, actor, params, query }) =>
       makeReportPdf(await inHouse((em) => getDossier(em, actor, params.id)), knows(), { ...asOf(query), ...(query.shares ? { shares: query.shares } : {}) }),
     ),

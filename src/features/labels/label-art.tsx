@@ -1,5 +1,6 @@
 import { memo, useId } from 'react';
 import './artwork-fonts.css';
+import type { FrontView } from '#shared/artwork/crop-to-front.ts';
 import type { Box, Item, PathStep, Scene, Text } from '#shared/artwork/scene.ts';
 
 const mm = (micrometres: number): number => micrometres / 1000;
@@ -60,12 +61,11 @@ export const LabelArt = memo(function LabelArt({ scene, bleed = false, paper = t
   );
 });
 
-/** The front of a label, drawn small at a common scale; the whole label where it has no front of its own. */
-export function LabelThumbnail({ scene, height, name }: { scene: Scene; height: number; name: string }) {
-  const front = scene.shape === 'cylinder' ? scene.panels.find((panel) => panel.name === 'Front') : undefined;
-  const view = front && front.height > 0 ? front : { x: 0, y: 0, width: scene.trim.width, height: scene.trim.height };
+/** The front of a label, drawn small inside a box of so many pixels. */
+export function LabelThumbnail({ front: { scene, view }, width, height, name }: { front: FrontView; width: number; height: number; name: string }) {
+  const scale = Math.min(width / view.width, height / view.height);
   return (
-    <svg role="img" aria-label={`Label of ${name}`} height={height} width={(height * view.width) / view.height} viewBox={`${mm(view.x)} ${mm(view.y)} ${mm(view.width)} ${mm(view.height)}`}>
+    <svg role="img" aria-label={`Label of ${name}`} width={Math.round(view.width * scale)} height={Math.round(view.height * scale)} viewBox={`${mm(view.x)} ${mm(view.y)} ${mm(view.width)} ${mm(view.height)}`}>
       <LabelArt scene={scene} />
     </svg>
   );

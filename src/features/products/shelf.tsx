@@ -1,18 +1,23 @@
-import type { ReactNode } from 'react';
+import { useQuery } from '@tanstack/react-query';
+import { Suspense, lazy } from 'react';
 import { Link } from 'react-router-dom';
 import type { ProductSummary } from '#shared/contracts/products.contract.ts';
 import { paths } from '#src/app/paths.ts';
+import { productQueries } from './queries.ts';
 import { Standing } from './standing.tsx';
 import './products.css';
 
-/** Products as bottles on a shelf. `front` draws a product's front label; without it the plain slip stands there. */
-export function Shelf({ products, front }: { products: readonly ProductSummary[]; front?: (product: ProductSummary) => ReactNode }) {
+// The painter and the printed type come after the page: the shelf stands without them.
+const LabelThumbnail = lazy(async () => ({ default: (await import('#src/features/labels/label-art.tsx')).LabelThumbnail }));
+
+/** Products on a shelf, each by the front of its own label. */
+export function Shelf({ products }: { products: readonly ProductSummary[] }) {
   return (
     <ol className="shelf">
       {products.map((product) => (
         <li key={product.id}>
           <Link to={paths.product(product.id)}>
-            {front ? front(product) : <PlainFront product={product} />}
+            <Front product={product} />
             <span className="cap">
               <b>{product.name}</b>
               {product.netContent ? <span>{product.netContent}</span> : null}
@@ -25,7 +30,15 @@ export function Shelf({ products, front }: { products: readonly ProductSummary[]
   );
 }
 
-/** A white front with the product's own words, where no label is drawn yet. */
+/** The label's front once it is drawn; until then, and where there is none, a plain slip with the product's words. */
+function Front({ product }: { product: ProductSummary }) {
+  const { data } = useQuery(productQueries.front(product.id, product.version));
+  const slip = <PlainFront product={product} />;
+  if (!data?.front) return slip;
+  return <Suspense fallback={slip}><span className="front-art" aria-hidden="true"><LabelThumbnail front={data.front} width={148} height={188} name={product.name} /></span></Suspense>;
+}
+
+/** A white front with the product's own words, where no label can be drawn. */
 function PlainFront({ product }: { product: ProductSummary }) {
   const [first = '', ...rest] = product.name.split(' ');
   return (

@@ -57,6 +57,16 @@ test('the list is searched by words, by market and by what is put away', async (
   expect((await ines.get('/products?find[x]=a')).status).toBe(422);
 });
 
+test('a front is the label as it would be printed, and nothing where there is none', async () => {
+  const { front } = (await ines.get(`/products/${BODY_WASH}/front`)).body;
+  const words = front.scene.items.flatMap((item: { text?: string }) => item.text ?? []).join(' ');
+  expect(words).toContain('Juniper');
+  expect(words).not.toContain('Ingredients');
+  const empty = await begin('A front without a formula');
+  expect((await ines.get(`/products/${empty.id}/front`)).body).toEqual({ front: null });
+  await ines.post(`/products/${empty.id}/archive`, { archived: true, version: empty.version });
+});
+
 test('a workspace holds all that the browser needs to judge', async () => {
   const { product, materials, entries, unknown } = (await ines.get(`/products/${BODY_WASH}`)).body;
   expect(product.draft.name).toBe('Juniper & Oat Body Wash');

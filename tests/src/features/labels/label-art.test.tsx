@@ -1,6 +1,7 @@
 // @vitest-environment jsdom
 import { cleanup, render } from '@testing-library/react';
 import { afterEach, expect, test } from 'vitest';
+import { cropToFront } from '#shared/artwork/crop-to-front.ts';
 import { layOutLabel } from '#shared/artwork/layout.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import { LabelArt, LabelThumbnail } from '#src/features/labels/label-art.tsx';
@@ -31,8 +32,15 @@ test('bars are drawn to the micrometre', () => {
   expect(path).toBe(boxes.map((box) => `M${box.x / 1000} ${box.y / 1000}h${box.width / 1000}v${box.height / 1000}h${-box.width / 1000}z`).join(''));
 });
 
-test('a thumbnail shows the front alone', () => {
-  const { getByRole } = render(<LabelThumbnail scene={scene!} height={90} name="Juniper & Oat Body Wash" />);
-  const front = scene!.panels.find((panel) => panel.name === 'Front')!;
-  expect(getByRole('img', { name: 'Label of Juniper & Oat Body Wash' }).getAttribute('viewBox')).toBe(`${front.x / 1000} 0 ${front.width / 1000} 90`);
+test('a thumbnail shows the front alone, as large as its box allows', () => {
+  const front = cropToFront(scene!);
+  const { getByRole } = render(<LabelThumbnail front={front} width={148} height={188} name="Juniper & Oat Body Wash" />);
+  const panel = scene!.panels.find(({ name }) => name === 'Front')!;
+  const drawn = getByRole('img', { name: 'Label of Juniper & Oat Body Wash' });
+  expect(drawn.getAttribute('viewBox')).toBe(`${panel.x / 1000} 0 ${panel.width / 1000} 90`);
+  const [width, height] = [Number(drawn.getAttribute('width')), Number(drawn.getAttribute('height'))];
+  expect(width <= 148 && height <= 188 && (width === 148 || height === 188)).toBe(true);
+  const texts = [...drawn.querySelectorAll('text')].map((text) => text.textContent).join(' ');
+  expect(texts).toContain('Juniper');
+  expect(texts).not.toContain('Sodium');
 });
