@@ -1,7 +1,7 @@
 import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { Dictionary } from '#shared/dictionary/types.ts';
 import { foldName } from '#shared/law/fold.ts';
-import type { Category, Market } from '#shared/law/types.ts';
+import type { AllergenGroup, Category, Market } from '#shared/law/types.ts';
 import { larger, smaller, ZERO, compare } from '#shared/kernel/rational.ts';
 import type { AllergenVerdict } from './allergens.ts';
 import type { Declaration, DeclarationEntry, UncertainPair } from './assessment.ts';
@@ -21,6 +21,8 @@ export interface DeclareInput {
   readonly market: Market;
   readonly category: Category;
   readonly allergens: readonly AllergenVerdict[];
+  /** Which of the product's substances belong to which allergen group, whether it binds yet or not. */
+  readonly grouped: ReadonlyMap<AllergenGroup, readonly BlendedSubstance[]>;
 }
 
 /** An entry in the making. */
@@ -54,7 +56,7 @@ export function declare(input: DeclareInput): { declaration: Declaration; ambigu
   for (const list of [ordered, free, colourants]) list.sort(byShare);
   allergens.sort(byExactShare);
   const chosen = document.declaration?.freeOrder?.[market] ?? [];
-  const listed = [...ordered, ...arrange([...free, ...allergens], chosen), ...arrange(colourants, chosen)];
+  const listed = chosen.length === 0 ? [...ordered, ...free, ...allergens, ...colourants] : arrangeList({ ordered, free: [...free, ...allergens], colourants }, chosen, input.grouped);
   const shades = document.product.mayContain.length === 0 ? [] : shadeEntries(input, law, listed, ambiguities);
   const shadeText = shades.length > 0 ? law.mayContain(shades.map(({ name }) => name).join(', ')) : '';
   return {
@@ -229,21 +231,39 @@ function byName(a: DeclarationEntry, b: DeclarationEntry): number {
   return a.name < b.name ? -1 : a.name > b.name ? 1 : 0;
 }
 
+interface Parts {
+  readonly ordered: readonly DeclarationEntry[];
+  readonly free: readonly DeclarationEntry[];
+  readonly colourants: readonly DeclarationEntry[];
+}
+
+/**
+ * The list with the chosen order in its free parts. A choice outlives a change of printed name:
+ * an entry answers to its own names, to its members' and to its allergen group's.
+ */
+function arrangeList({ ordered, free, colourants }: Parts, chosen: readonly string[], grouped: DeclareInput['grouped']): DeclarationEntry[] {
+  const labels = new Map<string, string>();
+  for (const [group, substances] of grouped) for (const { key } of substances) labels.set(key, group.label);
+  const namesOf = (entry: DeclarationEntry): readonly (readonly string[])[] => [
+    [entry.name, entry.inci],
+    [...(entry.members ?? []), ...entry.keys.flatMap((key) => labels.get(key) ?? [])],
+  ];
+  return [...ordered, ...arrange(free, chosen, namesOf), ...arrange(colourants, chosen, namesOf)];
+}
+
 /** Applies a chosen order: names that are not there are passed over, the rest follows as it was. */
-function arrange(entries: readonly DeclarationEntry[], chosen: readonly string[]): readonly DeclarationEntry[] {
-  if (chosen.length === 0) return entries;
-  const left = new Set(entries);
+function arrange(entries: readonly DeclarationEntry[], chosen: readonly string[], namesOf: (entry: DeclarationEntry) => readonly (readonly string[])[]): readonly DeclarationEntry[] {
+  const left = new Map(entries.map((entry) => [entry, namesOf(entry).map((names) => new Set(names.map(foldName)))]));
   const first: DeclarationEntry[] = [];
   for (const name of chosen) {
     const key = foldName(name);
-    for (const entry of left) {
-      if (foldName(entry.name) !== key && foldName(entry.inci) !== key) continue;
-      first.push(entry);
-      left.delete(entry);
-      break;
-    }
+    // The name as printed before any other that the entry answers to.
+    const found = [0, 1].flatMap((tier) => [...left].find(([, names]) => names[tier]!.has(key))?.[0] ?? [])[0];
+    if (!found) continue;
+    first.push(found);
+    left.delete(found);
   }
-  return [...first, ...left];
+  return [...first, ...left.keys()];
 }
 
 /** Neighbours of the ordered part that some allowed composition puts the other way round. */

@@ -164,4 +164,16 @@ describe('names', () => {
     });
     expect(present(document).results[0]!.declaration.text).toBe('Ingredients: Aqua, Glycerin, Tocopherol, Xanthan Gum, Citric Acid');
   });
+
+  test.each([
+    ['2026-07-31', 'Lavandula Oil/Extract', 'Lavandula Angustifolia Oil'],
+    ['2026-08-01', 'Lavandula Angustifolia Oil', 'Lavandula Oil/Extract'],
+  ])('an order chosen under one date outlives the change of a printed name: on %s', (placedOnMarket, chosen, printed) => {
+    const pure = ['Aqua', 'Xanthan Gum', 'Citric Acid', 'Lavandula Angustifolia Oil'].map((name) => material(name, [part(name, '100')]));
+    const document = formula(pure, [line('Aqua', 'qs'), line('Xanthan Gum', '0.5 %'), line('Citric Acid', '0.3 %'), line('Lavandula Angustifolia Oil', '0.2 %')], {
+      product: { placedOnMarket, availableOn: placedOnMarket },
+      declaration: { freeOrder: { EU: [chosen, 'Citric Acid'] } },
+    });
+    expect(present(document).results[0]!.declaration.text).toBe(`Ingredients: Aqua, ${printed}, Citric Acid, Xanthan Gum`);
+  });
 });
