@@ -1,6 +1,7 @@
 import type { Finding, FindingKind, Interval } from '#shared/engine/types.ts';
 import { LIST_LAW } from '#shared/engine/list-law.ts';
 import { toDecimal, type Rational } from '#shared/kernel/rational.ts';
+import { foldName } from '#shared/law/fold.ts';
 import { judgeLaw } from '#shared/rules/judge-law.ts';
 import type { Bounds } from './bound-shares.ts';
 import type { Cap } from './find-cap.ts';
@@ -19,18 +20,40 @@ export function judgeList(names: readonly ListName[], boundsOf: ReadonlyMap<List
     }),
   );
   const { findings } = judgeLaw(factsOf(options), asMixture([...substances.values()]), asDocument(names, options), options.law);
-  return findings.filter((one) => SETTLED.includes(one.kind) || (one.kind === 'upcoming' && one.certainty === 'certain'));
+  const settled = findings.filter((one) => SETTLED.includes(one.kind) || (one.kind === 'upcoming' && one.certainty === 'certain'));
+  return settled.flatMap((one) => (one.kind === 'use-not-listed' ? judgeShade(one, names, options) : [one]));
+}
+
+/** After `+/-` stand colourants: a word that is none is out of place there, and one that is not known proves nothing. */
+function judgeShade(finding: Finding, names: readonly ListName[], { market }: ReadingOptions): Finding[] {
+  const one = names.find(({ name }) => name === finding.subject);
+  if (!one || one.isColourant || one.block !== 'may-contain') return [finding];
+  if (!one.entry) return [];
+  return [{
+    kind: 'may-contain-misplaced', severity: 'decide', rule: 'may-contain', subject: one.name, citation: LIST_LAW[market].citation, certainty: 'certain',
+    message: `${one.name} stands after +/-, where only the colourants of shades belong.`, remedy: `Put ${one.name} into the list itself, or name it by the colourant it is.`,
+  }];
 }
 
 /** Names that are unknown, former, or ambiguous colours. */
-export function judgeNames(names: readonly ListName[], { market }: ReadingOptions): Finding[] {
+export function judgeNames(names: readonly ListName[], { market, law }: ReadingOptions): Finding[] {
   const { citation } = LIST_LAW[market];
   return names.flatMap((one): Finding[] => {
     const { entry, suggestions, written } = one;
     if (!entry) {
+      const numbers = market === 'US' ? law.usColours.find(({ name }) => foldName(name) === foldName(written))?.ci ?? [] : [];
+      if (numbers.length > 1) {
+        return [{
+          kind: 'name-ambiguous', severity: 'decide', rule: 'name-known', subject: written, citation, suggestions: numbers.map((number) => `CI ${number}`),
+          message: `${written} is the US name of several colourants: ${numbers.map((number) => `CI ${number}`).join(', ')}.`, remedy: 'Ask the maker of the product which of them it is.',
+        }];
+      }
+      const isInLaw = law.rowsFor({ name: written, cas: [] }).some(({ row }) => row.markets.includes(market));
       return [{
         kind: 'unknown-ingredient', severity: 'decide', rule: 'name-known', subject: written, citation, suggestions,
-        message: `${written} is not in the dictionary, so neither its name nor the rules on it could be checked.`,
+        message: isInLaw
+          ? `${written} is not in the dictionary; the rules of law that name it were checked.`
+          : `${written} is not in the dictionary, so neither its name nor the rules on it could be checked.`,
         remedy: suggestions.length > 0 ? `Check the spelling; likely names are ${suggestions.join(', ')}.` : 'Ask the maker of the product what it is.',
       }];
     }

@@ -26,8 +26,16 @@ export interface ListName extends WrittenName, MatchedName {
   readonly isColourant: boolean;
 }
 
-export function isColourant(entry: DictionaryEntry | undefined, written: string): boolean {
-  return (entry?.properties.includes('colourant') ?? false) || /^c\.?\s?i\.?\s?\d{5}/i.test(entry?.inci ?? written);
+/**
+ * Whether a name stands in the list as a colourant. A substance with a colour index number of its
+ * own is one under that number; under its other name (`Titanium Dioxide`) it has another use,
+ * except in the US, where colours go by name.
+ */
+export function isColourant(entry: DictionaryEntry | undefined, written: string, market: Market): boolean {
+  if (/^c\.?\s?i\.?\s?\d{5}/i.test(entry?.inci ?? written)) return true;
+  if (!entry) return market === 'US' && /^iron oxides?$/i.test(written);
+  const isDouble = entry.properties.some((property) => property.startsWith('same-substance:'));
+  return (market === 'US' && isDouble) || (entry.properties.includes('colourant') && !isDouble);
 }
 
 /** Words for a scent or a flavour, which Canada lets close the list. */

@@ -5,12 +5,15 @@ import { boundShares, type Bounds, type Place } from './bound-shares.ts';
 import { findCap, type Cap } from './find-cap.ts';
 import { judgeImpossible, judgeList, judgeNames, judgePlaces } from './judge-list.ts';
 import { carriesScent, isAllergen, isColourant, isScent, type ListName, type ReadingOptions } from './list-facts.ts';
-import { matchName, type MatchedName } from './match-name.ts';
-import { splitList } from './split-list.ts';
+import { findWritten, matchName, type MatchedName } from './match-name.ts';
+import { splitList, type WrittenName } from './split-list.ts';
 
 /** Longest text and longest list that are read; both far beyond any label. */
 export const LONGEST_TEXT = 200_000;
 export const MOST_NAMES = 500;
+/** Control characters other than tabs and the ends of lines and pages. */
+// eslint-disable-next-line no-control-regex -- they are what is looked for
+const NO_TEXT = /[\u0000-\u0008\u000E-\u001F\u007F\uFFFD]/;
 
 /** A pasted list, read: or why it cannot be. */
 export type Reading = { readonly document: ReadingDocument } | { readonly mistake: string };
@@ -21,9 +24,12 @@ export type Reading = { readonly document: ReadingDocument } | { readonly mistak
  */
 export function readList(text: string, options: ReadingOptions): Reading {
   if (text.length > LONGEST_TEXT) return { mistake: `The text is longer than ${LONGEST_TEXT} letters.` };
-  const names = recognise(text, options);
-  if (names.length === 0) return { mistake: 'The text holds no ingredient names.' };
-  if (names.length > MOST_NAMES) return { mistake: `The text holds more than ${MOST_NAMES} names.` };
+  if (NO_TEXT.test(text)) return { mistake: 'This is not a text: it holds characters that no list is written with.' };
+  const { dictionary } = options;
+  const written = splitList(text, (name) => findWritten(name, dictionary)?.entry.inci);
+  if (written.length === 0) return { mistake: 'The text holds no ingredient names.' };
+  if (written.length > MOST_NAMES) return { mistake: `The text holds more than ${MOST_NAMES} names.` };
+  const names = recognise(written, options);
   const { boundsOf, impossible, caps } = findBounds(names, options);
   const findings = [...impossible, ...judgeList(names, boundsOf, options), ...judgePlaces(names, options), ...judgeNames(names, options)];
   return {
@@ -39,17 +45,16 @@ export function readList(text: string, options: ReadingOptions): Reading {
   };
 }
 
-function recognise(text: string, { dictionary }: ReadingOptions): ListName[] {
+function recognise(written: readonly WrittenName[], { dictionary, market }: ReadingOptions): ListName[] {
   const known = new Map<string, MatchedName>();
   const match = (name: string): MatchedName => {
     let found = known.get(name);
     if (!found) known.set(name, (found = matchName(name, dictionary)));
     return found;
   };
-  const written = splitList(text, (name) => dictionary.resolve(name)?.entry.inci);
   return written.map((one) => {
     const matched = match(one.written);
-    return { ...one, ...matched, name: matched.entry?.inci ?? one.written, isColourant: isColourant(matched.entry, one.written) };
+    return { ...one, ...matched, name: matched.entry?.inci ?? one.written, isColourant: isColourant(matched.entry, one.written, market) };
   });
 }
 

@@ -1,3 +1,5 @@
+import { findClose, findLists } from './clean-text.ts';
+
 /** One name as it stands in a pasted list. */
 export interface WrittenName {
   /** As written, without marks, percentages and footnote signs. */
@@ -10,92 +12,6 @@ export interface WrittenName {
 
 /** What the splitter asks where punctuation alone cannot tell. */
 export type Knows = (name: string) => string | undefined;
-
-const HEADING_WORD = '(?:ingredients?|ingrédients?|ingredientes?|ingredienti|ingrediënten|inhaltsstoffe|bestandteile|zutaten|inci|composition|składniki|ainesosat|sastojci|ingredienser)';
-/** `Ingredients:`, `INGREDIENTS / INGRÉDIENTS :`, `Ingredients (INCI) -`, `List of ingredients:`. */
-const HEADING = new RegExp(`(?:^|[\\n.;]|\\b)[ \\t*]*(?:(?:full |complete )?(?:list of|liste des|liste der) )?((?:in)?active |other )?${HEADING_WORD}(?:[ \\t]*(?:[/|(]|,(?=[ \\t]*${HEADING_WORD}))[ \\t]*${HEADING_WORD}[ \\t]*\\)?)*[ \\t]*(?:[:：]|[-–—][ \\t\\n])`, 'giu');
-/** A heading without a colon counts only at the beginning of the text or on a line of its own. */
-const BARE_HEADING = new RegExp(`^\\s*${HEADING_WORD}(?:[ \\t]*[/|(][ \\t]*${HEADING_WORD}[ \\t]*\\)?)*[ \\t]*(?:\\n|[ \\t]+(?=\\p{Lu}))`, 'iu');
-const MAY_CONTAIN = /[[({]?\s*(?:(?:\+\s*[/\\]?\s*[-–—−]|±|may (?:also )?contain|peut contenir|kann enthalten|puede contener|può contenere|kan bevatten)(?:[\s:/()|[\]{}]*(?=\+\s*\/|±|may |peut |kann )|\s*[)\]]?\s*:?\s*))+/i;
-/** Words with which what follows a list begins. Common practice, no source. */
-const AFTERWARDS = /(?:^|[.;\n]\s*|\n\s*)(?=(?:directions?|how to use|to use|usage|apply |warnings?|caution|avertissement|mode d'emploi|mise en garde|anwendung|warnhinweise?|hinweis|made in|fabriqué|hergestellt|manufactured|distributed|distribué|net (?:wt|weight|content)|store |keep out|for external|avoid contact|best before|batch|lot\b|exp\b|questions\b|www\.|https?:|©))/i;
-const FOOTNOTE = /(?:^|[\n.;,]\s*)(?=[*†‡°¹²³]+\s?(?:\p{L}|\d)[^,]*(?:organic|biolog|bio\b|ecocert|natural|naturel|natürlich|farming|anbau|essential oils?|ätherisch|huiles? essentielles?|fair|certified|trade|constituents?|occurring|origin|derived|from))/iu;
-
-/** Sets the plain list free of what surrounds it on a label: heading, prose, footnotes. */
-function cleanText(text: string): string {
-  return text
-    .normalize('NFC')
-    .replace(/\r\n?/g, '\n')
-    .replace(/[\u00AD\u200B-\u200D\uFEFF]/g, '')
-    .replace(/[\u00A0\u2000-\u200A\u202F\u3000\t]/g, ' ')
-    .replace(/[‐‑]/g, '-')
-    .replace(/，|、/g, ',')
-    .replace(/；/g, ';')
-    .replace(/（/g, '(')
-    .replace(/）/g, ')')
-    .replace(/(\p{Ll})- *\n *(?=\p{Ll})/gu, '$1')
-    .replace(/(\d)- *\n *(?=\d)/g, '$1-');
-}
-
-interface Block {
-  readonly text: string;
-  readonly block: WrittenName['block'];
-}
-
-function findBlocks(text: string): Block[] {
-  const marks = [...text.matchAll(HEADING)].filter((mark) => isHeadingHere(text, mark));
-  if (marks.length === 0) {
-    const bare = BARE_HEADING.exec(text);
-    return splitShades(bare ? text.slice(bare[0].length) : text, 'list');
-  }
-  return marks.flatMap((mark, index) => {
-    const isActive = /^active/i.test(mark[1] ?? '');
-    const rest = text.slice(mark.index + mark[0].length, marks[index + 1]?.index ?? text.length);
-    return splitShades(rest, isActive ? 'active' : 'list');
-  });
-}
-
-/** The word inside running text ("other ingredients - such as") is none: a dash counts at the start of a line only. */
-function isHeadingHere(text: string, mark: RegExpMatchArray): boolean {
-  if (/[:：]$/.test(mark[0])) return true;
-  const before = text.slice(0, mark.index);
-  return before.trim() === '' || /\n\s*$/.test(before) || mark[0].startsWith('\n');
-}
-
-function splitShades(text: string, block: WrittenName['block']): Block[] {
-  const list = cutAfterwards(text);
-  const mark = MAY_CONTAIN.exec(list);
-  if (!mark) return [{ text: list, block }];
-  const before = list.slice(0, mark.index);
-  const after = list.slice(mark.index + mark[0].length);
-  const close = /^\s*[[({]/.test(mark[0]) ? findClose(after) : -1;
-  const shades = close < 0 ? after : after.slice(0, close);
-  const rest = close < 0 ? '' : after.slice(close + 1);
-  return [{ text: before, block }, { text: shades, block: 'may-contain' }, ...(rest.trim() === '' ? [] : [{ text: rest, block } as const])];
-}
-
-/** The bracket that closes one opened before `text` began. */
-function findClose(text: string): number {
-  let depth = 0;
-  for (let at = 0; at < text.length; at += 1) {
-    if ('[({'.includes(text[at]!)) depth += 1;
-    else if ('])}'.includes(text[at]!)) {
-      if (depth === 0) return at;
-      depth -= 1;
-    }
-  }
-  return -1;
-}
-
-function cutAfterwards(text: string): string {
-  const lead = /^\s*/.exec(text)![0].length;
-  let end = text.length;
-  for (const pattern of [AFTERWARDS, FOOTNOTE]) {
-    const found = pattern.exec(text.slice(lead));
-    if (found && found.index + found[0].length > 0) end = found.index + lead < end ? found.index + lead : end;
-  }
-  return text.slice(0, end);
-}
 
 /** Depth of brackets at each place; one that is never closed counts for nothing. */
 function bracketDepths(text: string): number[] {
@@ -119,6 +35,7 @@ function splitBlock(whole: string, knows: Knows): string[] {
   const text = openWhole(whole);
   const depths = bracketDepths(text);
   const isByLine = isOneNameALine(text, depths);
+  const isByDash = !isByLine && isDashed(text, depths);
   const names: string[] = [];
   let from = 0;
   const cut = (at: number, width: number): void => {
@@ -128,7 +45,8 @@ function splitBlock(whole: string, knows: Knows): string[] {
   for (let at = 0; at < text.length; at += 1) {
     if (depths[at]! > 0) continue;
     const letter = text[at]!;
-    if (';•·●▪■◦‣|⋅∙'.includes(letter)) cut(at, 1);
+    if (letter === ';' || BULLETS.includes(letter)) cut(at, 1);
+    else if (isByDash && isDash(text, at)) cut(at, 1);
     else if (letter === '\n' && (isByLine || /^\n[ ]*\n/.test(text.slice(at, at + 80)))) cut(at, 1);
     else if (letter === ',' && !isInsideName(text.slice(from, at), text.slice(at + 1, at + 60), knows)) cut(at, 1);
     else if (letter === '.' && isStop(text, at, from)) cut(at, 1);
@@ -149,9 +67,24 @@ function isOneNameALine(text: string, depths: ArrayLike<number>): boolean {
   const lines = text.split('\n').filter((line) => line.trim() !== '').length;
   if (lines < 2) return false;
   let marks = 0;
-  for (let at = 0; at < text.length; at += 1) if (depths[at] === 0 && /[,;•·●▪|]/.test(text[at]!) && !/^\s*(?:\n|$)/.test(text.slice(at + 1, at + 40)) && !/^\d/.test(text.slice(at + 1, at + 2))) marks += 1;
+  for (let at = 0; at < text.length; at += 1) if (depths[at] === 0 && isMark(text[at]!) && !/^\d/.test(text.slice(at + 1, at + 2))) marks += 1;
   return marks * 2 < lines;
 }
+
+/** Dashes between spaces part the names where nothing else does. */
+function isDashed(text: string, depths: ArrayLike<number>): boolean {
+  let dashes = 0;
+  for (let at = 0; at < text.length; at += 1) {
+    if (depths[at] !== 0) continue;
+    if (isMark(text[at]!)) return false;
+    if (isDash(text, at)) dashes += 1;
+  }
+  return dashes > 1;
+}
+
+const BULLETS = '•·●▪■◦‣|⋅∙‧・○◆◇▲△★☆✦✓➤►▶❖♦';
+const isMark = (letter: string): boolean => letter === ',' || letter === ';' || BULLETS.includes(letter);
+const isDash = (text: string, at: number): boolean => '-–—−'.includes(text[at]!) && /\s/.test(text[at - 1] ?? '') && /\s/.test(text[at + 1] ?? '');
 
 /** Commas of place numbers (`1,2-Hexanediol`, `N,N'-…`) and of decimals (`5,5 %`). */
 function isInsideName(before: string, after: string, knows: Knows): boolean {
@@ -171,7 +104,7 @@ function isStop(text: string, at: number, from: number): boolean {
   return text.slice(at + 1).trim() === '' || (before.length > 1 && !ABBREVIATION.test(before) && !/^\d{1,3}$/.test(before));
 }
 
-const MARKS = '*†‡°¹²³⁴⁵⁶⁷⁸⁹⁰#^"“”„«»•·';
+const MARKS = '*†‡°¹²³⁴⁵⁶⁷⁸⁹⁰#^"“”„«»•·®™';
 const LEADING = new RegExp(`^(?:[\\s${MARKS}]|[-–—]\\s+|\\(?\\d{1,3}[.)]\\s+|\\(\\d{1,2}\\)\\s+)+`);
 const TRAILING = new RegExp(`(?:[\\s${MARKS}.:]|\\((?:[*†‡]+|\\d{1,2})\\))+$`);
 const SHARE = /[([]?\s*(?:[<>≤≥~]|ca\.?|min\.?|max\.?)?\s*\d+(?:[.,]\d+)?\s*(?:-|–|to)?\s*(?:\d+(?:[.,]\d+)?)?\s*%\s*(?:w\/w|v\/v|m\/m)?\s*[)\]]?/gi;
@@ -191,25 +124,43 @@ export function tidyName(raw: string): string {
 
 const JOINED = /\s*[([]\s*(?:and|und|et|y|e|en|&|\+)\s*[)\]]\s*/i;
 const LAST_AND = /^(.{2,}?)\s+(?:and|und|et|&)\s+(.{2,})$/i;
-const BRACKET = /^([^()[\]]+?)\s*[([]([^()[\]]+)[)\]]\s*$/;
+const BRACKET = /^(.+?)\s*[([]([^()[\]]+)[)\]]\s*$/;
+/** What introduces the constituents in a bracket. */
+const OF_WHICH = /^(?:contains?|containing|contient|enthält|with|from|of which|davon|dont|natural(?:ly)?|including|incl\.?)\b\s*:?\s*/i;
+/** Words beside a name that tell where it comes from, not what it is. Common practice, no source. */
+const ORIGIN = '(?:certified |100 ?% )?(?:organic|bio|biologique|vegetable|vegan|natural|naturally derived|plant[- ](?:based|derived)|fair ?trade|wild(?:[- ]harvested)?|upcycled|from organic (?:farming|agriculture))';
+const ORIGIN_AROUND = new RegExp(`^${ORIGIN}\\s+|\\s*[([]\\s*${ORIGIN}\\s*[)\\]]`, 'gi');
+const COLOUR_INDEX = /^c\.?\s?i\.?\s?\d{5}(?::\d)?$/i;
+const PHASE = /^(?:phase|teil)\s+[a-z0-9]$/i;
 
 /** What one piece between two marks names: usually itself; several where it joins names that are known apart. */
 function unfold(raw: string, knows: Knows): { name: string; isInside: boolean }[] {
   if (JOINED.test(raw)) return raw.split(new RegExp(JOINED.source, 'gi')).flatMap((part) => unfold(part, knows));
   const name = tidyName(raw);
-  if (name === '' || !/[\p{L}\d]/u.test(name)) return [];
-  const plain = [{ name, isInside: false }];
+  if (name === '' || !/[\p{L}\d]/u.test(name) || PHASE.test(name)) return [];
   const bracket = BRACKET.exec(name);
-  if (bracket && /[,;•]/.test(bracket[2]!)) {
-    const outer = knows(bracket[1]!);
-    const inner = bracket[2]!.split(/[,;•]/).map(tidyName).filter((one) => one !== '');
-    const others = inner.filter((one) => knows(one) !== undefined && knows(one) !== outer);
-    if (outer !== undefined && others.length * 2 > inner.length) {
-      return [{ name: tidyName(bracket[1]!), isInside: false }, ...inner.filter((one) => knows(one) !== outer).map((one) => ({ name: one, isInside: true }))];
-    }
-  }
-  if (knows(name) !== undefined) return plain;
-  return unfoldPair(name.split(/\s*\/\s*/), knows) ?? unfoldPair(LAST_AND.exec(name)?.slice(1) ?? [], knows) ?? plain;
+  const parts = bracket && unfoldBracket(bracket[1]!, bracket[2]!, knows);
+  if (parts) return parts;
+  if (knows(name) !== undefined) return [{ name, isInside: false }];
+  return unfoldPair(name.split(/\s*\/\s*/), knows) ?? unfoldPair(LAST_AND.exec(name)?.slice(1) ?? [], knows) ?? [{ name: bareName(name, knows), isInside: false }];
+}
+
+/** Constituents in brackets after a name that is known; colour index numbers after a word for them all. */
+function unfoldBracket(outside: string, inside: string, knows: Knows): { name: string; isInside: boolean }[] | undefined {
+  const inner = inside.replace(OF_WHICH, '').split(/[,;•]/).map(tidyName).filter((one) => one !== '');
+  if (inner.length < 2 && !OF_WHICH.test(inside)) return undefined;
+  const outer = knows(outside);
+  if (outer === undefined && inner.every((one) => COLOUR_INDEX.test(one))) return inner.map((one) => ({ name: one, isInside: false }));
+  const others = inner.filter((one) => knows(one) !== undefined && knows(one) !== outer);
+  if (outer === undefined || others.length * 2 <= inner.length) return undefined;
+  return [{ name: tidyName(outside), isInside: false }, ...inner.filter((one) => knows(one) !== outer).map((one) => ({ name: one, isInside: true }))];
+}
+
+/** The name without words of origin, a heading before it or a figure after it, where only then it is known. */
+function bareName(name: string, knows: Knows): string {
+  const bare = name.replace(ORIGIN_AROUND, ' ').replace(/\s+/g, ' ').trim();
+  const forms = [bare, name.replace(/^[^:]{1,40}[:：]\s*/, ''), bare.replace(/\s+\d+(?:[.,]\d+)?\s*(?:g|ppm)?$/, '')];
+  return forms.find((form) => form !== '' && form !== name && knows(form) !== undefined) ?? name;
 }
 
 function unfoldPair(parts: readonly string[], knows: Knows): { name: string; isInside: boolean }[] | undefined {
@@ -218,12 +169,35 @@ function unfoldPair(parts: readonly string[], knows: Knows): { name: string; isI
   return parts.map((part) => ({ name: tidyName(part), isInside: false }));
 }
 
+/** Fewer names than this in one unmarked row of words may be one unknown name. */
+const LEAST_IN_A_ROW = 3;
+const LONGEST_NAME = 8;
+
+/** A list without any marks, `AQUA GLYCERIN PARFUM`: the longest known names one after the other, where they use up every word. */
+function splitWords(text: string, knows: Knows): string[] | undefined {
+  const words = text.trim().replace(/\.$/, '').split(/\s+/);
+  if (words.length < LEAST_IN_A_ROW || words.length > 400) return undefined;
+  const names: string[] = [];
+  for (let at = 0; at < words.length; ) {
+    let end = at + LONGEST_NAME < words.length ? at + LONGEST_NAME : words.length;
+    while (end > at && knows(words.slice(at, end).join(' ')) === undefined) end -= 1;
+    if (end === at) return undefined;
+    names.push(words.slice(at, end).join(' '));
+    at = end;
+  }
+  return names.length < LEAST_IN_A_ROW ? undefined : names;
+}
+
 /**
  * Splits a pasted ingredient list into its names, in their order. `knows` gives the name that a
  * text stands for, or nothing: asked only where marks alone cannot tell.
  */
 export function splitList(text: string, knows: Knows = () => undefined): WrittenName[] {
-  return findBlocks(cleanText(text)).flatMap(({ text: list, block }) =>
-    splitBlock(list, knows).flatMap((raw) => unfold(raw, knows).map(({ name, isInside }) => ({ written: name, block, isInside }))),
-  );
+  return findLists(text).flatMap(({ text: list, block }) => {
+    const names = splitBlock(list, knows).flatMap((raw) => unfold(raw, knows));
+    const only = names.length === 1 && knows(names[0]!.name) === undefined ? splitWords(names[0]!.name, knows) : undefined;
+    return (only?.map((name) => ({ name, isInside: false })) ?? names).map(({ name, isInside }): WrittenName =>
+      block === 'named' ? { written: name, block: 'list', isInside: true } : { written: name, block, isInside },
+    );
+  });
 }

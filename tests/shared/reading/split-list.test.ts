@@ -1,8 +1,9 @@
 import { describe, expect, test } from 'vitest';
+import { findWritten } from '#shared/reading/match-name.ts';
 import { splitList, tidyName } from '#shared/reading/split-list.ts';
 import { dictionary } from '#tests/support/engine.ts';
 
-const knows = (name: string): string | undefined => dictionary.resolve(name)?.entry.inci;
+const knows = (name: string): string | undefined => findWritten(name, dictionary)?.entry.inci;
 const names = (text: string): string[] => splitList(text, knows).map(({ written }) => written);
 const shades = (text: string): string[] => splitList(text, knows).filter(({ block }) => block === 'may-contain').map(({ written }) => written);
 
@@ -60,6 +61,31 @@ describe('a pasted list is split into its names', () => {
     ['a text in quotes', '“Aqua, Glycerin, Parfum”', ['Aqua', 'Glycerin', 'Parfum']],
     ['a list in brackets', '[Aqua, Glycerin, Parfum]', ['Aqua', 'Glycerin', 'Parfum']],
     ['nothing', ' \n ,. ', []],
+    ['dashes between spaces', 'Aqua - Glycerin - C12-15 Alkyl Benzoate – Parfum', ['Aqua', 'Glycerin', 'C12-15 Alkyl Benzoate', 'Parfum']],
+    ['triangles and stars', 'WATER ▲ GLYCERIN ★ PARFUM', ['WATER', 'GLYCERIN', 'PARFUM']],
+    ['no marks at all', 'AQUA GLYCERIN CETEARYL ALCOHOL PARFUM', ['AQUA', 'GLYCERIN', 'CETEARYL ALCOHOL', 'PARFUM']],
+    ['one name of several words', 'Butyrospermum Parkii Butter', ['Butyrospermum Parkii Butter']],
+    ['counting figures in a row', '1. Aqua 2. Glycerin 3. Parfum', ['Aqua', 'Glycerin', 'Parfum']],
+    ['counting figures before place numbers', '1) Aqua, 2) Glycerin, 3) 1,2-Hexanediol', ['Aqua', 'Glycerin', '1,2-Hexanediol']],
+    ['backslashes', 'WATER\\AQUA\\EAU, GLYCERIN', ['WATER/AQUA/EAU', 'GLYCERIN']],
+    ['commas at the ends of lines and a name over two of them', 'Aqua,\nGlycerin,\nCetearyl\nAlcohol,\nParfum', ['Aqua', 'Glycerin', 'Cetearyl Alcohol', 'Parfum']],
+    ['a column of figures', 'Aqua\t70\nGlycerin\t5,5 %\nPolysorbate 20\t1', ['Aqua', 'Glycerin', 'Polysorbate 20']],
+    ['figures after the names', 'Phase A\nAqua 70\nPolysorbate 20', ['Aqua', 'Polysorbate 20']],
+    ['a Polish heading', 'Składniki: Aqua, Glycerin', ['Aqua', 'Glycerin']],
+    ['a Greek heading', 'Συστατικά: Aqua, Glycerin', ['Aqua', 'Glycerin']],
+    ['a heading in Han script', '全成分：Aqua、Glycerin', ['Aqua', 'Glycerin']],
+    ['a heading that no table knows', 'Sammensetningen er: Aqua, Glycerin', ['Aqua', 'Glycerin']],
+    ['a heading with the word list', 'Ingredients (INGREDIENTS LIST): Aqua, Glycerin', ['Aqua', 'Glycerin']],
+    ['soft hyphens', 'So\u00ADdium Lau\u00ADreth Sul\u00ADfate, Aqua', ['Sodium Laureth Sulfate', 'Aqua']],
+    ['a Greek capital among Latin letters', 'Αqua, Glycerin', ['Aqua', 'Glycerin']],
+    ['a Greek letter of its own', 'β-Carotene, Aqua', ['β-Carotene', 'Aqua']],
+    ['constituents introduced by a word', 'Aqua, Lavandula Angustifolia (Lavender) Oil (contains Linalool*, Limonene*)', ['Aqua', 'Lavandula Angustifolia (Lavender) Oil', 'Linalool', 'Limonene']],
+    ['allergens named after the list', 'Aqua, Parfum. Contains: Limonene, Linalool.', ['Aqua', 'Parfum', 'Limonene', 'Linalool']],
+    ['colour index numbers after a word for them all', 'Talc, Iron Oxides (CI 77491, CI 77492)', ['Talc', 'CI 77491', 'CI 77492']],
+    ['words of origin', 'Organic Cocos Nucifera Oil, Olea Europaea (Olive) Fruit Oil [organic]', ['Cocos Nucifera Oil', 'Olea Europaea (Olive) Fruit Oil']],
+    ['what the product is free of', 'Aqua, Glycerin. Free from parabens, silicones and sulfates.', ['Aqua', 'Glycerin']],
+    ['months and a batch', 'Aqua, Glycerin. 12M. Batch 4711.', ['Aqua', 'Glycerin']],
+    ['a warning that begins with a substance', 'Sorbitol, Sodium Fluoride. Contains Sodium Fluoride 0.32% w/w (1450 ppm F-)', ['Sorbitol', 'Sodium Fluoride']],
   ])('%s', (_, text, expected) => {
     expect(names(text)).toEqual(expected);
   });
