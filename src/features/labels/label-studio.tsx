@@ -62,16 +62,16 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
         {scene ? <LabelBoard scene={scene} misfits={misfits} shown={shown} pixelsPerMm={calibration.pixelsPerMm} zoom={zoom} /> : null}
         {scene ? <SpecLine scene={scene} label={draft.label} /> : null}
         {scene ? <PressList checks={checks} /> : null}
-      </div>
-      <aside className="studio-side" aria-label="Settings of the label">
-        <Panel title="Press file">
-          <PressFile isReady={misfits.length === 0 && !checks.some((check) => check.state === 'stop')} onPressFile={onPressFile} standard={draft.label.press.standard} />
-        </Panel>
         {scene ? (
           <Panel title={scene.shape === 'cylinder' ? 'On the bottle' : 'On its face'}>
             <BottleView scene={scene} diameterMm={container.shape === 'cylinder' ? Number(container.diameterMm) : 0} />
           </Panel>
         ) : null}
+      </div>
+      <aside className="studio-side" aria-label="Settings of the label">
+        <Panel title="Press file">
+          <PressFile isReady={misfits.length === 0 && !checks.some((check) => check.state === 'stop')} onPressFile={onPressFile} standard={draft.label.press.standard} />
+        </Panel>
         <LabelSettingsPanel draft={draft} onChange={onChange} isLocked={isLocked} />
       </aside>
       <CalibrationDialog key={String(isMeasuring)} isOpen={isMeasuring} onClose={() => setIsMeasuring(false)} calibration={calibration} />
