@@ -42,9 +42,15 @@ function stopsSale(result: ResultDocument): boolean {
   return result.results.some(({ findings }) => findings.some(({ severity }) => severity === 'stop'));
 }
 
+/** What is said of days that the tables do not cover, each once. */
+function daysBeyond(result: ResultDocument): string[] {
+  return [...new Set(result.results.flatMap(({ findings }) => findings.filter(({ kind }) => kind === 'date-not-covered').map(({ message }) => message)))];
+}
+
 /** `check` of a single document: 1 where something stops sale. @throws Unusable */
 export async function checkFile(given: Arguments, knows: Knowledge, io: Io): Promise<number> {
   const result = checkDocument(readDocument(await readText(given.file, io.stdin), given, knows), given, knows);
+  for (const words of daysBeyond(result)) io.tell(words);
   await io.write(`${JSON.stringify(result, null, 1)}\n`);
   return stopsSale(result) ? 1 : 0;
 }

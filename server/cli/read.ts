@@ -17,6 +17,7 @@ export async function readList(given: Arguments, { law, dictionary, today }: Kno
   const text = await readText(given.file, io.stdin);
   const read = readIngredients(text, { market, category, law, dictionary, placedOnMarket: given.placed ?? today, availableOn: given.available ?? today });
   if ('mistake' in read) throw new Unusable([{ pointer: '', message: read.mistake }]);
+  for (const finding of read.document.findings) if (finding.kind === 'date-not-covered') io.tell(finding.message);
   await io.write(`${JSON.stringify(read.document, null, 1)}\n`);
   return read.document.findings.some(({ severity }) => severity === 'stop') ? 1 : 0;
 }

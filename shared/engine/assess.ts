@@ -8,6 +8,7 @@ import type { AllergenGroup, Category, Market, ProductFlag } from '#shared/law/t
 import { groupAllergens } from './allergens.ts';
 import type { Assessment, MarketAssessment } from './assessment.ts';
 import { blendFormula, type Blend, type BlendedSubstance } from './blend.ts';
+import { judgeDays } from './date-findings.ts';
 import { findHeadroom } from './headroom.ts';
 import { headroomOf, judgeBlend, type JudgedProduct } from './judge-blend.ts';
 import type { Finding, ProductFacts, Severity } from './types.ts';
@@ -76,7 +77,7 @@ function assessMarket(shared: Shared, market: Market): MarketAssessment {
     exposure: category.exposure,
     declaration,
     allergens: verdicts,
-    findings: byWeight(findings),
+    findings: byWeight([...judgeDays(facts, options.law), ...findings]),
     requiredWording: judged.requiredWording,
     notChecked: [...new Set(judged.notChecked.map(({ subject, words, citation }) => `${subject}: ${words} (${citation})`))],
     headroom: () => (headroom ??= findHeadroom(headroomOf(product, blend, { declaration, findings }))),

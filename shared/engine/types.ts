@@ -42,6 +42,8 @@ export interface Substance {
   readonly cas: readonly string[];
   readonly purposes: readonly Purpose[];
   readonly nano: boolean;
+  /** The dictionary's properties of it; absent where the dictionary does not hold the name. */
+  readonly properties?: readonly string[] | undefined;
   readonly as: { readonly ingredient?: Interval; readonly hidden?: Interval; readonly incidental?: Interval };
   readonly total: Interval;
   readonly sources: readonly Source[];
@@ -84,6 +86,7 @@ export type FindingKind =
   | 'claim-evidence'
   | 'may-contain-misplaced'
   | 'handling-limit'
+  | 'date-not-covered'
   | 'upcoming';
 
 /** One point a verdict rests on, as it stands in the result document (decimals as text). */

@@ -1,4 +1,5 @@
 import type { ReadingDocument } from '#shared/contracts/reading-document.ts';
+import { judgeDays } from '#shared/engine/date-findings.ts';
 import type { Finding, Severity } from '#shared/engine/types.ts';
 import { add, HUNDRED, smaller, toDecimal, ZERO } from '#shared/kernel/rational.ts';
 import { boundShares, type Bounds, type Place } from './bound-shares.ts';
@@ -31,7 +32,7 @@ export function readList(text: string, options: ReadingOptions): Reading {
   if (written.length > MOST_NAMES) return { mistake: `The text holds more than ${MOST_NAMES} names.` };
   const names = recognise(written, options);
   const { boundsOf, impossible, caps } = findBounds(names, options);
-  const findings = [...impossible, ...judgeList(names, boundsOf, options), ...judgePlaces(names, options), ...judgeNames(names, options)];
+  const findings = [...judgeDays(options, options.law), ...impossible, ...judgeList(names, boundsOf, options), ...judgePlaces(names, options), ...judgeNames(names, options)];
   return {
     document: {
       document: 'reading/1',

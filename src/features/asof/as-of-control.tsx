@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import type { Market } from '#shared/law/types.ts';
+import { sayDay } from '#src/lib/say.ts';
 import type { AsOf } from './as-of.ts';
 import { DayBox } from './day-box.tsx';
 import type { LawDay } from './rule-scale.ts';
@@ -28,8 +29,15 @@ export interface AsOfControlProps {
 export function AsOfControl({ asOf, sold, today, changes, covered, release, onChange }: AsOfControlProps) {
   const [isSplit, setSplit] = useState(asOf.available !== asOf.placed);
   const showsShelf = isSplit || asOf.available !== asOf.placed;
+  // Where the data have grown old, today can still be asked for.
+  const most = covered.until > today ? covered.until : today;
+  const within = (day: string) => (day < covered.from ? covered.from : day > most ? most : day);
   const setPlaced = (placed: string) => onChange({ ...asOf, placed, available: showsShelf && asOf.available > placed ? asOf.available : placed });
   const setAvailable = (available: string) => onChange({ ...asOf, available: available < asOf.placed ? asOf.placed : available });
+  const beyond =
+    asOf.placed < covered.from ? `The law data begin on ${sayDay(covered.from)}; what bound before is not known to them.`
+    : asOf.available > covered.until ? `The law data know of no change after ${sayDay(covered.until)}; what comes later is not guessed.`
+    : '';
   const isTrial = !sold.includes(asOf.market);
   return (
     <div className="as-of wrap">
@@ -49,11 +57,11 @@ export function AsOfControl({ asOf, sold, today, changes, covered, release, onCh
           ))}
         </div>
         <span className="phrase">
-          {isTrial ? 'on trial, ' : ''}as first sold on <DayBox label="First sold on" day={asOf.placed} covered={covered} onDay={setPlaced} />
+          {isTrial ? 'on trial, ' : ''}as first sold on <DayBox label="First sold on" day={asOf.placed} covered={covered} most={most} onDay={setPlaced} />
         </span>
         {showsShelf ? (
           <span className="phrase">
-            still on the shelf on <DayBox label="Still on the shelf on" day={asOf.available} covered={covered} least={asOf.placed} onDay={setAvailable} />
+            still on the shelf on <DayBox label="Still on the shelf on" day={asOf.available} covered={covered} least={asOf.placed} most={most} onDay={setAvailable} />
             <button
               type="button"
               className="link"
@@ -77,11 +85,9 @@ export function AsOfControl({ asOf, sold, today, changes, covered, release, onCh
         changes={changes ?? NO_CHANGES}
         none={changes === null ? '' : `No dated change for this product in data release ${release}`}
         label={showsShelf ? 'Still on the shelf on' : 'First sold on'}
-        onDay={showsShelf ? setAvailable : setPlaced}
+        onDay={(day) => (showsShelf ? setAvailable : setPlaced)(within(day))}
       />
-      {asOf.available > covered.until && asOf.available > today ? (
-        <p className="beyond">The law data know of no change after {covered.until.slice(0, 4)}; what comes later is not guessed.</p>
-      ) : null}
+      {beyond ? <p className="beyond">{beyond}</p> : null}
     </div>
   );
 }

@@ -7,6 +7,8 @@ export interface DayBoxProps {
   readonly day: string;
   readonly covered: { readonly from: string; readonly until: string };
   readonly least?: string;
+  /** The last day that may be asked for. */
+  readonly most: string;
   readonly onDay: (day: string) => void;
 }
 
@@ -16,7 +18,7 @@ function focusFirst(element: HTMLElement | null): void {
 }
 
 /** A day that reads as part of a sentence and can be written or picked where it stands. */
-export function DayBox({ label, day, covered, least = covered.from, onDay }: DayBoxProps) {
+export function DayBox({ label, day, covered, least = covered.from, most, onDay }: DayBoxProps) {
   const id = useId();
   const [isOpen, setOpen] = useState(false);
   const [fault, setFault] = useState('');
@@ -32,6 +34,7 @@ export function DayBox({ label, day, covered, least = covered.from, onDay }: Day
     const read = parsePlainDate(text);
     if (!read) return setFault('Pick a day that exists.');
     if (read < least) return setFault(least === covered.from ? `The law data begin on ${sayDay(covered.from)}.` : `Not before ${sayDay(least)}.`);
+    if (read > most) return setFault(`The law data end on ${sayDay(covered.until)}; what comes later is not guessed.`);
     setFault('');
     onDay(read);
   };
@@ -46,6 +49,7 @@ export function DayBox({ label, day, covered, least = covered.from, onDay }: Day
         aria-invalid={fault !== '' || undefined}
         defaultValue={day}
         min={least}
+        max={most}
         onChange={(event) => event.target.value !== '' && take(event.target.value)}
         onBlur={() => {
           setOpen(false);
