@@ -104,3 +104,20 @@ export function toDecimal(a: Rational, places = 12): string {
   const fraction = digits.slice(point, end);
   return (negative ? '-' : '') + (fraction ? `${whole}.${fraction}` : whole);
 }
+
+/** Beyond this two figures that differ are called so in words. */
+const MOST_PLACES = 60;
+
+/**
+ * As {@link toDecimal}, with as many places more as it takes to tell the figure from `other`: a
+ * share a hair above its limit never reads as the limit itself. Equal figures stay as they are.
+ */
+export function toDecimalApart(a: Rational, other: Rational, places = 12): string {
+  const text = toDecimal(a, places);
+  if (compare(a, other) === 0 || text !== toDecimal(other, places)) return text;
+  for (let more = places + 1; more <= MOST_PLACES; more += 1) {
+    const longer = toDecimal(a, more);
+    if (longer !== toDecimal(other, more)) return longer;
+  }
+  return compare(a, other) > 0 ? `just over ${text}` : `just under ${text}`;
+}

@@ -11,6 +11,8 @@ import type { NotChecked, Outcome, Part } from '../outcome.ts';
 interface Applied {
   readonly part: Part;
   readonly applies: Answer;
+  /** Whether the field of use fits, were the substance there for what the row lists. */
+  readonly fits: Answer;
 }
 
 /** Everything one row says of the product on the context's days. */
@@ -25,7 +27,7 @@ export function judgeRow(row: LawRow, parts: readonly Part[], context: Context, 
     speaks = true;
     const needs = new Set<string>();
     const applied = applyProvision(row, provision, parts, context, needs);
-    if (provision.use !== 'forbidden' && isUse(provision)) uses.push(strongest(applied.map((one) => one.applies)));
+    if (provision.use !== 'forbidden' && isUse(provision)) uses.push(strongest(applied.map((one) => one.fits)));
     const spoken = applied.filter((one) => one.applies !== false);
     if (spoken.length === 0) continue;
     judgeProvision({ row, provision, spoken, context, needs }, outcomes);
@@ -56,7 +58,7 @@ function applyProvision(row: LawRow, provision: Provision, parts: readonly Part[
     if (binds === false) continue;
     if (binds === undefined) needs.add('purpose');
     const here = provision.where === undefined ? true : answer(provision.where, ask(part, context, needs));
-    applied.push({ part, applies: here === false ? false : binds === undefined ? undefined : here });
+    applied.push({ part, applies: here === false ? false : binds === undefined ? undefined : here, fits: here });
   }
   return applied;
 }

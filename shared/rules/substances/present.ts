@@ -1,4 +1,4 @@
-import { compare, toDecimal } from '#shared/kernel/rational.ts';
+import { compare, toDecimal, toDecimalApart, type Rational } from '#shared/kernel/rational.ts';
 import type { Finding, FindingKind, Interval, Severity } from '#shared/engine/types.ts';
 import type { Context } from '../context.ts';
 import { weightOf } from './judge-row.ts';
@@ -82,9 +82,11 @@ function effectiveOf(outcome: Outcome): Finding['effective'] {
   return { from: from.placed ?? from.available, ...(until ? { to: until.placed ?? until.available } : {}) };
 }
 
-function plain(interval: Interval, unit = ' %'): string {
-  const min = toDecimal(interval.min, 6);
-  const max = toDecimal(interval.max, 6);
+/** A share for the eye: six places, and more where it would otherwise read as the limit it is held against. */
+function plain(interval: Interval, unit = ' %', limit?: Rational): string {
+  const say = (figure: Rational): string => (limit ? toDecimalApart(figure, limit, 6) : toDecimal(figure, 6));
+  const min = say(interval.min);
+  const max = say(interval.max);
   return min === max ? `${max}${unit}` : `${min} to ${max}${unit}`;
 }
 
@@ -93,7 +95,7 @@ function messageOf(outcome: Outcome, kind: FindingKind, subject: string): string
   if (outcome.isRatio) return ratioMessage(outcome, kind);
   if (outcome.type === 'limit') {
     const who = outcome.parts.length > 1 ? `${outcome.parts.map((part) => part.substance.name).join(', ')} together` : subject;
-    const what = `${who}: ${plain(outcome.measured!)}${basis}, and ${outcome.limitText} % is the most`;
+    const what = `${who}: ${plain(outcome.measured!, ' %', outcome.limit)}${basis}, and ${outcome.limitText} % is the most`;
     if (kind === 'limit-exceeded') return `${what}.`;
     return outcome.needs.includes('purpose') ? `${what} for this purpose; for another use it may be lawful.` : outcome.needs.length > 0 ? `${what} where the open question is answered so.` : `${what}; only part of the range is above it.`;
   }
@@ -105,7 +107,7 @@ function messageOf(outcome: Outcome, kind: FindingKind, subject: string): string
 
 function ratioMessage(outcome: Outcome, kind: FindingKind): string {
   const names = outcome.parts.map((part) => part.substance.name).join(', ');
-  const what = `${names}: each share over its own maximum adds up to ${plain(outcome.measured!, '')}, and 1 is the most`;
+  const what = `${names}: each share over its own maximum adds up to ${plain(outcome.measured!, '', outcome.limit)}, and 1 is the most`;
   if (kind === 'limit-exceeded') return `${what}.`;
   return outcome.needs.length > 0 ? `${what} where the open question is answered so.` : `${what}; only part of the range is above it.`;
 }
@@ -135,7 +137,7 @@ function arithmeticOf(outcome: Outcome, context: Context): NonNullable<Finding['
     }
   }
   if (context.facts.readyForUse.n !== context.facts.readyForUse.d) steps.push({ step: 'times the share of the product in the ready-for-use mixture', figure: toDecimal(context.facts.readyForUse, 9) });
-  steps.push({ step: outcome.parts.length > 1 ? 'together, compared' : 'compared', figure: plain(outcome.measured!, outcome.isRatio ? '' : ' %') });
+  steps.push({ step: outcome.parts.length > 1 ? 'together, compared' : 'compared', figure: plain(outcome.measured!, outcome.isRatio ? '' : ' %', outcome.limit) });
   steps.push({ step: 'the most the rule allows', figure: outcome.isRatio ? outcome.limitText! : `${outcome.limitText} %` });
   return steps;
 }

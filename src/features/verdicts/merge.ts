@@ -60,17 +60,23 @@ export function countFindings(findings: readonly Finding[]): Counts {
   return { stop: count('stop'), decide: count('decide'), note: count('note') };
 }
 
-/** At most six figures: the exact ones stand in the arithmetic. */
-function short(text: string): string {
+/** Four figures, more where it takes them to tell it from `other`: the exact ones stand in the arithmetic. */
+function short(text: string, other = text): string {
   const value = Number(text);
-  return Number.isFinite(value) ? String(Number(value.toPrecision(4))) : text;
+  if (!Number.isFinite(value)) return text;
+  for (let figures = 4; figures <= 15; figures++) {
+    const said = String(Number(value.toPrecision(figures)));
+    if (text === other || said !== String(Number(Number(other).toPrecision(figures)))) return said;
+  }
+  return text;
 }
 
 /** What stands in a market's column: a figure or a word, and what it is measured against. */
 export function cellWords(finding: Finding): { readonly figure: string; readonly against: string } {
   const unit = finding.unit ?? '%';
   const range = finding.measuredRange;
-  const measured = range && range.min !== range.max ? `${short(range.min)} to ${short(range.max)} ${unit}` : finding.measured !== undefined ? `${short(finding.measured)} ${unit}` : '';
+  const say = (text: string) => short(text, finding.limit);
+  const measured = range && range.min !== range.max ? `${say(range.min)} to ${say(range.max)} ${unit}` : finding.measured !== undefined ? `${say(finding.measured)} ${unit}` : '';
   const limit = finding.limit !== undefined ? `${short(finding.limit)} ${unit}` : '';
   switch (finding.kind) {
     case 'sum-mismatch':
@@ -88,6 +94,8 @@ export function cellWords(finding: Finding): { readonly figure: string; readonly
       return { figure: 'missing', against: '' };
     case 'upcoming':
       return { figure: finding.effective ? `from ${sayDay(finding.effective.from)}` : 'later', against: measured };
+    case 'date-not-covered':
+      return { figure: 'not covered', against: '' };
     case 'prohibited':
       return { figure: measured || 'present', against: 'prohibited' };
     default:

@@ -171,3 +171,9 @@ describe('a sum of ratios', () => {
     expect(found({ name: 'Testdye base', percent: '1.5' }, { name: 'Testdye strong', min: '0.2', max: '0.3' })[0]).toMatchObject({ kind: 'limit-uncertain', severity: 'decide' });
   });
 });
+
+// Annex V entry 32 (d) lists climbazole for rinse-off shampoo at 0.5 %; Annex III entry 310 at 2 % against dandruff.
+test('a listed use that fits is lawful although nothing is said of the purpose', () => {
+  expect(kinds([{ name: 'Climbazole', percent: '0.4' }], { category: 'shampoo' })).toEqual([]);
+  expect(kinds([{ name: 'Climbazole', percent: '0.4' }], { category: 'hand-cream' })).toContain('not-for-this-use');
+});

@@ -20,3 +20,12 @@ test('what is second hand or from memory says so', () => {
   expect(judge([{ name: 'Salicylic Acid', percent: '3' }], { market: 'CA' }).findings[0]!.sourcing).toBe('memory');
   expect(judge([{ name: 'Phenoxyethanol', percent: '2' }]).findings[0]!.sourcing).toBeUndefined();
 });
+
+test('a share a hair above its limit is written with as many places as tell the two apart', () => {
+  // Annex V entry 1: 0.5 % as acid; 0.59 % of sodium benzoate is 0.50000000...% of the acid.
+  const found = judge([{ name: 'Sodium Benzoate', percent: '0.58999942681' }], { category: 'face-cream' }).findings.find(({ kind }) => kind === 'limit-exceeded');
+  const [measured, limit] = /: (\S+) % as acid, and (\S+) % is the most/.exec(found!.message)!.slice(1);
+  expect(limit).toBe('0.5');
+  expect(measured).toMatch(/^0\.50{7,}\d+$/);
+  expect(found!.arithmetic!.at(-2)!.figure).toBe(`${measured} %`);
+});

@@ -39,3 +39,7 @@ test('the summary never calls anything compliant', () => {
     second: 'No rule in data release 2026-12 is broken in the US; one point waits for a decision.',
   });
 });
+
+test('a column never shows a measured figure as the limit it exceeds', () => {
+  expect(cellWords(finding({ measured: '0.50000001', limit: '0.5' }))).toMatchObject({ figure: '0.50000001 %', against: 'limit 0.5 %' });
+});
