@@ -5,6 +5,7 @@ import type { z } from 'zod';
 import type { dictionaryEntry } from '#shared/contracts/dictionary.contract.ts';
 import { paths } from '#src/app/paths.ts';
 import { sayError } from '#src/lib/api/error.ts';
+import { useFindText } from '#src/lib/use-find-text.ts';
 import { Banner } from '#src/ui/banner.tsx';
 import { Button } from '#src/ui/button.tsx';
 import { EmptyState } from '#src/ui/empty-state.tsx';
@@ -42,13 +43,14 @@ export function DictionaryRoom() {
     if (key !== 'page') before.delete('page');
     return before;
   }, { replace: true });
+  const [find, setFind] = useFindText(search.get('find') ?? '', (text) => turn('find', text));
   const pages = data ? Math.ceil(data.total / data.pageSize) : 1;
   return (
     <div className="panel dictionary">
       <div className="filters">
         <div className="field">
           <label className="label" htmlFor={findId}>Find by any name, or CAS</label>
-          <input id={findId} type="search" className="input" value={search.get('find') ?? ''} onChange={(event) => turn('find', event.target.value)} />
+          <input id={findId} type="search" className="input" value={find} onChange={(event) => setFind(event.target.value)} />
         </div>
         <SelectField label="Function" value={filter.function ?? ''} onChange={(event) => turn('function', event.target.value)}>
           <option value="">any</option>

@@ -6,6 +6,7 @@ import type { MaterialSummary } from '#shared/contracts/materials.contract.ts';
 import { paths } from '#src/app/paths.ts';
 import { sayError } from '#src/lib/api/error.ts';
 import { sayCount } from '#src/lib/say.ts';
+import { useFindText } from '#src/lib/use-find-text.ts';
 import { TextButton } from '#src/ui/button.tsx';
 import { materialQueries } from './queries.ts';
 import './materials.css';
@@ -24,13 +25,14 @@ export function MaterialList() {
     }
     return before;
   }, { replace: true, preventScrollReset: true });
+  const [typed, setTyped] = useFindText(find, (text) => turn({ find: text, page: '' }));
   const items = data?.items ?? [];
   const pages = data ? Math.ceil(data.total / data.pageSize) : 1;
   return (
     <div className="list">
       <div className="field px-4 pb-3">
         <label className="label" htmlFor={id}>Find by name, INCI or CAS</label>
-        <input id={id} type="search" className="input" value={find} onChange={(event) => turn({ find: event.target.value, page: '' })} />
+        <input id={id} type="search" className="input" value={typed} onChange={(event) => setTyped(event.target.value)} />
       </div>
       {error ? <p className="error px-4" role="alert">{sayError(error)}</p> : null}
       <Rows items={items} search={search.toString()} />

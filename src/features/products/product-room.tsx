@@ -5,6 +5,7 @@ import { MARKETS } from '#shared/law/types.ts';
 import type { Market } from '#shared/law/types.ts';
 import { paths } from '#src/app/paths.ts';
 import { sayError } from '#src/lib/api/error.ts';
+import { useFindText } from '#src/lib/use-find-text.ts';
 import { Banner } from '#src/ui/banner.tsx';
 import { Button, LinkButton } from '#src/ui/button.tsx';
 import { EmptyState } from '#src/ui/empty-state.tsx';
@@ -34,13 +35,14 @@ export function ProductRoom({ mayEdit }: { mayEdit: boolean }) {
     if (key !== 'page') before.delete('page');
     return before;
   }, { replace: true });
+  const [find, setFind] = useFindText(search.get('find') ?? '', (text) => turn('find', text));
   const isNarrowed = filter.find !== undefined || filter.market !== undefined;
   return (
     <div className="panel">
       <div className="filters">
         <div className="field">
           <label className="label" htmlFor={findId}>Find by name</label>
-          <input id={findId} type="search" className="input" value={search.get('find') ?? ''} onChange={(event) => turn('find', event.target.value)} />
+          <input id={findId} type="search" className="input" value={find} onChange={(event) => setFind(event.target.value)} />
         </div>
         <div className="switch" role="group" aria-label="Sold in">
           {(['', ...MARKETS] as const).map((market: Market | '') => <button key={market} type="button" aria-pressed={(filter.market ?? '') === market} onClick={() => turn('market', market)}>{market || 'All'}</button>)}
