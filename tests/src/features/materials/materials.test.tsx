@@ -24,18 +24,18 @@ beforeEach(() => {
   localStorage.clear();
   const summary = { id: OAT.id, version: 4, tradeName: OAT.tradeName, supplier: OAT.supplier, declareAs: 'ingredients', parts: 2, constituents: 0, inci: ['Aqua', 'Glycerin'] };
   server = signedIn(new FakeServer())
-    .on(getHouse, () => ({ id: uuid(70), version: 1, name: 'Brackenmere Bathhouse', brand: 'Brackenmere', responsiblePerson: {}, usContact: '', canadaContact: '', countryOfOrigin: '', temperatureUnit: 'C', members: [] }))
+    .on(getHouse, () => ({ id: uuid(70), version: 1, name: 'Brackenmere Bathhouse', brand: 'Brackenmere', responsiblePerson: {}, usContact: '', canadaContact: '', countryOfOrigin: '', temperatureUnit: 'C' as const, members: [] }))
     .on(listMaterials, ({ query }) => {
       const items = !query.get('find') || 'oat extract'.includes(query.get('find')!) ? [summary] : [];
       return { items, total: items.length, page: 1, pageSize: 50 };
     })
     .on(getMaterial, () => OAT)
-    .on(searchDictionary, ({ query }) => ({ items: 'glycerin'.startsWith(query.get('q')!.toLowerCase()) ? [{ entry: GLYCERIN, matched: 'Glycerin', by: 'inci' }] : [] }))
+    .on(searchDictionary, ({ query }) => ({ items: 'glycerin'.startsWith(query.get('q')!.toLowerCase()) ? [{ entry: GLYCERIN, matched: 'Glycerin', by: 'inci' as const }] : [] }))
     .on(resolveNames, ({ body }) => ({
       release: 'test',
       items: (body as { names: { name: string }[] }).names.map(({ name }) => {
         const known = [GLYCERIN, AQUA].find((one) => one.inci.toLowerCase() === name.toLowerCase());
-        return { name, entry: known ?? null, match: known ? 'exact' : 'unknown', suggestions: known ? [] : [GLYCERIN] };
+        return { name, entry: known ?? null, match: known ? ('exact' as const) : ('unknown' as const), suggestions: known ? [] : [GLYCERIN] };
       }),
     }));
 });

@@ -16,7 +16,7 @@ const SHELF = [row(1, 'Sluice Wash', { stop: 0, decide: 2, note: 1 }), row(2, 'H
 let server: FakeServer;
 beforeEach(() => {
   server = signedIn(new FakeServer())
-    .on(listCategories, () => ({ release: 'test', items: [{ slug: 'body-wash', title: 'Body wash', exposure: 'rinse-off', decorative: false }, { slug: 'body-lotion', title: 'Body lotion', exposure: 'leave-on', decorative: false }] }))
+    .on(listCategories, () => ({ release: 'test', items: [{ slug: 'body-wash', title: 'Body wash', exposure: 'rinse-off' as const, decorative: false }, { slug: 'body-lotion', title: 'Body lotion', exposure: 'leave-on' as const, decorative: false }] }))
     .on(listProducts, ({ query }) => {
       const items = SHELF.filter((one) => one.name.toLowerCase().includes((query.get('find') ?? '').toLowerCase()) && (!query.get('market') || (one.markets as string[]).includes(query.get('market')!)));
       return { items, total: items.length, page: 1, pageSize: 50 };
