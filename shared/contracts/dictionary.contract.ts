@@ -56,6 +56,12 @@ export const listDictionary = endpoint({
   }),
   response: z.object({ items: z.array(dictionaryEntry), total: z.int(), page: z.int(), pageSize: z.int(), functions: z.array(z.string()) }),
 });
+/** Every name that the house sees, for reading lists in the browser. Kept by the browser until the tables change. */
+export const listDictionaryNames = endpoint({
+  method: 'GET',
+  path: '/dictionary/names',
+  response: z.object({ release: z.string(), entries: z.unknown() }),
+});
 /** Published ranges of an essential oil's constituents, to pre-fill a material. */
 export const listOilProfiles = endpoint({
   method: 'GET',

@@ -13,11 +13,17 @@ import { splitList, type WrittenName } from './split-list.ts';
 export const LONGEST_TEXT = 200_000;
 export const MOST_NAMES = 500;
 /** Control characters other than tabs and the ends of lines and pages. */
-// eslint-disable-next-line no-control-regex -- they are what is looked for
 const NO_TEXT = /[\u0000-\u0008\u000E-\u001F\u007F\uFFFD]/;
 
+/** What was found of one name: where order put it, its bounds, and the law's maximum. */
+export interface ReadName {
+  readonly one: ListName;
+  readonly place: Place;
+  readonly bounds: Bounds;
+  readonly cap?: Cap;
+}
 /** A pasted list, read: or why it cannot be. */
-export type Reading = { readonly document: ReadingDocument } | { readonly mistake: string };
+export type Reading = { readonly document: ReadingDocument; readonly names: readonly ReadName[]; readonly findings: readonly Finding[] } | { readonly mistake: string };
 
 /**
  * Reads a pasted ingredient list: its names, the exact bounds on each one's share, and what
@@ -32,8 +38,12 @@ export function readList(text: string, options: ReadingOptions): Reading {
   if (written.length > MOST_NAMES) return { mistake: `The text holds more than ${MOST_NAMES} names.` };
   const names = recognise(written, options);
   const { boundsOf, impossible, caps } = findBounds(names, options);
-  const findings = [...judgeDays(options, options.law), ...impossible, ...judgeList(names, boundsOf, options), ...judgePlaces(names, options), ...judgeNames(names, options)];
+  const found = [...judgeDays(options, options.law), ...impossible, ...judgeList(names, boundsOf, options), ...judgePlaces(names, options), ...judgeNames(names, options)];
+  const places = placesOf(names, caps, options);
+  const findings = byWeight(distinct(found));
   return {
+    names: names.map((one, index) => ({ one, place: places[index]!, bounds: boundsOf.get(one)!, ...(caps.has(one) && { cap: caps.get(one)! }) })),
+    findings,
     document: {
       document: 'reading/1',
       dataRelease: `law ${options.law.release}, dictionary ${options.dictionary.release}`,
@@ -41,7 +51,7 @@ export function readList(text: string, options: ReadingOptions): Reading {
       category: options.category.slug,
       entries: names.map(({ written, entry, match, suggestions }) => ({ written, inci: entry?.inci ?? null, match, suggestions: [...suggestions] })),
       bounds: presentBounds(names, boundsOf, impossible.length > 0 ? new Map() : caps),
-      findings: byWeight(distinct(findings)),
+      findings: findings.map((one) => ({ ...one })),
     },
   };
 }
@@ -124,6 +134,6 @@ function distinct(findings: readonly Finding[]): Finding[] {
 }
 
 const WEIGHTS: readonly Severity[] = ['stop', 'decide', 'note'];
-function byWeight(findings: readonly Finding[]): ReadingDocument['findings'] {
-  return WEIGHTS.flatMap((severity) => findings.filter((finding) => finding.severity === severity)).map((one) => ({ ...one }));
+function byWeight(findings: readonly Finding[]): Finding[] {
+  return WEIGHTS.flatMap((severity) => findings.filter((finding) => finding.severity === severity));
 }

@@ -48,6 +48,7 @@ const MATRIX: Readonly<Record<string, readonly Role[]>> = {
   'GET /dictionary/search': ALL,
   'POST /dictionary/resolve': ALL,
   'GET /dictionary/oils': ALL,
+  'GET /dictionary/names': ALL,
 };
 
 let stage: TestApp;

@@ -3,6 +3,7 @@ import type { OilProfile } from '#shared/dictionary/oil-profiles.ts';
 import type { Dictionary, DictionaryEntry } from '#shared/dictionary/types.ts';
 import type { RunQuery } from '#server/auth/auth-deps.ts';
 import { route, type Route } from '#server/http/route.ts';
+import { listNames } from './names.ts';
 import { listDictionary, resolveNames, searchDictionary } from './dictionary.service.ts';
 
 export interface DictionaryDeps {
@@ -35,6 +36,7 @@ export function dictionaryRoutes({ query, dictionary, oils }: DictionaryDeps): R
       const page = await listDictionary(query, asked);
       return { ...page, items: page.items.map(presentEntry), functions: [...page.functions] };
     }),
+    route(contract.listDictionaryNames, { may: ['read', 'materials'] }, ({ inHouse }) => inHouse(listNames)),
     route(contract.listOilProfiles, { may: ['read', 'materials'] }, () =>
       Promise.resolve({ items: oils.map((oil) => ({ ...oil, constituents: oil.constituents.map((one) => ({ ...one })) })) }),
     ),
