@@ -16,6 +16,7 @@ function say(error: unknown): Said {
   if (isRefusal(error, 'not-found') || (isRouteErrorResponse(error) && error.status === 404)) return notFound;
   if (isRefusal(error, 'not-allowed')) return { title: 'Not open to you', words: `${error.message} An owner of the house can give you the role for it.`, mayRetry: false };
   if (error instanceof OfflineError) return { title: 'Colophon cannot be reached', words: 'The connection is lost. What you typed is kept on this computer. Try again in a moment.', mayRetry: true };
+  if (isRefusal(error, 'unavailable')) return { title: 'Not now', words: error.message, mayRetry: true };
   return {
     title: 'This page could not be shown',
     words: 'The fault is on our side. Nothing you saved is lost, and drafts are kept on this computer.',

@@ -66,7 +66,7 @@ function Opening() {
   return (
     <>
       <div className="glass"><div className="wrap" /></div>
-      <div className="deck" aria-busy="true"><div className="wrap deck-head"><p className="facts">&nbsp;</p><h1>&nbsp;</h1></div></div>
+      <main id="main" aria-busy="true"><div className="deck"><div className="wrap deck-head"><p className="facts">&nbsp;</p><h1><span className="sr-only">Opening Colophon</span>&nbsp;</h1></div></div></main>
     </>
   );
 }

@@ -1,6 +1,6 @@
 import { memo, type KeyboardEvent, type PointerEvent } from 'react';
 import { toDecimal } from '#shared/kernel/rational.ts';
-import { Menu, type MenuEntry } from '#src/ui/menu.tsx';
+import { GripMenu, type MenuEntry } from '#src/ui/menu.tsx';
 import { Icon } from '#src/ui/icon.tsx';
 import { AmountField } from './amount-field.tsx';
 import type { WeighedLine } from './weigh.ts';
@@ -57,9 +57,9 @@ export const LineRow = memo(function LineRow(props: LineRowProps) {
     >
       <th scope="row">
         {isReadOnly ? null : (
-          // The wrapper starts a drag by pointer; the button inside opens the same moves as words.
-          <span className="handle" onPointerDown={(event) => props.onGrab(event, line.id)}>
-            <Menu className="handle-button" label={`${name}: move, note, remove`} trigger={<Icon name="grip" />} entries={menu()} />
+          // The wrapper starts a drag by pointer, before the button inside, which opens the same moves as words, keeps the press to itself.
+          <span className="handle" onPointerDownCapture={(event) => props.onGrab(event, line.id)}>
+            <GripMenu className="handle-button" label={`${name}: move, note, remove`} trigger={<Icon name="grip" />} entries={menu()} />
           </span>
         )}
         <span className="material" title={name}>
