@@ -13,6 +13,10 @@ export const paths = {
   verdicts: (id: string) => `/products/${id}/verdicts`,
   label: (id: string) => `/products/${id}/label`,
   report: (id: string) => `/products/${id}/report`,
+  /** Reading a pasted ingredient list. */
+  read: '/read',
+  /** Every dated rule, from one market if told. */
+  calendar: '/calendar',
   materials: '/materials',
   newMaterial: '/materials/new',
   material: (id: string) => `/materials/${id}`,

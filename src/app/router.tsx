@@ -46,6 +46,7 @@ export function routesOf(client: QueryClient): RouteObject[] {
                 { path: ':id', lazy: page(client, () => import('#src/routes/material.tsx')), ErrorBoundary: PageError },
               ],
             },
+            { path: 'read', lazy: page(client, () => import('#src/routes/read.tsx')) },
             { path: 'dictionary', lazy: page(client, () => import('#src/routes/dictionary.tsx')) },
             { path: 'dictionary/:inci', lazy: page(client, () => import('#src/routes/dictionary-entry.tsx')) },
             { path: 'house', lazy: page(client, () => import('#src/routes/house.tsx')) },

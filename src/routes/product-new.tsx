@@ -30,7 +30,7 @@ export function Component() {
       <Deck
         title="New product"
         facts={[house.name]}
-        tabs={<TabLinks label="How to begin" tabs={WAYS.map(([key, word]) => ({ to: `${paths.newProduct}?from=${key}`, word, isCurrent: key === way }))} />}
+        tabs={<TabLinks label="How to begin" tabs={[...WAYS.map(([key, word]) => ({ to: `${paths.newProduct}?from=${key}`, word, isCurrent: key === way })), { to: paths.read, word: 'From an ingredient list', isCurrent: false }]} />}
       />
       <div className="wrap full">
         <Sheet className="hung">

@@ -20,7 +20,7 @@ export function Component() {
   const mayEdit = can(house, 'edit', 'products');
   return (
     <>
-      <Deck title="Products" facts={[house.name, ...(data ? [sayCount(data.total, 'product')] : []), `data release ${dataRelease}`]} acts={mayEdit ? <LinkButton weight="act" to={paths.newProduct}>New product</LinkButton> : undefined} />
+      <Deck title="Products" facts={[house.name, ...(data ? [sayCount(data.total, 'product')] : []), `data release ${dataRelease}`]} acts={<><LinkButton to={paths.read}>Read a list</LinkButton>{mayEdit ? <LinkButton weight="act" to={paths.newProduct}>New product</LinkButton> : null}</>} />
       <div className="wrap full">
         <Sheet className="hung"><ProductRoom mayEdit={mayEdit} /></Sheet>
         <p className="foot">Judged as of today, in the markets each product is sold in. “No rule broken” means none that data release {dataRelease} holds; it is no certificate.</p>
