@@ -229,6 +229,9 @@ class MixedSubstance implements BlendedSubstance {
   get first(): PreparedPart {
     return this.#planned.first;
   }
+  get properties(): readonly string[] | undefined {
+    return this.#planned.first.entry?.properties;
+  }
   get occurrences(): readonly Occurrence[] {
     return this.#planned.occurrences;
   }

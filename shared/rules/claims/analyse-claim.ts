@@ -1,28 +1,16 @@
-import { claimTables, namedTables, type ClaimClass, type ClaimRow, type Frame, type LanguageTables } from './claim-tables.ts';
-import { longestAt, quote, readPhrase, standsAt, tokenise, type Phrase, type Span, type Token } from './match-words.ts';
+import { findAbsences, type AbsenceHit } from './absences.ts';
+import { claimTables, type ClaimRow, type Frame, type LanguageTables } from './claim-tables.ts';
+import { isDenied } from './denial.ts';
+import { quote, standsAt, tokenise, type Span, type Token } from './match-words.ts';
+import { findNamed, type NamedHit } from './named.ts';
+import { findPh, type PhHit } from './ph.ts';
 
 /** A row of the tables that a claim's words meet. */
 export interface RowHit {
   readonly row: ClaimRow;
   readonly words: string;
-  readonly isDenied: boolean;
   /** Only of the look of it. */
   readonly isSoftened: boolean;
-}
-
-/** A class of ingredients that the claim says are absent. */
-export interface AbsenceHit {
-  readonly claimClass: ClaimClass;
-  readonly words: string;
-}
-
-/** An ingredient that the text names as if it were in the product. */
-export interface NamedHit {
-  readonly word: string;
-  /** Folded beginnings of INCI names, any of which makes it true. */
-  readonly starts: readonly string[];
-  /** Said to be contained ("with oat", "oat oil"), not only named. */
-  readonly isContained: boolean;
 }
 
 /** What a text says, whatever the product and the market. */
@@ -30,12 +18,13 @@ export interface Analysis {
   readonly rows: readonly RowHit[];
   readonly absences: readonly AbsenceHit[];
   readonly named: readonly NamedHit[];
+  readonly ph: PhHit | undefined;
 }
 
-/** How far before a word a denial or "the look of" reaches, and how far "free from" lists. */
-const DENIAL_REACH = 4;
+/** How far from a word its companion may stand, and how far before it "the look of" reaches. */
+const NEAR_REACH = 7;
 const LOOK_REACH = 6;
-const LIST_REACH = 16;
+const REMEMBERED = 2000;
 
 const known = new Map<string, Analysis | undefined>();
 
@@ -44,193 +33,68 @@ const known = new Map<string, Analysis | undefined>();
  * Remembered, as the same texts are judged again at every change of the formula.
  */
 export function analyseClaim(text: string, lang: string): Analysis | undefined {
-  const language = lang.toLowerCase().split('-')[0]!;
+  const language = lang.toLowerCase().split(/[-_]/)[0]!;
   const key = `${language}|${text}`;
   if (known.has(key)) return known.get(key);
-  if (known.size > 1000) known.clear();
+  if (known.size > REMEMBERED) known.clear();
   const tables = claimTables(language);
-  const analysis = tables && analyse(text, language, tables);
+  const analysis = tables && analyse(text, tables);
   known.set(key, analysis);
   return analysis;
 }
 
-function analyse(text: string, lang: string, tables: LanguageTables): Analysis {
-  const tokens = tokenise(text, lang);
-  const spans = findAbsences(tokens, tables);
+function analyse(text: string, tables: LanguageTables): Analysis {
+  const tokens = tokenise(text, tables.lang);
+  const absences = findAbsences(text, tokens, tables);
   return {
     rows: findRows(text, tokens, tables),
-    absences: spans.map(({ claimClass, span }) => ({ claimClass, words: quote(text, tokens, span) })),
-    named: lang === 'en' ? findNamed(tokens, tables.frame, spans.map(({ span }) => span)) : [],
+    absences,
+    named: findNamed(text, tokens, tables, absences.map(({ span }) => span)),
+    ph: findPh(text, tokens, tables.frame),
   };
 }
 
 function findRows(text: string, tokens: readonly Token[], { rows, frame }: LanguageTables): RowHit[] {
-  return rows.flatMap((row) => {
-    for (let at = 0; at < tokens.length; at += 1) {
-      const span = longestAt(row.phrases, tokens, at);
-      if (!span || isExcepted(row, tokens, span)) continue;
-      const near = row.near.length === 0 ? undefined : findNear(row.near, tokens, span);
-      if (row.near.length > 0 && !near) continue;
-      const words = near ? quote(text, tokens, { from: near.from < span.from ? near.from : span.from, to: near.to > span.to ? near.to : span.to }) : quote(text, tokens, span);
-      const first = near && near.from < span.from ? near.from : span.from;
-      return [{ row, words, isDenied: isDenied(tokens, first, frame) || isDenied(tokens, span.from, frame), isSoftened: row.softens && isLook(tokens, span, frame) }];
+  const found = new Map<ClaimRow, RowHit>();
+  for (let at = 0; at < tokens.length; at += 1) {
+    for (const { item: row, span } of rows.allAt(tokens, at)) {
+      if (found.has(row) || isExcepted(row, tokens, span)) continue;
+      const near = row.near ? findNear(row.near, tokens, span) : span;
+      if (!near) continue;
+      const whole = { from: near.from < span.from ? near.from : span.from, to: near.to > span.to ? near.to : span.to };
+      if (isDenied(tokens, whole.from, frame) || isDenied(tokens, span.from, frame)) continue;
+      found.set(row, { row, words: quote(text, tokens, whole), isSoftened: row.softens && isLook(tokens, span, frame) });
     }
-    return [];
-  });
+  }
+  return [...found.values()];
 }
 
 function isExcepted(row: ClaimRow, tokens: readonly Token[], span: Span): boolean {
-  for (let at = span.from - 3; at <= span.to; at += 1) {
+  for (let at = span.from < 3 ? 0 : span.from - 3; at <= span.to; at += 1) {
     if (row.unless.some((phrase) => standsAt(phrase, tokens, at) && at + phrase.parts.length >= span.from)) return true;
   }
   return false;
 }
 
-function findNear(phrases: readonly Phrase[], tokens: readonly Token[], span: Span): Span | undefined {
+/** The nearest companion before or after, within the clause. */
+function findNear(near: NonNullable<ClaimRow['near']>, tokens: readonly Token[], span: Span): Span | undefined {
   const { clause } = tokens[span.from]!;
-  for (let at = 0; at < tokens.length; at += 1) {
-    if (tokens[at]!.clause !== clause) continue;
-    const found = longestAt(phrases, tokens, at);
-    if (found && (found.to <= span.from || found.from >= span.to)) return found;
+  for (let step = 1; step <= NEAR_REACH; step += 1) {
+    for (const at of [span.from - step, span.to + step - 1]) {
+      if (tokens[at]?.clause !== clause) continue;
+      const found = near.longestAt(tokens, at);
+      if (found && (found.span.to <= span.from || found.span.from >= span.to)) return found.span;
+    }
   }
   return undefined;
 }
 
-/** "Not intended to treat", "does not": a denial shortly before, unless it is "not only" or "no more". */
-function isDenied(tokens: readonly Token[], at: number, frame: Frame): boolean {
-  const { clause } = tokens[at]!;
-  for (let before = at - 1; before >= 0 && before >= at - DENIAL_REACH; before -= 1) {
-    const token = tokens[before]!;
-    if (token.clause !== clause) return false;
-    if (frame.not.has(token.word) && !frame.notUnless.has(tokens[before + 1]!.word)) return true;
-  }
-  return false;
-}
-
 function isLook(tokens: readonly Token[], span: Span, frame: Frame): boolean {
   const { clause } = tokens[span.from]!;
+  const next = tokens[span.to];
+  if (next?.clause === clause && frame.lookAfter.has(next.word)) return true;
   for (let at = span.from - LOOK_REACH; at < span.to; at += 1) {
-    if (tokens[at]?.clause === clause && frame.look.some((phrase) => standsAt(phrase, tokens, at))) return true;
-  }
-  return false;
-}
-
-interface Absence {
-  readonly claimClass: ClaimClass;
-  readonly span: Span;
-}
-
-/** "Free from parabens and silicones", "paraben- and silicone-free", "vegan". */
-function findAbsences(tokens: readonly Token[], tables: LanguageTables): Absence[] {
-  const found: Absence[] = [];
-  const add = (one: Absence): void => {
-    if (!found.some(({ claimClass }) => claimClass === one.claimClass)) found.push(one);
-  };
-  for (let at = 0; at < tokens.length; at += 1) {
-    const start = longestAt(tables.frame.before, tokens, at);
-    if (start) for (const one of listAfter(tokens, start, tables)) add(one);
-    if (tables.frame.after.has(tokens[at]!.word) && !/^(from|of)$/.test(tokens[at + 1]?.word ?? '')) for (const one of listBefore(tokens, at, tables)) add(one);
-    for (const claimClass of tables.classes) {
-      const plain = longestAt(claimClass.plain, tokens, at);
-      if (plain && !isDenied(tokens, at, tables.frame)) add({ claimClass, span: plain });
-      // German joins the word and "frei": parabenfrei.
-      const joined = [...tables.frame.after].some((ending) => ending !== 'free' && tokens[at]!.word.endsWith(ending) && isClassWord(claimClass, tokens[at]!.word.slice(0, -ending.length)));
-      if (joined) add({ claimClass, span: { from: at, to: at + 1 } });
-    }
-  }
-  return found;
-}
-
-function isClassWord(claimClass: ClaimClass, word: string): boolean {
-  return word.length > 2 && claimClass.words.some(({ parts }) => parts.length === 1 && (parts[0]!.isStem ? word.startsWith(parts[0]!.text) : word === parts[0]!.text));
-}
-
-function longestClass(tokens: readonly Token[], at: number, tables: LanguageTables): Absence | undefined {
-  let best: Absence | undefined;
-  for (const claimClass of tables.classes) {
-    const span = longestAt(claimClass.words, tokens, at);
-    if (span && (!best || span.to > best.span.to)) best = { claimClass, span };
-  }
-  return best;
-}
-
-function listAfter(tokens: readonly Token[], start: Span, tables: LanguageTables): Absence[] {
-  const found: Absence[] = [];
-  const { clause } = tokens[start.from]!;
-  let strange = 0;
-  for (let at = start.to; at < tokens.length && at < start.to + LIST_REACH; ) {
-    const token = tokens[at]!;
-    if (token.clause !== clause || tables.frame.stop.has(token.word) || strange > 2) break;
-    const hit = longestClass(tokens, at, tables);
-    if (hit) {
-      found.push({ claimClass: hit.claimClass, span: { from: start.from, to: hit.span.to } });
-      at = hit.span.to;
-      strange = 0;
-    } else {
-      if (!tables.frame.and.has(token.word)) strange += 1;
-      at += 1;
-    }
-  }
-  return found;
-}
-
-function listBefore(tokens: readonly Token[], at: number, tables: LanguageTables): Absence[] {
-  const found: Absence[] = [];
-  const { clause } = tokens[at]!;
-  for (let end = at; end > 0; ) {
-    const hit = [end - 3, end - 2, end - 1].map((from) => (from < 0 ? undefined : longestClass(tokens, from, tables))).find((one) => one?.span.to === end);
-    if (hit && tokens[hit.span.from]!.clause === clause) {
-      found.push({ claimClass: hit.claimClass, span: { from: hit.span.from, to: at + 1 } });
-      end = hit.span.from;
-    } else if (found.length > 0 && tables.frame.and.has(tokens[end - 1]!.word)) end -= 1;
-    else break;
-  }
-  return found;
-}
-
-const containing = namedTables.containing.map(readPhrase);
-const partWords = new Set(namedTables.parts);
-const scentWords = new Set(namedTables.scent);
-const byFirstWord = new Map<string, { readonly phrase: Phrase; readonly word: string; readonly starts: readonly string[] }[]>();
-for (const { word, starts } of namedTables.ingredients) {
-  const phrase = readPhrase(word);
-  const first = phrase.parts[0]!.text;
-  byFirstWord.set(first, [...(byFirstWord.get(first) ?? []), { phrase, word, starts: starts.map((text) => text.replaceAll(' ', '')) }]);
-}
-/** "Like silk" and "collagen production" name nothing that is in the product. */
-const LIKENESS = new Set(['like', 'as']);
-const ELSEWHERE = new Set(['production', 'synthesis', 'levels', 'fibres', 'fibers', 'free', 'feel', 'touch', 'soft', 'colour', 'color', 'tone', 'shade', 'pink', 'tinted']);
-
-function findNamed(tokens: readonly Token[], frame: Frame, absences: readonly Span[]): NamedHit[] {
-  const found: NamedHit[] = [];
-  for (let at = 0; at < tokens.length; ) {
-    const best = (byFirstWord.get(tokens[at]!.word) ?? byFirstWord.get(tokens[at]!.word.replace(/s$/, '')) ?? [])
-      .filter(({ phrase }) => phrase.parts.slice(1).every((part, index) => tokens[at + index + 1]?.word === part.text))
-      .sort((a, b) => b.phrase.parts.length - a.phrase.parts.length)[0];
-    if (!best) {
-      at += 1;
-      continue;
-    }
-    const span = { from: at, to: at + best.phrase.parts.length };
-    if (!isElsewhere(tokens, span, frame, absences)) found.push({ word: best.word, starts: best.starts, isContained: isContained(tokens, span) });
-    at = span.to;
-  }
-  return found;
-}
-
-function isElsewhere(tokens: readonly Token[], span: Span, frame: Frame, absences: readonly Span[]): boolean {
-  if (absences.some(({ from, to }) => span.from >= from && span.from < to) || isDenied(tokens, span.from, frame)) return true;
-  const before = tokens[span.from - 1]?.word ?? '';
-  const next = [tokens[span.to]?.word ?? '', tokens[span.to + 1]?.word ?? ''];
-  const scentBefore = [2, 3].some((back) => scentWords.has(tokens[span.from - back]?.word ?? '')) && before === 'of';
-  return LIKENESS.has(before) || ELSEWHERE.has(next[0]!) || next.some((word) => scentWords.has(word) || word === 'free') || scentBefore;
-}
-
-function isContained(tokens: readonly Token[], span: Span): boolean {
-  if (partWords.has(tokens[span.to]?.word ?? '')) return true;
-  const { clause } = tokens[span.from]!;
-  for (let at = span.from - 7; at < span.from; at += 1) {
-    if (tokens[at]?.clause === clause && containing.some((phrase) => standsAt(phrase, tokens, at))) return true;
+    if (tokens[at]?.clause === clause && frame.look.allAt(tokens, at).length > 0) return true;
   }
   return false;
 }

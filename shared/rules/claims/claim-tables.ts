@@ -1,17 +1,29 @@
-import claims from '#data/parameters/claims.json' with { type: 'json' };
-import named from '#data/parameters/claims-ingredients.json' with { type: 'json' };
+import classesJson from '#data/parameters/claims-classes.json' with { type: 'json' };
+import ingredientsJson from '#data/parameters/claims-ingredients.json' with { type: 'json' };
+import criteriaJson from '#data/parameters/claims-criteria.json' with { type: 'json' };
+import german from '#data/parameters/claims-de.json' with { type: 'json' };
+import english from '#data/parameters/claims-en.json' with { type: 'json' };
+import french from '#data/parameters/claims-fr.json' with { type: 'json' };
 import type { Market, Sourcing } from '#shared/law/types.ts';
-import { readPhrase, type Phrase } from './match-words.ts';
+import { PhraseIndex, readPhrase, type Phrase } from './match-words.ts';
 
 export type ClaimVerdict = 'medicinal' | 'contradicted' | 'evidence';
 
+/** What a verdict is measured by: a key of `claims-criteria.json`. */
+export type Criterion = 'medicine' | 'truthfulness' | 'evidence' | 'honesty' | 'fairness' | 'legal-compliance' | 'animal-testing' | 'injury' | 'named' | `drug-${string}`;
+
+interface Cited {
+  readonly text: string;
+  readonly sourcing: Sourcing;
+}
+
 interface RowJson {
   readonly id: string;
-  readonly lang: string;
   readonly phrases: readonly string[];
   readonly near?: readonly string[];
   readonly unless?: readonly string[];
   readonly softens?: boolean;
+  readonly by?: Criterion;
   readonly verdict: Partial<Record<Market, ClaimVerdict>>;
   readonly why: string;
 }
@@ -24,7 +36,10 @@ interface ClassJson {
   readonly properties?: readonly string[];
   readonly names?: readonly string[];
   readonly perhaps?: readonly string[];
+  readonly perhapsNames?: readonly string[];
+  readonly inPerfume?: boolean;
   readonly agreed?: Partial<Record<Market, ClaimVerdict>>;
+  readonly by?: Criterion;
   readonly why?: string;
 }
 
@@ -35,89 +50,138 @@ interface FrameJson {
   readonly and: readonly string[];
   readonly not: readonly string[];
   readonly notUnless: readonly string[];
+  readonly deniedList: readonly string[];
   readonly look: readonly string[];
-}
-
-interface ClaimsJson {
-  readonly citations: Readonly<Record<ClaimVerdict | 'named', Partial<Record<Market, { readonly text: string; readonly sourcing: Sourcing }>>>>;
-  readonly frames: Readonly<Record<string, FrameJson>>;
-  readonly rows: readonly RowJson[];
-  readonly classes: readonly ClassJson[];
-}
-
-interface NamedJson {
+  readonly lookAfter: readonly string[];
   readonly containing: readonly string[];
   readonly parts: readonly string[];
   readonly scent: readonly string[];
-  readonly ingredients: readonly { readonly word: string; readonly starts: readonly string[] }[];
+  readonly likeness: readonly string[];
+  readonly elsewhere: readonly string[];
+  readonly ph: { readonly word: string; readonly ranges: readonly { readonly phrases: readonly string[]; readonly from: string; readonly to: string }[] };
 }
 
-/** One row of the claims table, its phrases ready to be looked for. */
+interface LanguageJson {
+  readonly frame: FrameJson;
+  readonly rows: readonly RowJson[];
+}
+
+interface IngredientJson {
+  readonly word: string;
+  readonly starts: readonly string[];
+  readonly de?: readonly string[];
+  readonly fr?: readonly string[];
+}
+
+/** One row of the claims table. */
 export interface ClaimRow {
   readonly id: string;
-  readonly phrases: readonly Phrase[];
-  /** One of these stands in the same clause. */
-  readonly near: readonly Phrase[];
+  /** One of these stands nearby, in the same clause. */
+  readonly near: PhraseIndex<true> | undefined;
   /** None of these stands around it. */
   readonly unless: readonly Phrase[];
   /** Speaking of the look only makes it a cosmetic claim. */
   readonly softens: boolean;
+  readonly by: Criterion | undefined;
   readonly verdict: RowJson['verdict'];
   readonly why: string;
 }
 
 /** A class of ingredients that a claim may say are absent. */
-export type ClaimClass = Omit<ClassJson, 'words' | 'plain'> & {
-  readonly words: readonly Phrase[];
-  /** Words that say by themselves that it is absent: "vegan". */
-  readonly plain: readonly Phrase[];
-};
+export type ClaimClass = Omit<ClassJson, 'words' | 'plain'>;
 
-/** How a language says that something is absent, not so, or a matter of looks. */
+/** An ingredient as claims name it; `starts` are folded beginnings of INCI names. */
+export interface NamedIngredient {
+  readonly word: string;
+  readonly starts: readonly string[];
+}
+
+/** How a language says that something is absent, contained, not so, or a matter of looks. */
 export interface Frame {
-  readonly before: readonly Phrase[];
+  readonly before: PhraseIndex<true>;
   readonly after: ReadonlySet<string>;
   readonly stop: ReadonlySet<string>;
   readonly and: ReadonlySet<string>;
   readonly not: ReadonlySet<string>;
   readonly notUnless: ReadonlySet<string>;
-  readonly look: readonly Phrase[];
+  readonly deniedList: ReadonlySet<string>;
+  readonly look: PhraseIndex<true>;
+  readonly lookAfter: ReadonlySet<string>;
+  readonly containing: PhraseIndex<true>;
+  readonly parts: ReadonlySet<string>;
+  readonly scent: ReadonlySet<string>;
+  readonly likeness: ReadonlySet<string>;
+  readonly elsewhere: ReadonlySet<string>;
+  readonly phWord: string;
+  readonly phRanges: PhraseIndex<{ readonly from: string; readonly to: string }>;
 }
 
 /** Everything the tables hold for one language. */
 export interface LanguageTables {
-  readonly rows: readonly ClaimRow[];
-  readonly classes: readonly ClaimClass[];
+  readonly lang: string;
   readonly frame: Frame;
+  readonly rows: PhraseIndex<ClaimRow>;
+  /** Words by which a class is called. */
+  readonly classes: PhraseIndex<ClaimClass>;
+  /** Words that say by themselves that a class is absent: "vegan". */
+  readonly plain: PhraseIndex<ClaimClass>;
+  readonly ingredients: PhraseIndex<NamedIngredient>;
+  /** Classes called by one word, for words joined with "frei" or "free". */
+  readonly single: readonly { readonly text: string; readonly isStem: boolean; readonly claimClass: ClaimClass }[];
 }
 
-const json = claims as unknown as ClaimsJson;
+const LANGUAGES: Readonly<Record<string, LanguageJson>> = { en: english as LanguageJson, de: german as LanguageJson, fr: french as LanguageJson };
+const classes = classesJson.classes as readonly ClassJson[];
+const ingredients = ingredientsJson.ingredients as readonly IngredientJson[];
 const opened = new Map<string, LanguageTables | undefined>();
 
-export const CLAIM_LANGUAGES: readonly string[] = Object.keys(json.frames);
-export const claimCitations: ClaimsJson['citations'] = json.citations;
-export const namedTables: NamedJson = named;
+/** Languages in which claims can be judged. */
+export const CLAIM_LANGUAGES: readonly string[] = Object.keys(LANGUAGES);
+/** Each criterion as each market's law cites it, and how firmly that is sourced. */
+export const claimCriteria = criteriaJson.criteria as unknown as Readonly<Record<Criterion, Readonly<Record<Market, Cited>>>>;
 
-/** The tables of a language, or nothing where claims in it cannot be judged. */
+/** The tables of a language, opened on first use; nothing where claims in it cannot be judged. */
 export function claimTables(lang: string): LanguageTables | undefined {
-  if (!opened.has(lang)) opened.set(lang, openTables(lang));
+  if (!opened.has(lang)) opened.set(lang, LANGUAGES[lang] && openTables(lang, LANGUAGES[lang]));
   return opened.get(lang);
 }
 
-const phrases = (texts: readonly string[] | undefined): readonly Phrase[] => (texts ?? []).map(readPhrase);
+const marks = (texts: readonly string[]): PhraseIndex<true> => new PhraseIndex(texts.map((text) => [readPhrase(text), true] as const));
 
-function openTables(lang: string): LanguageTables | undefined {
-  const frame = json.frames[lang];
-  if (!frame) return undefined;
+function openTables(lang: string, { frame, rows }: LanguageJson): LanguageTables {
+  const ofLanguage = classes.map(({ words, plain, ...claimClass }) => ({ claimClass, words: (words[lang] ?? []).map(readPhrase), plain: (plain?.[lang] ?? []).map(readPhrase) }));
   return {
-    rows: json.rows.filter((row) => row.lang === lang).map((row) => ({
-      id: row.id, verdict: row.verdict, why: row.why, softens: row.softens ?? false,
-      phrases: phrases(row.phrases), near: phrases(row.near), unless: phrases(row.unless),
+    lang,
+    frame: openFrame(frame),
+    rows: new PhraseIndex(rows.flatMap((row) => {
+      const item: ClaimRow = { id: row.id, verdict: row.verdict, why: row.why, by: row.by, softens: row.softens ?? false, near: row.near && marks(row.near), unless: (row.unless ?? []).map(readPhrase) };
+      return row.phrases.map((text) => [readPhrase(text), item] as const);
     })),
-    classes: json.classes.map(({ words, plain, ...rest }) => ({ ...rest, words: phrases(words[lang]), plain: phrases(plain?.[lang]) })),
-    frame: {
-      before: phrases(frame.before), look: phrases(frame.look),
-      after: new Set(frame.after), stop: new Set(frame.stop), and: new Set(frame.and), not: new Set(frame.not), notUnless: new Set(frame.notUnless),
-    },
+    classes: new PhraseIndex(ofLanguage.flatMap(({ claimClass, words }) => words.map((phrase) => [phrase, claimClass] as const))),
+    plain: new PhraseIndex(ofLanguage.flatMap(({ claimClass, plain }) => plain.map((phrase) => [phrase, claimClass] as const))),
+    ingredients: openIngredients(lang),
+    single: ofLanguage.flatMap(({ claimClass, words }) => words.filter(({ parts }) => parts.length === 1).map(({ parts }) => ({ ...parts[0]!, claimClass }))),
+  };
+}
+
+/** English words also in the plural; other languages by stems. */
+function openIngredients(lang: string): PhraseIndex<NamedIngredient> {
+  return new PhraseIndex(
+    ingredients.flatMap(({ word, starts, ...words }) => {
+      const item: NamedIngredient = { word, starts: starts.map((text) => text.replaceAll(' ', '')) };
+      const texts = lang === 'en' ? [word, `${word}s`] : ((words as Readonly<Record<string, readonly string[]>>)[lang] ?? []);
+      return texts.map((text) => [readPhrase(text), item] as const);
+    }),
+  );
+}
+
+function openFrame({ ph, ...frame }: FrameJson): Frame {
+  return {
+    before: marks(frame.before), look: marks(frame.look), containing: marks(frame.containing),
+    after: new Set(frame.after), stop: new Set(frame.stop), and: new Set(frame.and), not: new Set(frame.not), notUnless: new Set(frame.notUnless),
+    deniedList: new Set(frame.deniedList), lookAfter: new Set(frame.lookAfter), parts: new Set(frame.parts), scent: new Set(frame.scent),
+    likeness: new Set(frame.likeness), elsewhere: new Set(frame.elsewhere),
+    phWord: ph.word,
+    phRanges: new PhraseIndex(ph.ranges.flatMap(({ phrases, from, to }) => phrases.map((text) => [readPhrase(text), { from, to }] as const))),
   };
 }

@@ -1,20 +1,26 @@
+import { compare, decimal, toDecimal } from '#shared/kernel/rational.ts';
 import type { Finding, FindingKind } from '#shared/engine/types.ts';
 import type { Context } from '../context.ts';
 import type { NotChecked } from '../outcome.ts';
-import { analyseClaim, type Analysis, type NamedHit } from './analyse-claim.ts';
-import { CLAIM_LANGUAGES, claimCitations, type ClaimVerdict } from './claim-tables.ts';
-import { findMembers, holdsNamed } from './composition.ts';
+import type { AbsenceHit } from './absences.ts';
+import { analyseClaim, type Analysis } from './analyse-claim.ts';
+import { CLAIM_LANGUAGES, claimCriteria, type ClaimClass, type ClaimVerdict, type Criterion } from './claim-tables.ts';
+import { findMembers, holdsNamed, namedIngredients, shareOf, withWord } from './composition.ts';
+import type { NamedHit } from './named.ts';
+import { judgePh } from './ph.ts';
 
 /** One point that a text stands or falls on. */
 interface Point {
   readonly verdict: ClaimVerdict;
+  readonly by: Criterion;
   readonly rule: string;
   /** The words it stands on, as written. */
   readonly words: string;
   readonly why: string;
   readonly needs?: readonly string[];
-  readonly isNamed?: boolean;
 }
+
+const DEFAULT_BY: Readonly<Record<ClaimVerdict, Criterion>> = { medicinal: 'medicine', contradicted: 'truthfulness', evidence: 'evidence' };
 
 /**
  * Claims and the product's name, by the common criteria of Regulation (EU) No 655/2013 and the
@@ -27,55 +33,92 @@ interface Point {
  */
 export function judgeClaims(context: Context, notChecked: NotChecked[]): Finding[] {
   const { name, claims } = context.document.product;
-  const findings = claims.flatMap(({ text, lang }) => {
+  const findings: Finding[] = [];
+  for (const { text, lang } of claims) {
     const analysis = analyseClaim(text, lang);
-    if (!analysis) {
-      notChecked.push({ rule: 'claims/language', subject: text, citation: citationOf('evidence', context).text, words: `Claims are judged in ${CLAIM_LANGUAGES.join(', ')} only; this one is marked "${lang}".` });
-      return [];
-    }
-    return present(text, [...pointsOfRows(analysis, context), ...pointsOfAbsences(analysis, context), ...pointsOfNamed(analysis.named, context, false)], context);
-  });
-  const ofName = name === '' || context.facts.category.decorative ? undefined : analyseClaim(name, 'en');
-  if (!ofName) return findings;
-  return [...findings, ...present(name, [...pointsOfRows(ofName, context), ...pointsOfAbsences(ofName, context), ...pointsOfNamed(ofName.named, context, true)], context)];
+    if (analysis) findings.push(...present(text, pointsOf(analysis, context), context));
+    else notChecked.push({ rule: 'claims/language', subject: text, citation: cite('evidence', context).text, words: `Claims are judged in ${CLAIM_LANGUAGES.join(', ')} only; this one is marked "${lang}".` });
+  }
+  if (name !== '') findings.push(...present(name, pointsOfName(name, context), context));
+  return findings;
 }
 
-function pointsOfRows({ rows }: Analysis, context: Context): Point[] {
-  const { market } = context.facts;
-  return rows.flatMap(({ row, words, isDenied, isSoftened }): Point[] => {
+function pointsOf(analysis: Analysis, context: Context): Point[] {
+  const ph = analysis.ph && judgePh(analysis.ph, context);
+  return [
+    ...pointsOfRows(analysis, context),
+    ...(ph ? [{ ...ph, by: DEFAULT_BY[ph.verdict], rule: 'claims/ph', words: analysis.ph!.words }] : []),
+    ...pointsOfAbsences(analysis.absences, context),
+    ...pointsOfNamed(analysis.named, context, false),
+  ];
+}
+
+/** A name has no language of its own: in the others only what stops sale is looked for. A shade's name is a colour. */
+function pointsOfName(name: string, context: Context): Point[] {
+  const [own, ...others] = CLAIM_LANGUAGES.map((lang) => analyseClaim(name, lang)!);
+  const points = pointsOf({ ...own!, named: [] }, context);
+  const named = context.facts.category.decorative ? [] : pointsOfNamed(own!.named, context, true);
+  const foreign = others.flatMap((analysis) => [...pointsOfRows(analysis, context), ...pointsOfAbsences(analysis.absences, context)]).filter(({ verdict }) => verdict !== 'evidence');
+  return [...points, ...named, ...foreign];
+}
+
+function pointsOfRows({ rows }: Analysis, { facts: { market } }: Context): Point[] {
+  return rows.flatMap(({ row, words, isSoftened }): Point[] => {
     let verdict = row.verdict[market];
-    if (!verdict || (isDenied && verdict === 'medicinal')) return [];
-    if (isSoftened && verdict === 'medicinal') {
+    if (!verdict) return [];
+    if (isSoftened) {
       // The look of it is cosmetic; the criteria of the EU still ask for evidence of it.
       if (market === 'US' || market === 'CA') return [];
       verdict = 'evidence';
     }
-    return [{ verdict, rule: `claims/${row.id}`, words, why: row.why }];
+    const isOwn = row.by !== undefined && row.by.startsWith('drug-') === (verdict === 'medicinal');
+    return [{ verdict, by: isOwn ? row.by! : DEFAULT_BY[verdict], rule: `claims/${row.id}`, words, why: row.why }];
   });
 }
 
-function pointsOfAbsences({ absences }: Analysis, context: Context): Point[] {
-  const { market } = context.facts;
-  if (context.mixture.substances.length === 0) return [];
-  return absences.flatMap(({ claimClass, words }): Point[] => {
-    const rule = `claims/without-${claimClass.id}`;
-    const { sure, perhaps } = findMembers(claimClass, context.mixture);
-    if (sure.length > 0) return [{ verdict: 'contradicted', rule, words, why: `The product holds ${claimClass.title}: ${sure.join(', ')}.` }];
-    if (perhaps.length > 0) return [{ verdict: 'evidence', rule, words, why: `Whether ${perhaps.join(', ')} ${perhaps.length > 1 ? 'count' : 'counts'} as ${claimClass.title} depends on origin or purpose; the supplier must say.` }];
-    const agreed = claimClass.agreed?.[market];
-    return agreed ? [{ verdict: agreed, rule, words, why: claimClass.why ?? 'It needs evidence.' }] : [];
+function pointsOfAbsences(absences: readonly AbsenceHit[], context: Context): Point[] {
+  const { mixture } = context;
+  if (mixture.substances.length === 0) return [];
+  return absences.flatMap(({ of, words }): Point[] => {
+    if ('claimClass' in of) return pointsOfClass(of.claimClass, words, context);
+    const holds = 'starts' in of ? namedIngredients(of.starts, mixture).map(({ name }) => name) : withWord(of.word, mixture);
+    return holds.length === 0 ? [] : [{ verdict: 'contradicted', by: 'truthfulness', rule: 'claims/without-named', words, why: `The product holds ${holds.join(', ')}.` }];
   });
+}
+
+function pointsOfClass(claimClass: ClaimClass, words: string, { mixture, facts: { market } }: Context): Point[] {
+  const rule = `claims/without-${claimClass.id}`;
+  const { sure, perhaps, unknown } = findMembers(claimClass, mixture);
+  const { title } = claimClass;
+  if (sure.length > 0) return [{ verdict: 'contradicted', by: 'truthfulness', rule, words, why: `The product holds ${title}: ${sure.join(', ')}.` }];
+  if (perhaps.length > 0) return [{ verdict: 'evidence', by: 'evidence', rule, words, why: `Whether ${perhaps.join(', ')} ${perhaps.length > 1 ? 'count' : 'counts'} as ${title} depends on origin or purpose; the supplier must say.` }];
+  if (unknown.length > 0) return [{ verdict: 'evidence', by: 'evidence', rule, words, why: `What ${unknown.join(', ')} ${unknown.length > 1 ? 'consist' : 'consists'} of is not known here; the supplier must confirm that it brings none of ${title}.` }];
+  const agreed = claimClass.agreed?.[market];
+  return agreed ? [{ verdict: agreed, by: claimClass.by ?? DEFAULT_BY[agreed], rule, words, why: claimClass.why ?? 'It needs evidence.' }] : [];
 }
 
 function pointsOfNamed(named: readonly NamedHit[], context: Context, isName: boolean): Point[] {
-  if (context.mixture.substances.length === 0) return [];
-  return named.filter(({ starts }) => !holdsNamed(starts, context.mixture)).map(({ word, isContained }) => ({
-    verdict: isContained && !isName ? 'contradicted' : 'evidence',
-    rule: 'claims/named-ingredient',
-    words: word,
-    why: isContained && !isName ? `It says that ${word} is in the product; nothing of it is.` : `It names ${word}, and nothing of it is in the product; that misleads unless it clearly means the scent.`,
-    isNamed: true,
-  }));
+  const { mixture } = context;
+  if (mixture.substances.length === 0) return [];
+  return named.flatMap((hit): Point[] => {
+    if (holdsNamed(hit.starts, mixture)) return hit.percent === undefined ? [] : pointsOfShare(hit, hit.percent, context);
+    const isSure = isName ? hit.isPart : hit.isContained || hit.isPart;
+    const why = isSure ? `It says that ${hit.word} is in the product; nothing of it is.` : `It names ${hit.word}, and nothing of it is in the product; that misleads unless it clearly means the scent.`;
+    return [{ verdict: isSure ? 'contradicted' : 'evidence', by: 'named', rule: 'claims/named-ingredient', words: hit.words, why }];
+  });
+}
+
+/** "With 10 % glycerin": what is claimed against what is in it. */
+function pointsOfShare({ starts, word, words }: NamedHit, percent: string, { mixture }: Context): Point[] {
+  const own = namedIngredients(starts, mixture);
+  if (own.length === 0) return [];
+  const claimed = decimal(percent);
+  const { min, max } = shareOf(own, mixture);
+  const names = own.map(({ name }) => name).join(', ');
+  const rule = 'claims/share';
+  if (compare(claimed, max) > 0) return [{ verdict: 'contradicted', by: 'truthfulness', rule, words, why: `It claims ${percent} % ${word}; at most ${toDecimal(max, 2)} % of the product is ${names}.` }];
+  if (compare(claimed, min) > 0) return [{ verdict: 'evidence', by: 'evidence', rule, words, why: `It claims ${percent} % ${word}; by the supplier's ranges ${toDecimal(min, 2)} to ${toDecimal(max, 2)} % of the product is ${names}.` }];
+  return [];
 }
 
 const KINDS: Readonly<Record<ClaimVerdict, FindingKind>> = { medicinal: 'claim-medicinal', contradicted: 'claim-contradicted', evidence: 'claim-evidence' };
@@ -86,31 +129,38 @@ const REMEDY: Readonly<Record<ClaimVerdict, string>> = {
   evidence: 'Attach the evidence to the product, or leave these words out.',
 };
 
-/** One finding for each kind: what a claim is wrong about, all its words together. Evidence for a medicinal claim is not asked for. */
+/** One finding for each kind: what a claim is wrong about, all its words together. */
 function present(text: string, points: readonly Point[], context: Context): Finding[] {
+  if (points.length === 0) return [];
   return ORDER.flatMap((verdict): Finding[] => {
-    const own = points.filter((point) => point.verdict === verdict);
-    if (own.length === 0 || (verdict === 'evidence' && points.some((point) => point.verdict === 'medicinal'))) return [];
-    const { text: citation, sourcing } = own.every((point) => point.isNamed) ? citationOf('named', context, verdict) : citationOf(verdict, context);
-    const words = [...new Set(own.map((point) => point.words))];
-    const reasons = [...new Set(own.map((point) => point.why))];
+    const own = points.filter((point) => point.verdict === verdict && !isSettled(point, points));
+    if (own.length === 0) return [];
+    const cited = uniq(own.map(({ by }) => by)).map((by) => cite(by, context));
+    const words = uniq(own.map((point) => point.words));
+    const sourcing = cited.some((one) => one.sourcing === 'memory') ? 'memory' : cited.some((one) => one.sourcing === 'secondary') ? 'secondary' : undefined;
     return [{
       kind: KINDS[verdict],
       severity: verdict === 'evidence' ? 'decide' : 'stop',
       rule: own[0]!.rule,
       subject: text,
       members: words,
-      citation,
-      message: `${words.map((one) => `“${one}”`).join(', ')}: ${reasons.join(' ')}`,
-      remedy: own.every((point) => point.isNamed) ? 'Let the ingredient be in the product, or name it otherwise.' : REMEDY[verdict],
+      citation: uniq(cited.map((one) => one.text)).join('; '),
+      message: `${words.map((one) => `“${one}”`).join(', ')}: ${uniq(own.map((point) => point.why)).join(' ')}`,
+      remedy: own.every(({ by }) => by === 'named') ? 'Let the ingredient be in the product, or name it otherwise.' : REMEDY[verdict],
       certainty: 'certain',
-      ...(verdict === 'evidence' ? { needs: ['claimEvidence'] } : {}),
-      ...(sourcing === 'official' ? {} : { sourcing }),
+      ...(verdict === 'evidence' ? { needs: uniq(own.flatMap((point) => point.needs ?? ['claimEvidence'])) } : {}),
+      ...(sourcing ? { sourcing } : {}),
     }];
   });
 }
 
-function citationOf(kind: ClaimVerdict | 'named', context: Context, fallback: ClaimVerdict = 'evidence') {
-  const { market } = context.facts;
-  return claimCitations[kind][market] ?? claimCitations[kind === 'named' ? (fallback === 'evidence' ? 'contradicted' : fallback) : kind][market]!;
+/** Evidence is not asked for in a medicinal claim, nor for words that the formula contradicts. */
+function isSettled({ verdict, words }: Point, points: readonly Point[]): boolean {
+  return verdict === 'evidence' && points.some((other) => other.verdict === 'medicinal' || (other.verdict === 'contradicted' && other.words.includes(words)));
+}
+
+const uniq = <T>(values: readonly T[]): T[] => [...new Set(values)];
+
+function cite(by: Criterion, { facts: { market } }: Context): { readonly text: string; readonly sourcing: 'official' | 'secondary' | 'memory' } {
+  return claimCriteria[by]![market];
 }

@@ -4,6 +4,8 @@ export interface Token {
   readonly start: number;
   readonly end: number;
   readonly clause: number;
+  /** A comma, a colon, a dash or a bracket stands right before it. */
+  readonly isAfterComma: boolean;
 }
 
 /** A phrase of the tables: whole words, and stems that stand for every word beginning with them. */
@@ -11,26 +13,38 @@ export interface Phrase {
   readonly parts: readonly { readonly text: string; readonly isStem: boolean }[];
 }
 
-const WORD = /[\p{L}\p{N}]+(?:['’]\p{L}+)?|%|[.;!?•]/gu;
+/** A place in a claim: from word `from` up to, not with, word `to`. */
+export interface Span {
+  readonly from: number;
+  readonly to: number;
+}
 
-/** Small letters without accents or apostrophes. */
+const WORD = /\d+[.,]\d+(?![\p{L}\p{N}])|[\p{L}\p{N}](?:[\p{L}\p{N}\p{M}\u00AD]|['’](?=\p{L}))*|%|[,:()–—.;!?•\n]/gu;
+const PAUSE = /^[,:()–—]$/;
+const CLAUSE_END = /^[.;!?•\n]$/;
+
+/** Small letters without accents, apostrophes or soft hyphens; a comma in a number is a point. */
 export function foldWord(word: string): string {
-  return word.toLowerCase().replace(/ß/g, 'ss').replace(/œ/g, 'oe').normalize('NFKD').replace(/[\p{M}'’]+/gu, '');
+  return word.toLowerCase().replace(/ß/g, 'ss').replace(/œ/g, 'oe').normalize('NFKD').replace(/[\p{M}'’\u00AD]+/gu, '').replace(/^(\d+),(\d+)$/, '$1.$2');
 }
 
 /** The words of a claim. French elisions (`d'alcool`) are two words; hyphens part words. */
 export function tokenise(text: string, lang: string): Token[] {
   const tokens: Token[] = [];
   let clause = 0;
+  let isAfterComma = false;
   for (const match of text.matchAll(WORD)) {
     const raw = match[0];
-    if (/^[.;!?•]$/.test(raw)) {
-      clause += 1;
-      continue;
+    if (PAUSE.test(raw)) isAfterComma = true;
+    else if (CLAUSE_END.test(raw)) clause += 1;
+    else {
+      const cut = lang === 'fr' ? /['’]/.exec(raw)?.index : undefined;
+      const pieces = cut === undefined ? [[raw, 0] as const] : [[raw.slice(0, cut), 0] as const, [raw.slice(cut + 1), cut + 1] as const];
+      for (const [piece, at] of pieces) {
+        tokens.push({ word: foldWord(piece), start: match.index + at, end: match.index + at + piece.length, clause, isAfterComma });
+        isAfterComma = false;
+      }
     }
-    const cut = lang === 'fr' ? /['’]/.exec(raw)?.index : undefined;
-    const pieces = cut === undefined ? [[raw, 0] as const] : [[raw.slice(0, cut), 0] as const, [raw.slice(cut + 1), cut + 1] as const];
-    for (const [piece, at] of pieces) tokens.push({ word: foldWord(piece), start: match.index + at, end: match.index + at + piece.length, clause });
   }
   return tokens;
 }
@@ -41,29 +55,57 @@ export function readPhrase(text: string): Phrase {
 }
 
 /** Whether the phrase stands at this word, within one clause. */
-export function standsAt(phrase: Phrase, tokens: readonly Token[], at: number): boolean {
+export function standsAt({ parts }: Phrase, tokens: readonly Token[], at: number): boolean {
   const first = tokens[at];
-  if (!first || at < 0) return false;
-  return phrase.parts.every((part, index) => {
+  if (!first) return false;
+  for (let index = 0; index < parts.length; index += 1) {
     const token = tokens[at + index];
-    return token !== undefined && token.clause === first.clause && (part.isStem ? token.word.startsWith(part.text) : token.word === part.text);
-  });
-}
-
-/** A place in a claim: from word `from` up to, not with, word `to`. */
-export interface Span {
-  readonly from: number;
-  readonly to: number;
-}
-
-/** The longest of these phrases that stands at this word. */
-export function longestAt(phrases: readonly Phrase[], tokens: readonly Token[], at: number): Span | undefined {
-  let best: Span | undefined;
-  for (const phrase of phrases) {
-    if (standsAt(phrase, tokens, at) && (!best || phrase.parts.length > best.to - at)) best = { from: at, to: at + phrase.parts.length };
+    const { text, isStem } = parts[index]!;
+    if (token?.clause !== first.clause || !(isStem ? token.word.startsWith(text) : token.word === text)) return false;
   }
-  return best;
+  return true;
 }
+
+/** What was found at a word, and how far it reaches. */
+export interface Found<T> {
+  readonly item: T;
+  readonly span: Span;
+}
+
+/** Phrases found by the beginning of their first word, so that no table is run through. */
+export class PhraseIndex<T> {
+  readonly #byStart = new Map<string, { readonly phrase: Phrase; readonly item: T }[]>();
+
+  constructor(entries: Iterable<readonly [phrase: Phrase, item: T]>) {
+    for (const [phrase, item] of entries) {
+      const key = keyOf(phrase.parts[0]!.text);
+      const known = this.#byStart.get(key);
+      if (known) known.push({ phrase, item });
+      else this.#byStart.set(key, [{ phrase, item }]);
+    }
+  }
+
+  /** Everything whose phrase stands at this word; of one item only its longest phrase. */
+  allAt(tokens: readonly Token[], at: number): Found<T>[] {
+    const token = tokens[at];
+    const candidates = token && this.#byStart.get(keyOf(token.word));
+    if (!candidates) return [];
+    const best = new Map<T, Span>();
+    for (const { phrase, item } of candidates) {
+      const to = at + phrase.parts.length;
+      if (to > (best.get(item)?.to ?? at) && standsAt(phrase, tokens, at)) best.set(item, { from: at, to });
+    }
+    return [...best].map(([item, span]) => ({ item, span }));
+  }
+
+  /** The one with the longest phrase at this word. */
+  longestAt(tokens: readonly Token[], at: number): Found<T> | undefined {
+    return this.allAt(tokens, at).reduce<Found<T> | undefined>((best, one) => (best && best.span.to >= one.span.to ? best : one), undefined);
+  }
+}
+
+/** Stems of the tables have three letters at least. */
+const keyOf = (word: string): string => word.slice(0, 3);
 
 /** The words as the claim writes them. */
 export function quote(text: string, tokens: readonly Token[], span: Span): string {
