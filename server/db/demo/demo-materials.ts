@@ -35,6 +35,11 @@ export const DEMO_MATERIALS = {
     constituents: [inside('Linalool', '25', '38'), inside('Linalyl Acetate', '25', '45'), inside('Limonene', '0', '1')],
     handling: { heatLimitC: '40', basis: 'common-practice', note: 'Add last: the scent leaves with the warmth.' },
   }),
+  juniper: material('Juniper berry extract, drawn with carbon dioxide', HOBBLEFORD, '310.00', [part('Juniperus Communis Fruit Extract', '100')], {
+    constituents: [inside('alpha-Pinene', '20', '40'), inside('Limonene', '2', '6')],
+    handling: { heatLimitC: '40', basis: 'common-practice' },
+  }),
+  mallow: material('Mallow flower extract, dry', QUILLMERE, '86.00', all('Malva Sylvestris Flower Extract'), { notes: 'Colours the water faintly blue, then grey.' }),
   wax: material('Emulsifying wax', THRUSSEL, '7.80', [range('Cetearyl Alcohol', '70', '80'), range('Ceteareth-20', '20', '30')]),
   shea: material('Shea butter', HOBBLEFORD, '8.60', all('Butyrospermum Parkii Butter'), { notes: 'Cool quickly once melted, or it turns grainy.' }),
   sunflower: material('Sunflower oil with vitamin E', HOBBLEFORD, '3.95', [part('Helianthus Annuus Seed Oil', '99.5'), part('Tocopherol', '0.5')]),

@@ -25,8 +25,8 @@ const bodyWash = demoDraft(
         phase('Surfactant', [['glucoside', '90'], ['amphoteric', '75']], [{ text: 'Stir in slowly, without drawing in air.', warm: ['20', '30'], time: { value: '20', unit: 'min' } }]),
         phase(
           'Cool-down',
-          [['preserver', '5'], ['citric', '1.25'], ['lavender', '1.5']],
-          [{ text: 'Dissolve the lavender oil in the preservative, stir in, then bring to pH 5.3 with the citric acid.', warm: ['20', '30'] }],
+          [['preserver', '5'], ['citric', '1.25'], ['lavender', '1.5'], ['juniper', '0.1']],
+          [{ text: 'Dissolve the lavender oil and the juniper extract in the preservative, stir in, then bring to pH 5.3 with the citric acid.', warm: ['20', '30'] }],
         ),
       ],
     },
@@ -55,8 +55,8 @@ const handCream = demoDraft(
     formula: {
       batchSize: grams('200'),
       phases: [
-        phase('Water', [['water', '142.8'], ['glycerine', '10']], [{ text: 'Heat together.', warm: ['70', '75'] }]),
-        phase('Oil', [['wax', '14'], ['shea', '16'], ['sunflower', '32.8']], [{ text: 'Melt together, pour into the water and stir fast.', warm: ['70', '75'], time: { value: '5', unit: 'min' } }]),
+        phase('Water', [['water', '142.8'], ['glycerine', '10'], ['mallow', '0.2']], [{ text: 'Dissolve the mallow extract, then heat together.', warm: ['70', '75'] }]),
+        phase('Oil', [['wax', '14'], ['shea', '16'], ['sunflower', '32.6']], [{ text: 'Melt together, pour into the water and stir fast.', warm: ['70', '75'], time: { value: '5', unit: 'min' } }]),
         phase('Cool-down', [['mildPreserver', '1.6'], ['meadow', '0.8']], [{ text: 'Stir in once below 40 °C.', warm: ['35', '40'] }]),
       ],
     },

@@ -123,10 +123,11 @@ function pointsOfShare({ starts, word, words }: NamedHit, percent: string, { mix
 
 const KINDS: Readonly<Record<ClaimVerdict, FindingKind>> = { medicinal: 'claim-medicinal', contradicted: 'claim-contradicted', evidence: 'claim-evidence' };
 const ORDER: readonly ClaimVerdict[] = ['medicinal', 'contradicted', 'evidence'];
-const REMEDY: Readonly<Record<ClaimVerdict, string>> = {
-  medicinal: 'Leave these words out, or speak of care and appearance only.',
-  contradicted: 'Leave these words out, or change the formula so that they are true.',
-  evidence: 'Attach the evidence to the product, or leave these words out.',
+/** What to do, with the words it is about. */
+const REMEDY: Readonly<Record<ClaimVerdict, (words: string) => string>> = {
+  medicinal: (words) => `Leave out ${words}, or speak of care and appearance only.`,
+  contradicted: (words) => `Leave out ${words}, or change the formula so that it is true.`,
+  evidence: (words) => `Attach evidence for ${words}, or leave it out.`,
 };
 
 /** One finding for each kind: what a claim is wrong about, all its words together. */
@@ -137,6 +138,8 @@ function present(text: string, points: readonly Point[], context: Context): Find
     if (own.length === 0) return [];
     const cited = uniq(own.map(({ by }) => by)).map((by) => cite(by, context));
     const words = uniq(own.map((point) => point.words));
+    const quoted = words.map((one) => `“${one}”`).join(', ');
+    const needs = uniq(own.flatMap((point) => point.needs ?? []));
     const sourcing = cited.some((one) => one.sourcing === 'memory') ? 'memory' : cited.some((one) => one.sourcing === 'secondary') ? 'secondary' : undefined;
     return [{
       kind: KINDS[verdict],
@@ -145,10 +148,10 @@ function present(text: string, points: readonly Point[], context: Context): Find
       subject: text,
       members: words,
       citation: uniq(cited.map((one) => one.text)).join('; '),
-      message: `${words.map((one) => `“${one}”`).join(', ')}: ${uniq(own.map((point) => point.why)).join(' ')}`,
-      remedy: own.every(({ by }) => by === 'named') ? 'Let the ingredient be in the product, or name it otherwise.' : REMEDY[verdict],
+      message: `${quoted}: ${uniq(own.map((point) => point.why)).join(' ')}`,
+      remedy: own.every(({ by }) => by === 'named') ? `Let ${quoted} be in the product, or name it otherwise.` : REMEDY[verdict](quoted),
       certainty: 'certain',
-      ...(verdict === 'evidence' ? { needs: uniq(own.flatMap((point) => point.needs ?? ['claimEvidence'])) } : {}),
+      ...(needs.length > 0 ? { needs } : {}),
       ...(sourcing ? { sourcing } : {}),
     }];
   });

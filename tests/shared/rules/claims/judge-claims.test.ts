@@ -42,8 +42,12 @@ describe('what a verdict says', () => {
     expect(judged('gel', 'Hypoallergenic', 'EU')[0]!.sourcing).toBe('secondary');
     expect(judged('gel', 'Non-toxic', 'CA')[0]!.sourcing).toBeUndefined();
   });
-  test('a claim that needs evidence asks for it', () => {
-    expect(judged('gel', 'Dermatologically tested')[0]).toMatchObject({ kind: 'claim-evidence', severity: 'decide', needs: ['claimEvidence'] });
+  test('what to do names the words', () => {
+    expect(judged('gel', 'Dermatologically tested')[0]).toMatchObject({ kind: 'claim-evidence', severity: 'decide', remedy: 'Attach evidence for “Dermatologically tested”, or leave it out.' });
+  });
+  test('a pH that is not given is asked for', () => {
+    expect(judged('cream', 'pH-balanced')[0]!.needs).toEqual(['pH']);
+    expect(judged('gel', 'Dermatologically tested')[0]!.needs).toBeUndefined();
   });
   test('evidence is not asked for in a claim that stops sale on the same words', () => {
     expect(kinds(judged('gel', 'Clinically proven to cure eczema'))).toEqual(['claim-medicinal']);
