@@ -10,6 +10,7 @@ import annexII3 from '#data/parameters/eu-annex-ii-1201-1767.json' with { type: 
 import annexIII1 from '#data/parameters/eu-annex-iii-001-100.json' with { type: 'json' };
 import annexIII2 from '#data/parameters/eu-annex-iii-101-200.json' with { type: 'json' };
 import annexIII3 from '#data/parameters/eu-annex-iii-201-300.json' with { type: 'json' };
+import annexIIIC from '#data/parameters/eu-annex-iii-251-300.json' with { type: 'json' };
 import annexIII4 from '#data/parameters/eu-annex-iii-301-386.json' with { type: 'json' };
 import annexIIICommon from '#data/parameters/eu-annex-iii-common.json' with { type: 'json' };
 import annexIV from '#data/parameters/eu-annex-iv.json' with { type: 'json' };
@@ -21,6 +22,7 @@ import warnings from '#data/parameters/product-warnings.json' with { type: 'json
 import usColours from '#data/parameters/us-colours.json' with { type: 'json' };
 import usProhibited from '#data/parameters/us-prohibited.json' with { type: 'json' };
 import usRestricted from '#data/parameters/us-restricted.json' with { type: 'json' };
+import wordingAnnexIIIC from '#data/parameters/wording-annex-iii-c.json' with { type: 'json' };
 import wordingAnnexIII from '#data/parameters/wording-annex-iii.json' with { type: 'json' };
 import wording from '#data/parameters/wording.json' with { type: 'json' };
 import type { LawTables } from './tables.types.ts';
@@ -35,10 +37,10 @@ export const lawTables = {
   categories: categories.categories,
   allergens,
   rows: [
-    ...[annexII1, annexII2, annexII3, annexIIICommon, annexIII1, annexIII2, annexIII3, annexIII4, annexIV, annexV, annexVI],
+    ...[annexII1, annexII2, annexII3, annexIIICommon, annexIII1, annexIII2, annexIII3, annexIIIC, annexIII4, annexIV, annexV, annexVI],
     ...[usProhibited, usRestricted, caProhibited, caHotlist],
   ],
-  wording: [...wording, ...wordingAnnexIII],
+  wording: [...wording, ...wordingAnnexIII, ...wordingAnnexIIIC],
   warnings,
   changes,
   usColours,
