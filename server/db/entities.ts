@@ -1,3 +1,4 @@
+import { ProductEvidence } from '#server/modules/evidence/evidence.entity.ts';
 import { House } from '#server/modules/house/house.entity.ts';
 import { Membership } from '#server/modules/house/membership.entity.ts';
 import { Person } from '#server/modules/house/person.entity.ts';
@@ -8,4 +9,4 @@ import { ProductRevision } from '#server/modules/products/product-revision.entit
 import { Product } from '#server/modules/products/product.entity.ts';
 
 /** Every table that the mapper reads; sign-in and dictionary tables are read by SQL of their own. */
-export const ENTITIES = [House, Person, Membership, Material, MaterialDocument, Product, ProductMaterial, ProductRevision];
+export const ENTITIES = [House, Person, Membership, Material, MaterialDocument, Product, ProductMaterial, ProductRevision, ProductEvidence];
