@@ -31,5 +31,6 @@ export const rooms: readonly { readonly word: string; readonly to: string; reado
   { word: 'Products', to: paths.products },
   { word: 'Materials', to: paths.materials },
   { word: 'Dictionary', to: paths.dictionary },
+  { word: 'Law calendar', to: paths.calendar },
   { word: 'House', to: paths.house },
 ];

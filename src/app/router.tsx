@@ -47,6 +47,7 @@ export function routesOf(client: QueryClient): RouteObject[] {
               ],
             },
             { path: 'read', lazy: page(client, () => import('#src/routes/read.tsx')) },
+            { path: 'calendar', lazy: page(client, () => import('#src/routes/calendar.tsx')) },
             { path: 'dictionary', lazy: page(client, () => import('#src/routes/dictionary.tsx')) },
             { path: 'dictionary/:inci', lazy: page(client, () => import('#src/routes/dictionary-entry.tsx')) },
             { path: 'house', lazy: page(client, () => import('#src/routes/house.tsx')) },

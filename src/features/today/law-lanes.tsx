@@ -1,8 +1,10 @@
 import { useMemo } from 'react';
 import { useQuery } from '@tanstack/react-query';
+import { Link } from 'react-router-dom';
 import type { ProductSummary } from '#shared/contracts/products.contract.ts';
 import { MARKETS } from '#shared/law/types.ts';
 import type { Market } from '#shared/law/types.ts';
+import { paths } from '#src/app/paths.ts';
 import { sayError } from '#src/lib/api/error.ts';
 import { sayCount, sayDay } from '#src/lib/say.ts';
 import { Panel } from '#src/ui/sheet.tsx';
@@ -18,7 +20,7 @@ export function LawLanes({ today, products }: { today: string; products: readonl
   const span = useMemo(() => spanFrom(today), [today]);
   const lanes = useMemo(() => findDatesAhead(data ?? [], span), [data, span]);
   return (
-    <Panel title="Law dates ahead" className="law" aside={error ? undefined : 'those that data release tables hold'}>
+    <Panel title="Law dates ahead" className="law" aside={error ? undefined : 'those that data release tables hold'} end={<Link className="font-medium" to={paths.calendar}>All dates, and what they change</Link>}>
       {error ? <p className="error">{sayError(error)}</p> : null}
       <div className="lanes">
         {MARKETS.map((market) => <Lane key={market} market={market} dates={lanes[market]} span={span} isRead={data !== undefined} sold={products.filter((one) => one.markets.includes(market)).length} />)}

@@ -1,6 +1,6 @@
 import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { Assessment } from '#shared/engine/assessment.ts';
-import type { LawBook } from '#shared/law/law-book.ts';
+import type { LawBook, LawChange } from '#shared/law/law-book.ts';
 import type { Market } from '#shared/law/types.ts';
 import type { AssessInput } from './engine.ts';
 
@@ -14,6 +14,21 @@ type Judge = (document: FormulaDocument, input: AssessInput) => Assessment;
 
 function dayBefore(day: string): string {
   return new Date(Date.parse(`${day}T00:00:00Z`) - 86_400_000).toISOString().slice(0, 10);
+}
+
+/** The days on which a product is judged to see what a change does to it. */
+export interface DaysAround {
+  readonly before: { readonly placed: string; readonly available: string };
+  readonly on: { readonly placed: string; readonly available: string };
+  /** The first day of the same change, where this is its second. */
+  readonly begun?: string;
+}
+
+/** The day before a change and the day of it. What is still on the shelf is judged as first sold before the change began. */
+export function daysAround(change: LawChange, changes: readonly LawChange[]): DaysAround {
+  const begun = change.kind === 'available' ? changes.find((other) => other.id === change.id && other.market === change.market && other.kind === 'placed' && other.date < change.date) : undefined;
+  const at = (day: string) => ({ placed: begun ? dayBefore(begun.date) : day, available: day });
+  return { before: at(dayBefore(change.date)), on: at(change.date), ...(begun && { begun: begun.date }) };
 }
 
 /** What a person would notice: the printed list, the verdicts and the wording. */
@@ -34,11 +49,11 @@ export async function findLawDays(judge: Judge, document: FormulaDocument, marke
   for (const change of changes) {
     await new Promise((resolve) => setTimeout(resolve, 0));
     if (options.signal.aborted) return [];
-    const begun = law.changes.find((other) => other.id === change.id && other.market === market && other.kind === 'placed' && other.date < change.date);
-    const on = (day: string) => impression(judge(document, { markets: [market], placed: change.kind === 'available' && begun ? dayBefore(begun.date) : day, available: day, today: options.today }));
-    if (on(dayBefore(change.date)) === on(change.date)) continue;
-    const isSecond = change.kind === 'available' && begun !== undefined;
-    const follows = isSecond && found.some((day) => day.date === begun.date && day.words === change.title);
+    const { before, on, begun } = daysAround(change, law.changes);
+    const seen = (days: DaysAround['on']) => impression(judge(document, { markets: [market], ...days, today: options.today }));
+    if (seen(before) === seen(on)) continue;
+    const isSecond = begun !== undefined;
+    const follows = isSecond && found.some((day) => day.date === begun && day.words === change.title);
     found.push({ date: change.date, words: follows ? 'and on all that is still sold' : isSecond ? `${change.title}, on all that is still sold` : change.title });
   }
   const byDate = new Map<string, string>();
