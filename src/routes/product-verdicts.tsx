@@ -4,6 +4,7 @@ import { MARKETS } from '#shared/law/types.ts';
 import type { HeadroomLine } from '#shared/engine/assessment.ts';
 import { setGrams } from '#src/features/formula/recipes.ts';
 import { paths } from '#src/app/paths.ts';
+import { ClaimsSection } from '#src/features/claims/claims-section.tsx';
 import { Ledger } from '#src/features/verdicts/ledger.tsx';
 import { countFindings, mergeFindings, type MergedFinding } from '#src/features/verdicts/merge.ts';
 import { NotChecked } from '#src/features/verdicts/not-checked.tsx';
@@ -36,6 +37,7 @@ export function Component() {
     const remedy = remedyOf(finding);
     if (remedy) return <Button small weight="act" onClick={() => change(setGrams(remedy.lineId, remedy.grams))}>Set {remedy.grams} g of {nameOf(remedy.materialId)}</Button>;
     const asked = finding.lead.needs ?? [];
+    if (finding.lead.kind === 'claim-evidence' && asked.length === 0) return <a className="btn small" href="#claims">See the claim and its evidence</a>;
     return asked.length > 0 ? <Link className="btn small" to={`${paths.product(page.id)}${page.search}#particulars`}>Answer: {asked.map(sayFact).join(', ')}</Link> : null;
   };
   const waysOf = (finding: MergedFinding) => {
@@ -53,6 +55,13 @@ export function Component() {
         ) : (
           <Ledger findings={merged} counts={counts} sold={draft.markets} release={page.engine.law.release} nameOf={nameOfSource} actOf={actOf} waysOf={waysOf} isWorking={live.isBehind} />
         )}
+        <ClaimsSection
+          productId={page.id}
+          draft={draft}
+          results={results}
+          isReadOnly={isReadOnly}
+          editLink={isReadOnly ? null : <Link to={`${paths.product(page.id)}${page.search}#particulars`}>Write one with the particulars</Link>}
+        />
         <RoomLeft market={asOf.market} headroom={headroom} lines={lines.map((line) => nameOf(line.materialId))} />
         <NotChecked memory={merged.filter((finding) => finding.lead.sourcing === 'memory').length} handling={handling} />
       </Sheet>
