@@ -4,7 +4,7 @@ import { PDFArray, PDFDocument, PDFHexString, PDFName, PDFNumber, PDFRawStream, 
 import type { Item, Micrometres, Scene, Text, Weight } from '#shared/artwork/scene.ts';
 import { embedFont, type EmbeddedFont } from './embed-font.ts';
 import { WEIGHTS } from './fonts.ts';
-import { boxOf, fill, pathOf, points, sheetOf, stroke, textOf, type Sheet } from './operators.ts';
+import { beginWords, boxOf, fill, pathOf, points, sheetOf, stroke, textOf, type Sheet } from './operators.ts';
 import { outputIntent, standardKeys, type Press } from './press.ts';
 import { cropMarks, SLUG, slugOf, type Slug } from './slug.ts';
 
@@ -42,23 +42,38 @@ function paintItem(item: Item, scene: Scene, painter: Painter): string {
   return `${stroke(ink.cmyk)}\n${sheet.length(item.stroke)} w\n${pathOf(item.steps, sheet)}\nS`;
 }
 
+const isOnArcs = (item: Item | undefined): item is Text => item?.kind === 'text' && item.places !== undefined;
+const isOneParagraph = (item: Item, next: Item | undefined): boolean => isOnArcs(next) && next.element === item.element;
+
+/** What the runs on arcs say from here to the end of their element, or `null` where none begins. */
+function wordsFrom(items: readonly Item[], from: number): string | null {
+  const first = items[from]!;
+  if (!isOnArcs(first) || (from > 0 && isOneParagraph(items[from - 1]!, first) && isOnArcs(items[from - 1]))) return null;
+  let words = '';
+  for (let i = from; isOnArcs(items[i]) && items[i]!.element === first.element; i += 1) words += (items[i] as Text).text;
+  return words;
+}
+
 /** The label itself, clipped to its bleed. */
 function paintArtwork(scene: Scene, painter: Painter): string {
   const { trim, bleed } = scene;
   const full = { x: -bleed, y: -bleed, width: trim.width + 2 * bleed, height: trim.height + 2 * bleed };
   const parts = [`q ${boxOf(full, painter.sheet)} W n 1 J 1 j`];
   let state = '';
-  for (const item of scene.items) {
+  scene.items.forEach((item, i) => {
+    const words = wordsFrom(scene.items, i);
+    if (words !== null) parts.push(beginWords(words));
     const wanted = overprints(item, scene) ? '/Over gs' : '/Knock gs';
     const painted = paintItem(item, scene, painter);
     if (item.clip) {
       parts.push(`q ${wanted} ${boxOf(item.clip, painter.sheet)} W n`, painted, 'Q');
-      continue;
+      return;
     }
     if (wanted !== state) parts.push(wanted);
     state = wanted;
     parts.push(painted);
-  }
+    if (isOnArcs(item) && !isOneParagraph(item, scene.items[i + 1])) parts.push('EMC');
+  });
   return [...parts, 'Q'].join('\n');
 }
 

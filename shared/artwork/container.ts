@@ -1,7 +1,8 @@
-import { add, decimal, parseDecimal, ZERO } from '#shared/kernel/rational.ts';
+import { add, compare, decimal, parseDecimal, ZERO } from '#shared/kernel/rational.ts';
 import type { ContainerSettings } from './label-input.ts';
 import { isWithin, micrometresOf, roundLength } from './lengths.ts';
 import type { Micrometres } from './scene.ts';
+import { LEAST_TAPER, unrollTaper, type Taper } from './taper.ts';
 
 /** A container's label unrolled: its trim and what the layout must know of the body under it. */
 export interface Sheet {
@@ -12,8 +13,12 @@ export interface Sheet {
   readonly overlap: Micrometres;
   /** Length of the label once around, overlap left out; the width of a flat label. */
   readonly round: Micrometres;
-  /** Outer diameter; 0 for a flat face. */
+  /** Outer diameter, the narrow one of a cone; 0 for a flat face. */
   readonly diameter: Micrometres;
+  /** Length once around the wide edge of a cone: areas are never taken smaller than they are. */
+  readonly wideRound?: Micrometres;
+  /** Set for a cone: the straight sheet is bent onto it. */
+  readonly taper?: Taper;
 }
 export interface ContainerFault {
   readonly field: string;
@@ -26,6 +31,8 @@ const OVERLAP = '5';
 
 const BOUNDS: Readonly<Record<string, readonly [string, string, string]>> = {
   diameterMm: ['10', '400', 'The diameter'],
+  topDiameterMm: ['10', '400', 'The upper diameter'],
+  bottomDiameterMm: ['10', '400', 'The lower diameter'],
   labelHeightMm: ['10', '500', 'The label height'],
   widthMm: ['10', '1000', 'The width'],
   heightMm: ['10', '500', 'The height'],
@@ -45,9 +52,7 @@ function faultsOf(fields: Readonly<Record<string, string>>): ContainerFault[] {
 
 /** The sheet of a container, in whole micrometres, or what is wrong with its measures. */
 export function readContainer(container: ContainerSettings): Sheet | { readonly faults: readonly ContainerFault[] } {
-  if (container.shape === 'taper') {
-    return { faults: [{ field: 'shape', message: 'Tapered containers cannot be set yet. Choose a cylinder or a flat label.' }] };
-  }
+  if (container.shape === 'taper') return readTaper(container);
   if (container.shape === 'flat') {
     const faults = faultsOf({ widthMm: container.widthMm, heightMm: container.heightMm });
     if (faults.length > 0) return { faults };
@@ -65,5 +70,22 @@ export function readContainer(container: ContainerSettings): Sheet | { readonly 
     overlap: micrometresOf(decimal(overlapMm)),
     round: roundLength(across, ZERO),
     diameter: micrometresOf(decimal(diameterMm)),
+  };
+}
+
+/** A cone's label: `labelHeightMm` is measured along the wall, the diameters at the label's two edges. */
+function readTaper({ topDiameterMm, bottomDiameterMm, labelHeightMm, overlapMm = OVERLAP }: Extract<ContainerSettings, { shape: 'taper' }>): Sheet | { readonly faults: readonly ContainerFault[] } {
+  const faults = faultsOf({ topDiameterMm, bottomDiameterMm, labelHeightMm, overlapMm });
+  if (faults.length > 0) return { faults };
+  const [top, bottom, slant, overlap] = [topDiameterMm, bottomDiameterMm, labelHeightMm, overlapMm].map((text) => micrometresOf(decimal(text))) as [number, number, number, number];
+  if (Math.abs(top - bottom) < LEAST_TAPER) return readContainer({ shape: 'cylinder', diameterMm: compare(decimal(topDiameterMm), decimal(bottomDiameterMm)) > 0 ? topDiameterMm : bottomDiameterMm, labelHeightMm, overlapMm, stockMm: '0' });
+  const taper = unrollTaper({ top, bottom, slant, overlap });
+  if (taper.angle > Math.PI) return { faults: [{ field: 'labelHeightMm', message: `A wall that narrows from ${Math.max(top, bottom) / 1000} to ${Math.min(top, bottom) / 1000} mm over ${labelHeightMm} mm unrolls to more than a half circle. Measure along the wall, or choose a flat label.` }] };
+  const atNarrow = Math.round((overlap * taper.narrow) / taper.wide);
+  return {
+    shape: 'cylinder', taper, height: slant, overlap: atNarrow, diameter: Math.min(top, bottom),
+    width: Math.round(taper.angle * taper.narrow),
+    round: Math.round(taper.angle * taper.narrow) - atNarrow,
+    wideRound: Math.ceil(Math.PI * Math.max(top, bottom)),
   };
 }

@@ -5,14 +5,18 @@
 export interface UsualContainer {
   readonly slug: string;
   readonly name: string;
-  readonly shape: 'cylinder' | 'flat';
+  readonly shape: 'cylinder' | 'flat' | 'taper';
   readonly diameterMm?: string;
+  /** Of a cone, at the label's two edges; its label height is measured along the wall. */
+  readonly topDiameterMm?: string;
+  readonly bottomDiameterMm?: string;
   readonly labelHeightMm?: string;
   readonly widthMm?: string;
   readonly heightMm?: string;
 }
 
 const bottle = (slug: string, name: string, diameterMm: string, labelHeightMm: string): UsualContainer => ({ slug, name, shape: 'cylinder', diameterMm, labelHeightMm });
+const cone = (slug: string, name: string, topDiameterMm: string, bottomDiameterMm: string, labelHeightMm: string): UsualContainer => ({ slug, name, shape: 'taper', topDiameterMm, bottomDiameterMm, labelHeightMm });
 const face = (slug: string, name: string, widthMm: string, heightMm: string): UsualContainer => ({ slug, name, shape: 'flat', widthMm, heightMm });
 
 export const CONTAINERS: readonly UsualContainer[] = [
@@ -30,6 +34,10 @@ export const CONTAINERS: readonly UsualContainer[] = [
   bottle('jar-100', 'Jar, 100 ml (3.4 fl oz)', '67', '36'),
   bottle('jar-200', 'Jar, 200 ml (6.8 fl oz)', '84', '42'),
   bottle('stick-50', 'Deodorant stick, 50 g (1.8 oz)', '38', '80'),
+  cone('tub-150', 'Tub, 150 ml (5 fl oz)', '72', '62', '46'),
+  cone('tub-250', 'Tub, 250 ml (8 fl oz)', '86', '76', '56'),
+  cone('tub-500', 'Tub, 500 ml (16 fl oz)', '104', '90', '76'),
+  cone('pot-60', 'Pot, 60 ml (2 fl oz)', '56', '48', '36'),
   face('face-small', 'Flat label, 50 × 70 mm', '50', '70'),
   face('face-60', 'Flat label, 60 × 90 mm', '60', '90'),
   face('face-80', 'Flat label, 80 × 120 mm', '80', '120'),

@@ -39,7 +39,7 @@ const FACE_BEYOND_LABEL: Micrometres = 6_000;
  */
 export function panelArea(sheet: Sheet): bigint {
   return sheet.shape === 'cylinder'
-    ? (BigInt(sheet.round) * BigInt(sheet.height + BODY_BEYOND_WRAP) * 4n) / 10n
+    ? (BigInt(sheet.wideRound ?? sheet.round) * BigInt(sheet.height + BODY_BEYOND_WRAP) * 4n) / 10n
     : BigInt(sheet.width + FACE_BEYOND_LABEL) * BigInt(sheet.height + FACE_BEYOND_LABEL);
 }
 
@@ -59,7 +59,7 @@ const METRIC_ROWS: readonly (readonly [bigint | null, Nanometres])[] = [[50n, 2_
  * by a pack that may be larger.
  */
 function labellingSurface(sheet: Sheet): bigint {
-  return sheet.shape === 'cylinder' ? BigInt(sheet.round) * BigInt(sheet.height + BODY_BEYOND_WRAP) : 2n * panelArea(sheet);
+  return sheet.shape === 'cylinder' ? BigInt(sheet.wideRound ?? sheet.round) * BigInt(sheet.height + BODY_BEYOND_WRAP) : 2n * panelArea(sheet);
 }
 
 function usMinimums(sheet: Sheet, hasWarnings: boolean): Minimums {

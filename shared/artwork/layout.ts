@@ -1,4 +1,5 @@
 import { barcodeFault } from './barcode.ts';
+import { bendScene } from './bend.ts';
 import { checkLabel, type Check } from './checks.ts';
 import { readContainer, type Sheet } from './container.ts';
 import { contentOf, textsOf } from './content.ts';
@@ -28,6 +29,8 @@ export const TEMPLATES: readonly { readonly slug: TemplateName; readonly name: s
 /** The template asked for, or the one drawn for this shape. */
 export function templateFor(input: Pick<LabelInput, 'template' | 'container'>): TemplateName {
   const asked = TEMPLATES.find((template) => template.slug === input.template);
+  // Versal's great letter stands on a straight ground.
+  if (input.container.shape === 'taper') return 'galley';
   return asked?.slug ?? (input.container.shape === 'flat' ? 'versal' : 'galley');
 }
 
@@ -94,9 +97,10 @@ function missingCharacters(input: LabelInput, metrics: FontMetrics): Misfit[] {
 }
 
 function legendOf(input: LabelInput, sheet: Sheet, bleed: Micrometres): string {
-  const wrap = sheet.shape === 'cylinder' ? `wrap Ø ${sheet.diameter / 1000}, overlap ${sheet.overlap / 1000}` : 'flat';
+  const { trim } = sheetTrim(sheet);
+  const wrap = input.container.shape === 'taper' ? `cone Ø ${input.container.topDiameterMm} to ${input.container.bottomDiameterMm}, overlap ${input.container.overlapMm ?? '5'}` : sheet.shape === 'cylinder' ? `wrap Ø ${sheet.diameter / 1000}, overlap ${sheet.overlap / 1000}` : 'flat';
   const content = input.netContent ? ` ${input.netContent.value} ${input.netContent.unit}` : '';
-  return `${content.trim()}${content ? ' · ' : ''}${input.market} · ${wrap} · trim ${sheet.width / 1000} × ${sheet.height / 1000} mm · bleed ${bleed / 1000} mm`;
+  return `${content.trim()}${content ? ' · ' : ''}${input.market} · ${wrap} · trim ${trim.width / 1000} × ${trim.height / 1000} mm · bleed ${bleed / 1000} mm`;
 }
 
 /**
@@ -131,8 +135,13 @@ export function layOutLabel(input: LabelInput, metrics: FontMetrics): Layout {
     dieLine: { ink: DIE_LINE, stroke: 250, steps: [['M', 0, 0], ['L', sheet.width, 0], ['L', sheet.width, sheet.height], ['L', 0, sheet.height], ['Z']] },
     legend: legendOf(input, sheet, bleed), template: job.template,
   };
-  const misfits = [...lacking, ...fitted.overflows.map(misfitOf)];
-  return { scene, misfits, checks: checkLabel({ input, job, scene, setting: fitted.setting, misfits }) };
+  const bent = sheet.taper ? bendScene(scene, sheet.taper, metrics) : { scene, overflows: [] };
+  const misfits = [...lacking, ...[...fitted.overflows, ...bent.overflows].map(misfitOf)];
+  return { scene: bent.scene, misfits, checks: checkLabel({ input, job, scene, setting: fitted.setting, misfits }) };
+}
+
+function sheetTrim(sheet: Sheet): Pick<Scene, 'trim'> {
+  return { trim: sheet.taper ? { width: sheet.taper.width, height: sheet.taper.height } : { width: sheet.width, height: sheet.height } };
 }
 
 /** For people: the height of a share of an em, in millimetres cut to two decimals. */

@@ -53,6 +53,12 @@ export interface Path extends Common {
   /** Stroke width; filled when absent. */
   readonly stroke?: Micrometres;
 }
+/** Where one character starts on its base line, and how it stands turned, clockwise. */
+export interface Place {
+  readonly x: Micrometres;
+  readonly y: Micrometres;
+  readonly degrees: number;
+}
 export interface Text extends Common {
   readonly kind: 'text';
   readonly text: string;
@@ -68,6 +74,8 @@ export interface Text extends Common {
   readonly offsets: readonly number[];
   /** Full advance in thousandths of the em. */
   readonly advance: number;
+  /** Set where the run leaves the straight line: a place for each character, instead of `turn` and `offsets`. */
+  readonly places?: readonly Place[];
 }
 export type Item = Boxes | Path | Text;
 
@@ -95,9 +103,18 @@ export interface Scene {
 
 /** The box of the letters of a text item: cap height above the base line, nothing below. */
 export function textBox(item: Text, capHeight: number): Box {
+  if (item.places) return boxAround(item.places, Math.ceil((capHeight * item.size) / 1000));
   const length = Math.ceil((item.advance * item.size) / 1000);
   const rise = Math.ceil((capHeight * item.size) / 1000);
   if (item.turn === 0) return { x: item.x, y: item.y - rise, width: length, height: rise };
   if (item.turn === 90) return { x: item.x, y: item.y, width: rise, height: length };
   return { x: item.x - rise, y: item.y - length, width: rise, height: length };
+}
+
+/** Room for letters as high and wide as `rise` that stand at these places, whichever way they are turned. */
+function boxAround(places: readonly Place[], rise: Micrometres): Box {
+  const xs = places.flatMap(({ x, degrees }) => [x, x + rise * Math.cos((degrees * Math.PI) / 180), x + rise * Math.sin((degrees * Math.PI) / 180)]);
+  const ys = places.flatMap(({ y, degrees }) => [y, y + rise * Math.sin((degrees * Math.PI) / 180), y - rise * Math.cos((degrees * Math.PI) / 180)]);
+  const [x, y] = [Math.floor(Math.min(...xs)), Math.floor(Math.min(...ys))];
+  return { x, y, width: Math.ceil(Math.max(...xs)) - x, height: Math.ceil(Math.max(...ys)) - y };
 }

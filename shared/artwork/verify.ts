@@ -13,14 +13,15 @@ export function inkBox(item: Item, job: Pick<Job, 'metrics'>): Box | null {
   return shapeBox(item, job);
 }
 
-function shapeBox(item: Item, job: Pick<Job, 'metrics'>): Box {
+/** Box around what an item paints. */
+export function shapeBox(item: Item, job: Pick<Job, 'metrics'>): Box {
   if (item.kind === 'text') {
     const face = job.metrics.face(item.weight);
     const box = textBox(item, face.capHeight);
     // Letters that hang over the edge by their bearing have no ink there.
     const bearing = Math.round((face.bearing(item.text[0] ?? ' ') * item.size) / 1000);
     const trail = item.text.endsWith(' ') ? Math.floor((face.advance(' ') * item.size) / 1000) : 0;
-    return item.turn === 0 ? { ...box, x: box.x + bearing, width: Math.max(0, box.width - bearing - trail) } : box;
+    return item.turn === 0 && !item.places ? { ...box, x: box.x + bearing, width: Math.max(0, box.width - bearing - trail) } : box;
   }
   const points: [number, number][] = item.kind === 'boxes'
     ? item.boxes.flatMap((box): [number, number][] => [[box.x, box.y], [box.x + box.width, box.y + box.height]])

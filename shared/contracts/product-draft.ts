@@ -34,6 +34,7 @@ export const phase = z.strictObject({
 const party = z.strictObject({ name: z.string().max(255), address: z.string().max(500) });
 const container = z.discriminatedUnion('shape', [
   z.strictObject({ shape: z.literal('cylinder'), diameterMm: amountField, labelHeightMm: amountField, overlapMm: amountField, stockMm: amountField.optional(), name: z.string().max(120).optional() }),
+  z.strictObject({ shape: z.literal('taper'), topDiameterMm: amountField, bottomDiameterMm: amountField, labelHeightMm: amountField, overlapMm: amountField, name: z.string().max(120).optional() }),
   z.strictObject({ shape: z.literal('flat'), widthMm: amountField, heightMm: amountField, name: z.string().max(120).optional() }),
 ]);
 

@@ -11,8 +11,7 @@ export interface FromDocumentOptions {
 
 /**
  * The product draft of a formula document. Lines of one phase are gathered under it in the
- * order in which the phases first appear. A taper container has no draft form yet and leaves
- * the blank one standing.
+ * order in which the phases first appear.
  */
 export function fromFormulaDocument(document: FormulaDocument, { blank, materialIds }: FromDocumentOptions): ProductDraft {
   const { product, label, declaration, formula } = document;
@@ -52,7 +51,7 @@ export function fromFormulaDocument(document: FormulaDocument, { blank, material
     },
     label: {
       ...blank.label,
-      ...(label?.container && label.container.shape !== 'taper' && { container: label.container }),
+      ...(label?.container && { container: label.container }),
       ...(label?.bleedMm !== undefined && { bleedMm: label.bleedMm }),
       ...(label?.languages && label.languages.length > 0 && { languages: label.languages.slice(0, 4).map((lang) => lang.slice(0, 2)) }),
       ...(label?.market && { market: label.market }),

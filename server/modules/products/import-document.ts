@@ -5,7 +5,7 @@ import { materialFields, type MaterialFields } from '#shared/contracts/materials
 import { productDraft } from '#shared/contracts/product-draft.ts';
 import { readFormulaDocument } from '#shared/contracts/read-formula-document.ts';
 import { fromFormulaDocument, toMaterialFields } from '#shared/product/from-document.ts';
-import { AppError, invalid } from '#server/http/app-error.ts';
+import { AppError } from '#server/http/app-error.ts';
 import { plainWords, toIssues } from '#server/http/issues.ts';
 import type { Actor } from '#server/http/session.ts';
 import { getHouse } from '#server/modules/house/house.service.ts';
@@ -25,9 +25,6 @@ export async function importFormulaDocument(em: EntityManager, actor: Actor, val
   const read = readFormulaDocument(value, { categories: context.categories });
   if ('faults' in read) throw new AppError('invalid', { issues: read.faults.map(({ pointer, message }) => ({ pointer: `/document${pointer}`, message })) });
   const { document } = read;
-  if (document.label?.container?.shape === 'taper') {
-    throw invalid({ pointer: '/document/label/container/shape', message: 'A tapered container cannot be edited here yet. Take the container out and choose one afterwards.' });
-  }
   const fields = document.materials.map((material, index) => parse(materialFields, toMaterialFields(material), `/document/materials/${index}`));
   const materialIds = await keepMaterials(em, actor, document, fields, context.now);
   const { category, markets, name } = document.product;

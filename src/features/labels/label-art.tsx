@@ -5,7 +5,8 @@ import type { Box, Item, PathStep, Scene, Text } from '#shared/artwork/scene.ts'
 
 const mm = (micrometres: number): number => micrometres / 1000;
 
-function pathData(steps: readonly PathStep[]): string {
+/** Steps as an SVG path, in millimetres. */
+export function pathData(steps: readonly PathStep[]): string {
   return steps.map(([command, ...figures]) => command + figures.map(mm).join(' ')).join('');
 }
 function boxData(box: Box): string {
@@ -18,10 +19,11 @@ export function characterPlaces(item: Text): number[] {
 }
 
 function ArtText({ item, fill }: { item: Text; fill: string }) {
-  const common = { fontSize: mm(item.size), fontWeight: item.weight, fill };
-  if (item.turn === 0) return <text {...common} x={characterPlaces(item).join(' ')} y={mm(item.y)}>{item.text}</text>;
+  const font = { fontSize: mm(item.size), fontWeight: item.weight, fill };
+  if (item.places) return <text {...font} x={item.places.map(({ x }) => mm(x)).join(' ')} y={item.places.map(({ y }) => mm(y)).join(' ')} rotate={item.places.map(({ degrees }) => degrees).join(' ')}>{item.text}</text>;
+  if (item.turn === 0) return <text {...font} x={characterPlaces(item).join(' ')} y={mm(item.y)}>{item.text}</text>;
   const along = item.offsets.map((offset) => mm((offset * item.size) / 1000)).join(' ');
-  return <text {...common} x={along} y={0} transform={`translate(${mm(item.x)} ${mm(item.y)}) rotate(${item.turn})`}>{item.text}</text>;
+  return <text {...font} x={along} y={0} transform={`translate(${mm(item.x)} ${mm(item.y)}) rotate(${item.turn})`}>{item.text}</text>;
 }
 
 function ArtItem({ item, scene, clipOf }: { item: Item; scene: Scene; clipOf: (box: Box) => string }) {

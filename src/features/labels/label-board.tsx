@@ -4,7 +4,7 @@ import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import { inMillimetres } from '#shared/artwork/lengths.ts';
 import type { Box, Scene } from '#shared/artwork/scene.ts';
 import { inkBox } from '#shared/artwork/verify.ts';
-import { LabelArt } from './label-art.tsx';
+import { LabelArt, pathData } from './label-art.tsx';
 
 export interface Shown {
   readonly die: boolean;
@@ -57,9 +57,9 @@ export function LabelBoard({ scene, misfits, shown, pixelsPerMm, zoom }: LabelBo
     <div className="board" ref={ref} tabIndex={0} role="region" aria-label={`Label, unrolled, at ${percent} % of true size`}>
       <svg width={across * scale} height={down * scale} viewBox={`${left} ${top} ${across} ${down}`}>
         <LabelArt scene={scene} bleed={shown.bleed} />
-        {shown.bleed ? <Bleed W={W} H={H} bleed={bleed} px={px} /> : null}
+        {shown.bleed ? <Bleed scene={scene} W={W} H={H} bleed={bleed} px={px} /> : null}
         {shown.panels ? <Panels scene={scene} px={px} bleed={bleed} /> : null}
-        {shown.die ? <rect width={W} height={H} fill="none" stroke={scene.dieLine.ink.screen} strokeWidth={Math.max(scene.dieLine.stroke / 1000, px)} /> : null}
+        {shown.die ? <path d={pathData(scene.dieLine.steps)} fill="none" stroke={scene.dieLine.ink.screen} strokeWidth={Math.max(scene.dieLine.stroke / 1000, px)} /> : null}
         {shown.rings ? <Rings scene={scene} misfits={misfits} px={px} /> : null}
         <Rulers left={left} top={top} across={across} down={down} px={px} H={H} />
       </svg>
@@ -67,11 +67,11 @@ export function LabelBoard({ scene, misfits, shown, pixelsPerMm, zoom }: LabelBo
   );
 }
 
-function Bleed({ W, H, bleed, px }: { W: number; H: number; bleed: number; px: number }) {
+function Bleed({ scene, W, H, bleed, px }: { scene: Scene; W: number; H: number; bleed: number; px: number }) {
   const corners: readonly (readonly [number, number, number, number])[] = [[0, 0, -1, -1], [W, 0, 1, -1], [0, H, -1, 1], [W, H, 1, 1]];
   return (
     <g>
-      <path fillRule="evenodd" fill="var(--tray)" fillOpacity=".62" d={`M${-bleed} ${-bleed}h${W + 2 * bleed}v${H + 2 * bleed}h${-(W + 2 * bleed)}ZM0 0v${H}h${W}V0Z`} />
+      <path fillRule="evenodd" fill="var(--tray)" fillOpacity=".62" d={`M${-bleed} ${-bleed}h${W + 2 * bleed}v${H + 2 * bleed}h${-(W + 2 * bleed)}Z${pathData(scene.dieLine.steps)}`} />
       <rect x={-bleed} y={-bleed} width={W + 2 * bleed} height={H + 2 * bleed} fill="none" stroke="var(--edge)" strokeWidth={px} strokeDasharray={`${3 * px} ${3 * px}`} />
       <path stroke="var(--ink)" strokeWidth={px} d={corners.map(([x, y, a, b]) => `M${x + a * (bleed + 1)} ${y}h${a * 5}M${x} ${y + b * (bleed + 1)}v${b * 5}`).join('')} />
     </g>
@@ -87,7 +87,7 @@ function Panels({ scene, px, bleed }: { scene: Scene; px: number; bleed: number 
   const size = 12 * px;
   return (
     <g>
-      {overlap > 0 ? <rect x={W - overlap} width={overlap} height={H} fill="#6F7E77" fillOpacity=".13" /> : null}
+      {overlap > 0 && scene.shape === 'cylinder' ? <rect x={W - overlap} width={overlap} height={H} fill="#6F7E77" fillOpacity=".13" /> : null}
       {scene.panels.map((panel) => {
         const [a, b] = [panel.x / 1000, (panel.x + panel.width) / 1000];
         const words = panel.name === 'Front' ? `Front, ${inMillimetres(panel.width)} mm` : panel.name;

@@ -18,16 +18,20 @@ const MARKETS = { EU: 'European Union', UK: 'Great Britain', US: 'United States'
 const LANGUAGES: readonly (readonly [string, string])[] = [['en', 'English'], ['fr', 'French'], ['de', 'German'], ['es', 'Spanish'], ['it', 'Italian'], ['nl', 'Dutch']];
 
 function containerOf(usual: UsualContainer): Container {
+  if (usual.shape === 'taper') return { shape: 'taper', topDiameterMm: usual.topDiameterMm!, bottomDiameterMm: usual.bottomDiameterMm!, labelHeightMm: usual.labelHeightMm!, overlapMm: USUAL_OVERLAP_MM, name: usual.name };
   return usual.shape === 'flat'
     ? { shape: 'flat', widthMm: usual.widthMm!, heightMm: usual.heightMm!, name: usual.name }
     : { shape: 'cylinder', diameterMm: usual.diameterMm!, labelHeightMm: usual.labelHeightMm!, overlapMm: USUAL_OVERLAP_MM, stockMm: USUAL_STOCK_MM, name: usual.name };
 }
 
+type Measure = Exclude<keyof UsualContainer, 'slug' | 'name' | 'shape'>;
+/** What tells one container of a shape from another. */
+const MEASURES: Readonly<Record<Container['shape'], readonly Measure[]>> = { cylinder: ['diameterMm', 'labelHeightMm'], flat: ['widthMm', 'heightMm'], taper: ['topDiameterMm', 'bottomDiameterMm', 'labelHeightMm'] };
+
 function usualOf(container: Container): string {
-  const found = CONTAINERS.find((usual) =>
-    usual.shape === container.shape && (container.shape === 'flat'
-      ? usual.widthMm === container.widthMm && usual.heightMm === container.heightMm
-      : usual.diameterMm === container.diameterMm && usual.labelHeightMm === container.labelHeightMm));
+  const keys = MEASURES[container.shape];
+  const given: Readonly<Partial<Record<Measure, string>>> = container;
+  const found = CONTAINERS.find((usual) => usual.shape === container.shape && keys.every((key) => usual[key] === given[key]));
   return found?.slug ?? '';
 }
 
@@ -55,7 +59,7 @@ export function LabelSettingsPanel({ draft, onChange, isLocked }: SettingsPanelP
             {LANGUAGES.some(([code]) => code === label.languages.join('+')) || label.languages.join('+') === 'en+fr' ? null : <option value={label.languages.join('+')}>{label.languages.join(', ')}</option>}
           </SelectField>
           <SelectField label="Template" value={templateFor(label)} disabled={isLocked} onChange={(event) => change({ template: event.target.value })} hint={TEMPLATES.find((template) => template.slug === templateFor(label))?.temper} className="wide">
-            {TEMPLATES.map((template) => <option key={template.slug} value={template.slug}>{template.name}</option>)}
+            {TEMPLATES.filter((template) => label.container.shape !== 'taper' || template.slug === 'galley').map((template) => <option key={template.slug} value={template.slug}>{template.name}</option>)}
           </SelectField>
           <fieldset className="inks wide" disabled={isLocked}>
             <legend className="field-label">House ink</legend>
@@ -95,13 +99,22 @@ function ContainerFields({ container, onChange, isLocked }: { container: Contain
       <SelectField label="Start from" value={usualOf(container)} disabled={isLocked} onChange={(event) => pick(event.target.value)} className="wide" hint="Usual sizes, no standard: measure the bottle in hand.">
         <option value="">Own measures</option>
         <optgroup label="Round">{CONTAINERS.filter((usual) => usual.shape === 'cylinder').map((usual) => <option key={usual.slug} value={usual.slug}>{usual.name}</option>)}</optgroup>
+        <optgroup label="Tapered">{CONTAINERS.filter((usual) => usual.shape === 'taper').map((usual) => <option key={usual.slug} value={usual.slug}>{usual.name}</option>)}</optgroup>
         <optgroup label="Flat">{CONTAINERS.filter((usual) => usual.shape === 'flat').map((usual) => <option key={usual.slug} value={usual.slug}>{usual.name}</option>)}</optgroup>
       </SelectField>
       <div className="switch wide" role="group" aria-label="Shape">
         <button type="button" disabled={isLocked} aria-pressed={container.shape === 'cylinder'} onClick={() => shape('cylinder')}>Round</button>
+        <button type="button" disabled={isLocked} aria-pressed={container.shape === 'taper'} onClick={() => shape('taper')}>Tapered</button>
         <button type="button" disabled={isLocked} aria-pressed={container.shape === 'flat'} onClick={() => shape('flat')}>Flat</button>
       </div>
-      {own.shape === 'cylinder' ? (
+      {own.shape === 'taper' ? (
+        <>
+          {field('Upper diameter, mm', 'topDiameterMm', own.topDiameterMm, (topDiameterMm) => ({ ...own, topDiameterMm }))}
+          {field('Lower diameter, mm', 'bottomDiameterMm', own.bottomDiameterMm, (bottomDiameterMm) => ({ ...own, bottomDiameterMm }))}
+          {field('Height along the wall, mm', 'labelHeightMm', own.labelHeightMm, (labelHeightMm) => ({ ...own, labelHeightMm }))}
+          {field('Overlap, mm', 'overlapMm', own.overlapMm, (overlapMm) => ({ ...own, overlapMm }))}
+        </>
+      ) : own.shape === 'cylinder' ? (
         <>
           {field('Diameter, mm', 'diameterMm', own.diameterMm, (diameterMm) => ({ ...own, diameterMm }))}
           {field('Label height, mm', 'labelHeightMm', own.labelHeightMm, (labelHeightMm) => ({ ...own, labelHeightMm }))}

@@ -62,7 +62,7 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
         {scene ? <LabelBoard scene={scene} misfits={misfits} shown={shown} pixelsPerMm={calibration.pixelsPerMm} zoom={zoom} /> : null}
         {scene ? <SpecLine scene={scene} label={draft.label} /> : null}
         {scene ? <PressList checks={checks} /> : null}
-        {scene ? (
+        {scene && scene.shape !== 'taper' ? (
           <Panel title={scene.shape === 'cylinder' ? 'On the bottle' : 'On its face'}>
             <BottleView scene={scene} diameterMm={container.shape === 'cylinder' ? Number(container.diameterMm) : 0} />
           </Panel>
@@ -118,7 +118,7 @@ function SpecLine({ scene, label }: { scene: Scene; label: LabelSettings }) {
   const parts: readonly (readonly [string, string])[] = [
     ['Trim', `${exactMillimetres(scene.trim.width)} × ${exactMillimetres(scene.trim.height)} mm`],
     ['Bleed', `${exactMillimetres(scene.bleed)} mm`],
-    ...(scene.overlap > 0 ? [['Overlap', `${exactMillimetres(scene.overlap)} mm, right over left`] as const, ['Front', '0.4 of the round'] as const] : []),
+    ...(scene.shape === 'taper' ? [['Unrolled', 'a cone: type on arcs, sides are radii'] as const] : scene.overlap > 0 ? [['Overlap', `${exactMillimetres(scene.overlap)} mm, right over left`] as const, ['Front', '0.4 of the round'] as const] : []),
     ['Press', `${label.press.standard}, ${label.press.condition}`],
     ['Inks', `${[...new Set(inks)].join(', ')}, die line`],
   ];

@@ -33,8 +33,8 @@ test.each([
 });
 
 test('every usual container can be set', () => {
-  for (const { shape, diameterMm = '', labelHeightMm = '', widthMm = '', heightMm = '' } of CONTAINERS) {
-    const sheet = readContainer(shape === 'flat' ? { shape, widthMm, heightMm } : { shape, diameterMm, labelHeightMm });
+  for (const { shape, diameterMm = '', topDiameterMm = '', bottomDiameterMm = '', labelHeightMm = '', widthMm = '', heightMm = '' } of CONTAINERS) {
+    const sheet = readContainer(shape === 'flat' ? { shape, widthMm, heightMm } : shape === 'taper' ? { shape, topDiameterMm, bottomDiameterMm, labelHeightMm } : { shape, diameterMm, labelHeightMm });
     expect(sheet).not.toHaveProperty('faults');
   }
 });
