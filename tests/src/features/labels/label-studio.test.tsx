@@ -67,6 +67,20 @@ test('a flat container changes the trim', async () => {
   expect(await screen.findByText('80 × 120 mm')).toBeTruthy();
 });
 
+test('a tapered tub is set on the unrolled cone, and goes back to a cylinder', async () => {
+  const person = userEvent.setup();
+  render(<Desk />);
+  await person.selectOptions(screen.getByLabelText('Start from'), 'tub-150');
+  expect(await screen.findByText('226.529 × 63.196 mm')).toBeTruthy();
+  expect(screen.getByRole('button', { name: 'Tapered' }).getAttribute('aria-pressed')).toBe('true');
+  expect(document.querySelectorAll('.board text[rotate]').length).toBeGreaterThan(10);
+  await person.clear(screen.getByLabelText('Lower diameter, mm'));
+  await person.type(screen.getByLabelText('Lower diameter, mm'), '5');
+  expect(await screen.findAllByText('The lower diameter is 5 mm. Labels are set from 10 to 400 mm.')).not.toHaveLength(0);
+  await person.click(screen.getByRole('button', { name: 'Round' }));
+  expect(await screen.findByLabelText('Diameter, mm')).toBeTruthy();
+});
+
 test('a press file that cannot be had is said in words', async () => {
   const person = userEvent.setup();
   render(<Desk onPressFile={() => Promise.reject(new Error('The server could not be reached.'))} />);
