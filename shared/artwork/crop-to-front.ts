@@ -11,8 +11,14 @@ const FULL_EM = 1000;
 
 /** The front panel of a wrap, the whole of any other label. Texts that mostly lie elsewhere and shapes wholly outside are left out. */
 export function cropToFront(scene: Scene): FrontView {
+  // What the eye sees at once of a cone: the middle two fifths of its box.
+  if (scene.shape === 'taper') return cropTo(scene, { x: Math.round(scene.trim.width * 0.3), y: 0, width: Math.round(scene.trim.width * 0.4), height: scene.trim.height });
   const front = scene.shape === 'cylinder' ? scene.panels.find((panel) => panel.name === 'Front') : undefined;
   const view = front && front.height > 0 ? boxOf(front) : { x: 0, y: 0, width: scene.trim.width, height: scene.trim.height };
+  return cropTo(scene, view);
+}
+
+function cropTo(scene: Scene, view: Box): FrontView {
   return { view, scene: { ...scene, items: scene.items.filter((item) => isSeenIn(view, item)) } };
 }
 
