@@ -17,6 +17,8 @@ export interface ClaimRowView {
   readonly stretches: readonly Stretch[];
   readonly byMarket: ReadonlyMap<Market, readonly Finding[]>;
   readonly asksEvidence: boolean;
+  /** No paper mends it: every verdict on it stops sale. */
+  readonly isBeyondEvidence: boolean;
   readonly papers: readonly ClaimEvidence[];
 }
 
@@ -32,6 +34,7 @@ export function buildClaimRows(draft: Pick<ProductDraft, 'name' | 'claims'>, res
       text, lang, isName, byMarket,
       stretches: markWords(text, findings.flatMap(({ members = [], severity }) => members.map((words) => ({ words, weight: severity })))),
       asksEvidence: findings.some(({ kind }) => kind === 'claim-evidence'),
+      isBeyondEvidence: findings.length > 0 && findings.every(({ severity }) => severity === 'stop'),
       papers: papers.filter(({ claim }) => claim === text),
     };
   });

@@ -35,10 +35,11 @@ export function ClaimsSection({ productId, draft, results, isReadOnly, editLink 
       {rows.map((row) => (
         <article className="claim-row" key={row.text} style={columns} aria-label={row.isName ? `Name: ${row.text}` : row.text}>
           <div className="claim-words">
-            <p className="claim-text" lang={row.lang || undefined}>{row.isName ? row.text === '' ? null : <ClaimText row={row} /> : <>“<ClaimText row={row} />”</>} {row.isName ? <Tag>name</Tag> : row.lang === 'en' ? null : <Tag>{row.lang}</Tag>}</p>
+            <p className="claim-text" lang={row.lang || undefined}>{row.isName ? <ClaimText row={row} /> : <>“<ClaimText row={row} />”</>} {row.isName ? <Tag>name</Tag> : row.lang === 'en' ? null : <Tag>{row.lang}</Tag>}</p>
             <EvidenceList productId={productId} papers={row.papers} isReadOnly={isReadOnly} />
+            {row.isBeyondEvidence ? <p className="claim-lack">No paper mends this: change the words or the formula.</p> : null}
             {row.asksEvidence && row.papers.length === 0 && evidence.isSuccess ? <p className="claim-lack">No evidence attached yet.</p> : null}
-            {isReadOnly || (row.isName && !row.asksEvidence) ? null : <EvidenceUpload productId={productId} claim={row.text} />}
+            {isReadOnly || row.isBeyondEvidence || (row.isName && !row.asksEvidence) ? null : <EvidenceUpload productId={productId} claim={row.text} isAsked={row.asksEvidence} />}
           </div>
           {results.map(({ market }) => <MarketCell key={market} market={market} findings={row.byMarket.get(market) ?? []} />)}
         </article>

@@ -12,7 +12,7 @@ import { ACCEPTED, EVIDENCE_KINDS, MOST_BYTES } from './evidence-kinds.ts';
 import { useAddEvidence } from './mutations.ts';
 
 /** A place to attach what shows a claim: a file, its kind and its day. */
-export function EvidenceUpload({ productId, claim }: { productId: string; claim: string }) {
+export function EvidenceUpload({ productId, claim, isAsked }: { productId: string; claim: string; isAsked: boolean }) {
   const inputId = useId();
   const [file, setFile] = useState<File | null>(null);
   const [fault, setFault] = useState('');
@@ -28,7 +28,7 @@ export function EvidenceUpload({ productId, claim }: { productId: string; claim:
         <>
           <input id={inputId} type="file" className="sr-only" accept={ACCEPTED} onChange={(event: ChangeEvent<HTMLInputElement>) => { take(event.target.files?.[0]); event.target.value = ''; }} />
           <label className="btn small" htmlFor={inputId}><Icon name="upload" /> Attach evidence<span className="sr-only"> for {claim}</span></label>
-          <span className="hint">PDF or photo, up to 20 MB</span>
+          {isAsked ? <span className="hint">PDF or photo, up to 20 MB</span> : null}
         </>
       )}
       {fault ? <FieldFault>{fault}</FieldFault> : null}
