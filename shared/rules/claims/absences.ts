@@ -78,7 +78,8 @@ function listAfter(tokens: readonly Token[], start: Span, tables: LanguageTables
   let strange = 0;
   for (let at = start.to; at < tokens.length && at < start.to + LIST_REACH; ) {
     const token = tokens[at]!;
-    if (token.clause !== clause || tables.frame.stop.has(token.word) || strange > STRANGE) break;
+    const isNext = at > start.to && tables.frame.before.longestAt(tokens, at) !== undefined;
+    if (isNext || token.clause !== clause || tables.frame.stop.has(token.word) || strange > STRANGE) break;
     const hit = nameAt(tokens, at, tables);
     if (hit) {
       // "No soap residue" speaks of something else.

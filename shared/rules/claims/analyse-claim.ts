@@ -70,7 +70,7 @@ function findRows(text: string, tokens: readonly Token[], { rows, frame }: Langu
 }
 
 function isExcepted(row: ClaimRow, tokens: readonly Token[], span: Span): boolean {
-  for (let at = span.from < 3 ? 0 : span.from - 3; at <= span.to; at += 1) {
+  for (let at = span.from < 3 ? 0 : span.from - 3; at <= span.to + 1; at += 1) {
     if (row.unless.some((phrase) => standsAt(phrase, tokens, at) && at + phrase.parts.length >= span.from)) return true;
   }
   return false;
