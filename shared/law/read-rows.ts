@@ -36,7 +36,10 @@ function readMembers(row: RowJson, where: string): readonly Member[] {
 function readProvisions(row: RowJson, where: string): readonly Provision[] {
   return (row.provisions ?? [{}]).map((json) => {
     checkDecimal(json.max, where);
-    for (const wording of json.wording ?? []) checkDecimal(wording.above, where);
+    for (const wording of json.wording ?? []) {
+      checkDecimal(wording.above, where);
+      checkDecimal(wording.least, where);
+    }
     const { from, until, ...rest } = json;
     const begins = readDates(from, where);
     const ends = readDates(until, where);

@@ -75,8 +75,8 @@ export interface Provision {
   readonly basis?: string;
   /** Further conditions that must hold (pH, purity, pack). */
   readonly requires?: readonly { readonly that: Condition; readonly words: string }[];
-  /** Ids into the wording table: what the label must then say; `above` where it starts above a share only. */
-  readonly wording?: readonly { readonly id: string; readonly above?: string; readonly where?: Condition }[];
+  /** Ids into the wording table: what the label must then say; `above` or `least` where it starts above, or at, a share only. */
+  readonly wording?: readonly { readonly id: string; readonly above?: string; readonly least?: string; readonly where?: Condition }[];
   readonly from?: Dates;
   /** It ends when these dates bind (its successor's). */
   readonly until?: Dates;

@@ -150,13 +150,18 @@ function judgeWording(common: Common, wording: NonNullable<Provision['wording']>
   if (due === false) return;
   let certainty: 'certain' | 'possible' = due === true ? common.certainty : 'possible';
   let measured: Interval | undefined;
-  if (wording.above !== undefined) {
-    const above = decimal(wording.above);
+  if (wording.above !== undefined || wording.least !== undefined) {
     measured = weighParts(common.parts, context);
-    if (compare(measured.max, above) <= 0) return;
-    if (compare(measured.min, above) <= 0) certainty = 'possible';
+    const isDueAt = (share: Rational): boolean => startsAt(wording, share);
+    if (!isDueAt(measured.max)) return;
+    if (!isDueAt(measured.min)) certainty = 'possible';
   }
   outcomes.push({ ...common, type: 'wording', certainty, needs: [...needs], wordingId: wording.id, ...(measured ? { measured } : {}) });
+}
+
+/** Whether a text that starts at a share is due at this one: strictly above `above`, from `least` on. */
+function startsAt({ above, least }: NonNullable<Provision['wording']>[number], share: Rational): boolean {
+  return (above === undefined || compare(share, decimal(above)) > 0) && (least === undefined || compare(share, decimal(least)) >= 0);
 }
 
 function judgeListedUse(row: LawRow, parts: readonly Part[], context: Context, uses: readonly Answer[], outcomes: Outcome[]): void {

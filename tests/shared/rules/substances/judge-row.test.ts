@@ -177,3 +177,16 @@ test('a listed use that fits is lawful although nothing is said of the purpose',
   expect(kinds([{ name: 'Climbazole', percent: '0.4' }], { category: 'shampoo' })).toEqual([]);
   expect(kinds([{ name: 'Climbazole', percent: '0.4' }], { category: 'hand-cream' })).toContain('not-for-this-use');
 });
+
+/** Annex III, entries 26 to 56: words due "in a concentration of 0.1 to 0.15 %", the least share included. */
+test('a text due from a share on is due at that share, and open where only a part of the range reaches it', () => {
+  const file: RowFileJson = {
+    list: 'restricted', instrument: 'eu-1223-2009', id: 'test/{entry}', citation: 'Test, entry {entry}', markets: ['EU'], sourcing: 'official',
+    rows: [{ entry: '9', title: 'Salt', members: [{ name: 'Testsalt', factor: { times: '1', over: '2' } }], provisions: [{ wording: [{ id: 'fluoride-children', least: '0.1' }] }] }],
+  };
+  const book = openLawBook({ ...lawTables, rows: [...lawTables.rows, file] });
+  const due = (given: Omit<Given, 'name'>) => judge([{ name: 'Testsalt', ...given }], { category: 'toothpaste' }, book).requiredWording.filter(({ lang }) => lang === 'en').map(({ certainty }) => certainty);
+  expect(due({ percent: '0.1999999' })).toEqual([]);
+  expect(due({ percent: '0.2' })).toEqual(['certain']);
+  expect(due({ min: '0.1', max: '0.2' })).toEqual(['possible']);
+});
