@@ -1,12 +1,18 @@
-import { useEffect, useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useState } from 'react';
 import { Link } from 'react-router-dom';
-import { MARKETS } from '#shared/law/types.ts';
-import type { HeadroomLine } from '#shared/engine/assessment.ts';
+import { MARKETS, type Market } from '#shared/law/types.ts';
+import type { ProductDraft } from '#shared/contracts/product-draft.ts';
+import type { HeadroomLine, MarketAssessment } from '#shared/engine/assessment.ts';
 import { setGrams } from '#src/features/formula/recipes.ts';
+import { weighFormula } from '#src/features/formula/weigh.ts';
 import { paths } from '#src/app/paths.ts';
 import { ClaimsSection } from '#src/features/claims/claims-section.tsx';
+import { explainFinding, nameRule } from '#shared/report/explain.ts';
+import { findAllergenNotes } from '#src/features/verdicts/allergen-notes.tsx';
+import { findHeadroomNote } from '#src/features/verdicts/headroom-note.tsx';
 import { Ledger } from '#src/features/verdicts/ledger.tsx';
-import { countFindings, mergeFindings, type MergedFinding } from '#src/features/verdicts/merge.ts';
+import { countFindings, mergeFindings, type Counts, type MergedFinding } from '#src/features/verdicts/merge.ts';
+import type { LedgerNote } from '#src/features/verdicts/note-row.tsx';
 import { NotChecked } from '#src/features/verdicts/not-checked.tsx';
 import { RoomLeft } from '#src/features/verdicts/room-left.tsx';
 import { sayFact } from '#src/features/workspace/fact-fields.tsx';
@@ -22,10 +28,14 @@ export function Component() {
   const { draft, change } = desk;
   const results = useMemo(() => MARKETS.flatMap((market) => live.all.get(market) ?? []), [live.all]);
   const merged = useMemo(() => mergeFindings(results), [results]);
-  const counts = useMemo(() => new Map(results.map((result) => [result.market, countFindings(result.findings)])), [results]);
   const lines = draft.formula.phases.flatMap((phase) => phase.lines);
   const remedies = useRemedies(draft, live, isReadOnly);
   const headroom = useHeadroom(live.view.result.headroom);
+  const { law } = page.engine;
+  const sayRule = useCallback((rule: string) => nameRule(rule, asOf.market, law), [asOf.market, law]);
+  const notes = useNotes({ results, draft, market: asOf.market, headroom, nameOf, sayRule });
+
+  const counts = useMemo(() => new Map(results.map((result) => [result.market, withNotes(countFindings(result.findings), notes, result.market)])), [results, notes]);
 
   const remedyOf = (finding: MergedFinding) => {
     const own = finding.markets.get(asOf.market);
@@ -53,7 +63,7 @@ export function Component() {
         {lines.length === 0 ? (
           <p className="ledger-none">Nothing to judge yet: the formula has no line.</p>
         ) : (
-          <Ledger findings={merged} counts={counts} sold={draft.markets} release={page.engine.law.release} nameOf={nameOfSource} actOf={actOf} waysOf={waysOf} isWorking={live.isBehind} />
+          <Ledger findings={merged} counts={counts} sold={draft.markets} release={page.engine.law.release} nameOf={nameOfSource} actOf={actOf} waysOf={waysOf} explain={(finding, market) => explainFinding(finding, market, law)} notes={notes} isWorking={live.isBehind} />
         )}
         <ClaimsSection
           productId={page.id}
@@ -62,7 +72,7 @@ export function Component() {
           isReadOnly={isReadOnly}
           editLink={isReadOnly ? null : <Link to={`${paths.product(page.id)}${page.search}#particulars`}>Write one with the particulars</Link>}
         />
-        <RoomLeft market={asOf.market} headroom={headroom} lines={lines.map((line) => nameOf(line.materialId))} />
+        <RoomLeft market={asOf.market} headroom={headroom} lines={lines.map((line) => nameOf(line.materialId))} nameRule={sayRule} />
         <NotChecked memory={merged.filter((finding) => finding.lead.sourcing === 'memory').length} handling={handling} />
       </Sheet>
     </div>
@@ -77,4 +87,27 @@ function useHeadroom(work: () => readonly HeadroomLine[]): readonly HeadroomLine
     return () => clearTimeout(timer);
   }, [work]);
   return found && found.of === work ? found.lines : null;
+}
+
+interface NotesInput {
+  readonly results: readonly MarketAssessment[];
+  readonly draft: ProductDraft;
+  readonly market: Market;
+  readonly headroom: readonly HeadroomLine[] | null;
+  readonly nameOf: (materialId: string) => string;
+  readonly sayRule: (rule: string) => string;
+}
+
+/** What is worth knowing besides the findings: allergens named and unnamed, and the line with the least room. */
+function useNotes({ results, draft, market, headroom, nameOf, sayRule }: NotesInput): readonly LedgerNote[] {
+  const allergens = useMemo(() => findAllergenNotes(results), [results]);
+  return useMemo(() => {
+    const lines = [...weighFormula(draft.formula).lines.values()];
+    const room = headroom?.map((each) => ({ ...each, share: lines.find(({ index }) => index === each.line)?.share ?? '0' })) ?? null;
+    return [...allergens, ...findHeadroomNote(market, room, (index) => nameOf(lines.find((one) => one.index === index)!.line.materialId), sayRule)];
+  }, [allergens, draft.formula, headroom, market, nameOf, sayRule]);
+}
+
+function withNotes(counts: Counts, notes: readonly LedgerNote[], market: Market): Counts {
+  return { ...counts, note: counts.note + notes.filter(({ cells }) => cells.has(market)).length };
 }

@@ -3,8 +3,10 @@ import { useSuspenseQuery } from '@tanstack/react-query';
 import { useNavigate, useSearchParams } from 'react-router-dom';
 import type { Finding } from '#shared/engine/types.ts';
 import { parsePlainDate } from '#shared/kernel/plain-date.ts';
+import type { LawBook } from '#shared/law/law-book.ts';
 import { MARKETS, type Market } from '#shared/law/types.ts';
 import { can } from '#shared/policies/can.ts';
+import { explainFinding } from '#shared/report/explain.ts';
 import type { PageLoader } from '#src/app/page.ts';
 import { paths } from '#src/app/paths.ts';
 import { namesQuery } from '#src/features/reading/queries.ts';
@@ -69,7 +71,7 @@ export function Component() {
             onText={write}
             onAsk={ask}
             onChoose={(written, inci) => write(replaceName(text, written, inci))}
-            verdicts={(findings) => <ListVerdicts findings={findings} market={market} release={law.release} />}
+            verdicts={(findings) => <ListVerdicts findings={findings} market={market} law={law} />}
             start={mayEdit && reading && !('mistake' in reading) ? (
               <StartProduct
                 names={reading.names}
@@ -89,13 +91,14 @@ export function Component() {
   );
 }
 
-function ListVerdicts({ findings, market, release }: { findings: readonly Finding[]; market: Market; release: string }) {
+function ListVerdicts({ findings, market, law }: { findings: readonly Finding[]; market: Market; law: LawBook }) {
   return (
     <Ledger
       findings={mergeFindings([{ market, findings }])}
       counts={new Map([[market, countFindings(findings)]])}
       sold={[market]}
-      release={release}
+      release={law.release}
+      explain={(finding, where) => explainFinding(finding, where, law)}
       nameOf={(from) => from}
       actOf={() => null}
       waysOf={() => []}

@@ -120,6 +120,7 @@ function remedyOf(outcome: Outcome, kind: FindingKind, subject: string): string 
   if (kind === 'limit-exceeded' && outcome.isRatio) return 'Lower one of them until the ratios add up to 1 or less.';
   if (kind === 'limit-exceeded') return `Bring ${subject} to ${outcome.limitText} % or less${outcome.provision.basis ? `, counted ${outcome.provision.basis}` : ''}.`;
   if (outcome.type === 'requires') return 'Change the product so that the condition holds.';
+  if (outcome.type === 'prohibited' && !outcome.provision.where) return `Take ${subject} out: no use of it is allowed.`;
   return `Take ${subject} out, or choose a product kind that the rule allows.`;
 }
 

@@ -1,9 +1,12 @@
 import { useState, type ReactNode } from 'react';
+import type { Finding } from '#shared/engine/types.ts';
 import type { Market } from '#shared/law/types.ts';
+import type { Explanation } from '#shared/report/explain.ts';
 import { TextButton } from '#src/ui/button.tsx';
 import { sayWeight, VerdictMark, VerdictWord } from '#src/ui/verdict-mark.tsx';
 import { headOf, SourcingMark, sumOf, whyOf } from './finding-text.tsx';
 import { cellWords, SEVERITIES, summarise, type Counts, type MergedFinding } from './merge.ts';
+import { NoteRow, type LedgerNote } from './note-row.tsx';
 import { Why } from './why.tsx';
 import './verdicts.css';
 
@@ -16,11 +19,15 @@ export interface LedgerProps {
   /** A button that puts a finding right at once, where there is one. */
   readonly actOf: (finding: MergedFinding) => ReactNode;
   readonly waysOf: (finding: MergedFinding) => readonly ReactNode[];
+  /** What stands behind a finding in a market: asked when someone opens it. */
+  readonly explain: (finding: Finding, market: Market) => Explanation;
+  /** Further things worth knowing, below the findings of that weight. */
+  readonly notes?: readonly LedgerNote[];
   readonly isWorking: boolean;
 }
 
 /** Every finding once, with a column for each market: a dash means that no rule speaks. */
-export function Ledger({ findings, counts, sold, release, nameOf, actOf, waysOf, isWorking }: LedgerProps) {
+export function Ledger({ findings, counts, sold, release, nameOf, actOf, waysOf, explain, notes = [], isWorking }: LedgerProps) {
   const markets = [...counts.keys()];
   const words = summarise(counts, release);
   const columns = { gridTemplateColumns: `minmax(0, 1fr) repeat(${markets.length}, var(--market-column))` };
@@ -53,16 +60,18 @@ export function Ledger({ findings, counts, sold, release, nameOf, actOf, waysOf,
       </div>
       {SEVERITIES.map((severity) => {
         const group = findings.filter((finding) => finding.severity === severity);
-        return group.length === 0 ? null : (
+        const more = severity === 'note' ? notes : [];
+        return group.length + more.length === 0 ? null : (
           <section key={severity} aria-label={sayWeight(severity)}>
             <h2 className="ledger-head"><VerdictWord weight={severity} /></h2>
             {group.map((finding) => (
-              <LedgerRow key={finding.id} finding={finding} markets={markets} columns={columns} nameOf={nameOf} act={actOf(finding)} ways={waysOf(finding)} />
+              <LedgerRow key={finding.id} finding={finding} markets={markets} columns={columns} nameOf={nameOf} act={actOf(finding)} ways={waysOf(finding)} explain={explain} />
             ))}
+            {more.map((note) => <NoteRow key={note.id} note={note} markets={markets} columns={columns} />)}
           </section>
         );
       })}
-      {findings.length === 0 ? <p className="ledger-none">No rule in data release {release} is broken, and nothing waits for a decision.</p> : null}
+      {findings.length === 0 && notes.length === 0 ? <p className="ledger-none">No rule in data release {release} is broken, and nothing waits for a decision.</p> : null}
     </div>
   );
 }
@@ -74,10 +83,12 @@ interface LedgerRowProps {
   readonly nameOf: (from: string) => string;
   readonly act: ReactNode;
   readonly ways: readonly ReactNode[];
+  readonly explain: LedgerProps['explain'];
 }
-function LedgerRow({ finding, markets, columns, nameOf, act, ways }: LedgerRowProps) {
+function LedgerRow({ finding, markets, columns, nameOf, act, ways, explain }: LedgerRowProps) {
   const [isOpen, setOpen] = useState(false);
   const { lead } = finding;
+  const leads = [...finding.markets].find(([, own]) => own === lead)![0];
   const sum = sumOf(lead);
   return (
     <article className="ledger-row" style={columns}>
@@ -116,7 +127,7 @@ function LedgerRow({ finding, markets, columns, nameOf, act, ways }: LedgerRowPr
           </div>
         );
       })}
-      {isOpen ? <Why finding={lead} nameOf={nameOf} ways={ways} /> : null}
+      {isOpen ? <Why finding={lead} explanation={explain(lead, leads)} nameOf={nameOf} ways={ways} /> : null}
     </article>
   );
 }

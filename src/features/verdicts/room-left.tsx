@@ -7,7 +7,7 @@ interface RoomLine {
 }
 
 /** How far each line may rise before something new is found, the others scaled in proportion. */
-export function RoomLeft({ market, headroom, lines }: { market: Market; headroom: readonly RoomLine[] | null; lines: readonly string[] }) {
+export function RoomLeft({ market, headroom, lines, nameRule }: { market: Market; headroom: readonly RoomLine[] | null; lines: readonly string[]; nameRule: (rule: string) => string }) {
   const bounded = (headroom ?? []).filter((each) => each.max !== null && lines[each.line] !== undefined);
   if (headroom !== null && bounded.length === 0) return null;
   return (
@@ -24,7 +24,7 @@ export function RoomLeft({ market, headroom, lines }: { market: Market; headroom
               <tr key={each.line}>
                 <td>{lines[each.line]}</td>
                 <td className="num" title={`${each.max} %`}>{String(Number(Number(each.max).toPrecision(6)))}</td>
-                <td className="quiet">{each.limitedBy}</td>
+                <td className="quiet">{each.limitedBy === null ? '' : nameRule(each.limitedBy)}</td>
               </tr>
             ))}
           </tbody>

@@ -1,11 +1,15 @@
 import type { ReactNode } from 'react';
+import type { Explanation } from '#shared/report/explain.ts';
 import type { Finding } from '#shared/engine/types.ts';
 import { Icon } from '#src/ui/icon.tsx';
 import { Gauge } from './gauge.tsx';
+import { sayDay } from '#src/lib/say.ts';
 import { sayEffective, SourcingMark } from './finding-text.tsx';
 
 export interface WhyProps {
   readonly finding: Finding;
+  /** The rule behind it, its dates and readings; absent while the law is not at hand. */
+  readonly explanation?: Explanation;
   /** Names for the places a figure comes from. */
   readonly nameOf: (from: string) => string;
   /** What would put it right, beyond the remedy itself. */
@@ -13,9 +17,9 @@ export interface WhyProps {
 }
 
 /** How a verdict was found: every step with its figure, the rule's dates and reading, and the ways out. */
-export function Why({ finding, nameOf, ways }: WhyProps) {
+export function Why({ finding, explanation, nameOf, ways }: WhyProps) {
   const steps = finding.arithmetic ?? [];
-  const ends = [sayEffective(finding), finding.reading ?? ''].filter(Boolean);
+  const ends = explanation ? [] : [sayEffective(finding), finding.reading ?? ''].filter(Boolean);
   const asks = finding.needs ?? [];
   return (
     <div className={`why ${finding.severity}`}>
@@ -45,7 +49,7 @@ export function Why({ finding, nameOf, ways }: WhyProps) {
           <p className="quiet">{finding.message}</p>
         )}
         {ends.map((sentence) => <p key={sentence} className="quiet end">{sentence}</p>)}
-        <p className="cite">{finding.citation} <SourcingMark finding={finding} /></p>
+        {explanation ? <Grounds finding={finding} explanation={explanation} /> : <p className="cite">{finding.citation} <SourcingMark finding={finding} /></p>}
       </div>
       <div>
         {ways.length > 0 || asks.length > 0 || finding.remedy ? <h4>Ways out</h4> : null}
@@ -57,6 +61,40 @@ export function Why({ finding, nameOf, ways }: WhyProps) {
         </ul>
         {finding.measured !== undefined && finding.limit !== undefined ? <Gauge measured={finding.measured} range={finding.measuredRange} limit={finding.limit} unit={finding.unit ?? '%'} severity={finding.severity} /> : null}
       </div>
+    </div>
+  );
+}
+
+/** The rule in words, what it is set with, its dates, the choices of reading, and the official text. */
+function Grounds({ finding, explanation }: { finding: Finding; explanation: Explanation }) {
+  const { says, parameters, dates, readings, source } = explanation;
+  return (
+    <div className="why-grounds">
+      <section>
+        <h4>What the rule says</h4>
+        {says.map((sentence) => <p key={sentence}>{sentence}</p>)}
+        <p className="cite">
+          {finding.citation} <SourcingMark finding={finding} />
+          {source ? <><br /><a href={source.link} target="_blank" rel="noreferrer" title={source.title}>Official text</a>. {source.state.replace(/\.$/, '')}.</> : null}
+        </p>
+      </section>
+      <section>
+        {parameters.length + dates.length > 0 ? (
+          <>
+            <h4>What it is set with</h4>
+            <dl>
+              {parameters.map(({ name, value }) => <div key={name}><dt>{name}</dt><dd>{value}</dd></div>)}
+              {dates.map(({ words, day }) => <div key={words + day}><dt>{words}</dt><dd>{sayDay(day)}</dd></div>)}
+            </dl>
+          </>
+        ) : null}
+        {readings.length > 0 ? (
+          <>
+            <h4>Where the text leaves a choice</h4>
+            <ul className="readings">{readings.map(({ chosen, why }) => <li key={chosen}><b>{chosen}</b> {why}</li>)}</ul>
+          </>
+        ) : null}
+      </section>
     </div>
   );
 }
