@@ -10,6 +10,8 @@ export default defineConfig({
     exclude: ['tests/journeys/**', 'tests/bench/**', 'node_modules/**'],
     environment: 'node',
     globalSetup: ['tests/support/global-setup.ts'],
+    // Rooms are opened whole: on a busy machine that takes longer than the usual five seconds.
+    testTimeout: 20_000,
     restoreMocks: true,
   },
 });

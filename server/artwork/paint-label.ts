@@ -42,15 +42,19 @@ function paintItem(item: Item, scene: Scene, painter: Painter): string {
   return `${stroke(ink.cmyk)}\n${sheet.length(item.stroke)} w\n${pathOf(item.steps, sheet)}\nS`;
 }
 
-const isOnArcs = (item: Item | undefined): item is Text => item?.kind === 'text' && item.places !== undefined;
-const isOneParagraph = (item: Item, next: Item | undefined): boolean => isOnArcs(next) && next.element === item.element;
+/** Runs whose words are told: no straight line joins letters on arcs, and capitals are only a dress. */
+const isTold = (item: Item | undefined): item is Text => item?.kind === 'text' && (item.places !== undefined || item.says !== undefined);
+const isOneParagraph = (item: Item, next: Item | undefined): boolean => isTold(next) && next.element === item.element;
 
-/** What the runs on arcs say from here to the end of their element, or `null` where none begins. */
+/** What the told runs say from here to the end of their element, or `null` where none begins. */
 function wordsFrom(items: readonly Item[], from: number): string | null {
   const first = items[from]!;
-  if (!isOnArcs(first) || (from > 0 && isOneParagraph(items[from - 1]!, first) && isOnArcs(items[from - 1]))) return null;
+  if (!isTold(first) || (from > 0 && isOneParagraph(items[from - 1]!, first) && isTold(items[from - 1]))) return null;
   let words = '';
-  for (let i = from; isOnArcs(items[i]) && items[i]!.element === first.element; i += 1) words += (items[i] as Text).text;
+  for (let i = from; isTold(items[i]) && items[i]!.element === first.element; i += 1) {
+    const { says, text } = items[i] as Text;
+    words += says ?? text;
+  }
   return words;
 }
 
@@ -72,7 +76,7 @@ function paintArtwork(scene: Scene, painter: Painter): string {
     if (wanted !== state) parts.push(wanted);
     state = wanted;
     parts.push(painted);
-    if (isOnArcs(item) && !isOneParagraph(item, scene.items[i + 1])) parts.push('EMC');
+    if (isTold(item) && !isOneParagraph(item, scene.items[i + 1])) parts.push('EMC');
   });
   return [...parts, 'Q'].join('\n');
 }

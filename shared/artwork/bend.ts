@@ -29,7 +29,7 @@ export function bendScene(scene: Scene, taper: Taper, metrics: FontMetrics): { s
   const items = scene.items.map((item): Item => {
     const held = rigid.get(item.element);
     if (held) return moveRigid(item, held);
-    if (item.kind === 'text') return item.turn === 0 ? onArc(item, line(item), taper, metrics) : moveRigid(item, rigidOf([item], taper, metrics));
+    if (item.kind === 'text') return item.turn === 0 ? onArc(item, item.about ?? line(item), taper, metrics) : moveRigid(item, rigidOf([item], taper, metrics));
     return item.kind === 'boxes' ? banded(item, taper) : moveRigid(item, rigidOf([item], taper, metrics));
   });
   const ends: [number, number] = [-taper.angle / 2, taper.angle / 2];

@@ -1,3 +1,5 @@
+import { bandedFront, FILLET_STYLE, HEADBAND_STYLE } from './banded-front.ts';
+import { filletBands, headbandBands } from './bands.ts';
 import { placeColumn, type Heads } from './column.ts';
 import { barsFoot, markFoot, netFoot, placeFeet, placeRows, type Foot, type PlacedFeet } from './feet.ts';
 import { fitBrand, galleyFront, greatLetter, versalFront } from './front.ts';
@@ -298,5 +300,20 @@ export function compose(job: Job, setting: Setting): Attempt {
   const slots = setting.regime === 'wrap' ? wrapSlots(job, setting) : splitSlots(job, setting);
   const narrow = [slots.front, ...slots.columns].find((slot) => slot.width < setting.size * 5);
   if (narrow) return { isHopeless: true, items: [], panels: slots.panels, overflows: [{ element: 'ingredients', direction: 'width', missing: setting.size * 5 - narrow.width, room: Math.max(0, narrow.width) }] };
+  if (job.template === 'fillet' || job.template === 'headband') return banded(job, setting, slots);
   return job.template === 'versal' ? versal(job, setting, slots) : galley(job, setting, slots);
+}
+
+/** Fillet and Headband: bands around the body, everything else in columns between or under them. */
+function banded(job: Job, setting: Setting, slots: Slots): Attempt {
+  const isFillet = job.template === 'fillet';
+  const bands = isFillet ? filletBands(job, setting) : headbandBands(job, setting);
+  const heights: Heights = { top: bands.top, foot: bands.foot };
+  const front = bandedFront(job, setting, { x: slots.front.x, width: slots.front.width, ...heights }, isFillet ? FILLET_STYLE(job) : HEADBAND_STYLE(job));
+  const columns = setting.columns.map((plan, i) => fillSlot(job, setting, plan, slots.columns[i]!, heights, 'inline'));
+  return {
+    items: [...bands.items, ...front.items, ...columns.flatMap((column) => column.items)],
+    overflows: [...front.overflows, ...columns.flatMap((column) => column.overflows)],
+    panels: slots.panels,
+  };
 }

@@ -23,15 +23,22 @@ export interface Layout {
 
 export const TEMPLATES: readonly { readonly slug: TemplateName; readonly name: string; readonly temper: string }[] = [
   { slug: 'galley', name: 'Galley', temper: 'Hung from one line, like a proof drying.' },
+  { slug: 'headband', name: 'Headband', temper: 'A stitched edge, and small calm print.' },
+  { slug: 'fillet', name: 'Fillet', temper: 'Everything stands between two wheeled rules.' },
   { slug: 'versal', name: 'Versal', temper: 'One great letter; the particulars answer in a ledger.' },
 ];
 
 /** The template asked for, or the one drawn for this shape. */
 export function templateFor(input: Pick<LabelInput, 'template' | 'container'>): TemplateName {
-  const asked = TEMPLATES.find((template) => template.slug === input.template);
-  // Versal's great letter stands on a straight ground.
-  if (input.container.shape === 'taper') return 'galley';
-  return asked?.slug ?? (input.container.shape === 'flat' ? 'versal' : 'galley');
+  const { shape } = input.container;
+  const asked = templatesFor(shape).find((template) => template.slug === input.template);
+  return asked?.slug ?? (shape === 'flat' ? 'versal' : shape === 'taper' ? 'fillet' : 'galley');
+}
+
+/** The templates drawn for a shape: bands need a body to run around, the great letter a straight ground. */
+export function templatesFor(shape: LabelInput['container']['shape']): typeof TEMPLATES {
+  const fitting: Readonly<Record<typeof shape, readonly TemplateName[]>> = { cylinder: ['galley', 'headband', 'fillet', 'versal'], taper: ['fillet', 'galley'], flat: ['galley', 'versal'] };
+  return TEMPLATES.filter(({ slug }) => fitting[shape].includes(slug));
 }
 
 const READING_ORDER: readonly ElementName[] = [

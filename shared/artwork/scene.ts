@@ -74,6 +74,10 @@ export interface Text extends Common {
   readonly offsets: readonly number[];
   /** Full advance in thousandths of the em. */
   readonly advance: number;
+  /** What readers are told where capitals are only a dress. */
+  readonly says?: string;
+  /** The place along the sheet that keeps its direction when the sheet is bent; the line's start when absent. */
+  readonly about?: Micrometres;
   /** Set where the run leaves the straight line: a place for each character, instead of `turn` and `offsets`. */
   readonly places?: readonly Place[];
 }

@@ -8,7 +8,7 @@ import type { FontMetrics } from './metrics.ts';
 import type { ElementName, Item, Micrometres, Panel, Text, Turn, Weight } from './scene.ts';
 
 export type FootName = 'net' | 'mark' | 'bars';
-export type TemplateName = 'galley' | 'versal';
+export type TemplateName = 'galley' | 'versal' | 'fillet' | 'headband';
 
 /** What stands in one column: texts from above, feet on the last base line or in a slice beside the texts. */
 export interface ColumnPlan {

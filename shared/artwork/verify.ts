@@ -75,7 +75,8 @@ export function verifyAttempt(job: Job, setting: Setting, attempt: Attempt): Ove
   const found = (element: ElementName, direction: Overflow['direction'], missing: Micrometres): void => {
     overflows.push({ element, direction, missing, room: job.sheet.width });
   };
-  const grounds = attempt.items.filter((item) => item.element === 'ground' && item.kind === 'boxes').map((item) => shapeBox(item, job));
+  // Dark type and bars are read on the light ink; every other ground is dark.
+  const grounds = attempt.items.filter((item) => item.element === 'ground' && item.kind === 'boxes' && item.ink !== 'light').map((item) => shapeBox(item, job));
   const inked = attempt.items.filter((item) => item.element !== 'ground' && item.element !== 'rule').map((item) => ({ item, box: fullBox(item, job) }));
   for (const { item, box } of inked) {
     const outside = outsideSafe(box, job);

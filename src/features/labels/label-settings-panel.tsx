@@ -3,7 +3,7 @@ import { barcodeFault } from '#shared/artwork/barcode.ts';
 import { readContainer } from '#shared/artwork/container.ts';
 import { CONTAINERS, USUAL_OVERLAP_MM, USUAL_STOCK_MM, type UsualContainer } from '#shared/artwork/containers.ts';
 import { PALETTES } from '#shared/artwork/inks.ts';
-import { TEMPLATES, templateFor } from '#shared/artwork/layout.ts';
+import { TEMPLATES, templateFor, templatesFor } from '#shared/artwork/layout.ts';
 import { Panel } from '#src/ui/sheet.tsx';
 import { SelectField, TextField } from '#src/ui/field.tsx';
 
@@ -59,7 +59,7 @@ export function LabelSettingsPanel({ draft, onChange, isLocked }: SettingsPanelP
             {LANGUAGES.some(([code]) => code === label.languages.join('+')) || label.languages.join('+') === 'en+fr' ? null : <option value={label.languages.join('+')}>{label.languages.join(', ')}</option>}
           </SelectField>
           <SelectField label="Template" value={templateFor(label)} disabled={isLocked} onChange={(event) => change({ template: event.target.value })} hint={TEMPLATES.find((template) => template.slug === templateFor(label))?.temper} className="wide">
-            {TEMPLATES.filter((template) => label.container.shape !== 'taper' || template.slug === 'galley').map((template) => <option key={template.slug} value={template.slug}>{template.name}</option>)}
+            {templatesFor(label.container.shape).map((template) => <option key={template.slug} value={template.slug}>{template.name}</option>)}
           </SelectField>
           <fieldset className="inks wide" disabled={isLocked}>
             <legend className="field-label">House ink</legend>

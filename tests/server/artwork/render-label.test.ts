@@ -25,6 +25,8 @@ const CASES: readonly (readonly [string, LabelInput])[] = [
   ['galley-eu', bodyWash], ['galley-us', inMarket('US')], ['galley-ca', { ...inMarket('CA'), container: { shape: 'cylinder', diameterMm: '70', labelHeightMm: '90', overlapMm: '5' } }],
   ['tub', { ...bodyWash, container: { shape: 'taper', topDiameterMm: '72', bottomDiameterMm: '62', labelHeightMm: '46', overlapMm: '5' } }],
   ['cone-us', { ...inMarket('US'), container: { shape: 'taper', topDiameterMm: '62', bottomDiameterMm: '74', labelHeightMm: '100', overlapMm: '5' } }],
+  ['headband-jar', { ...bodyWash, template: 'headband', container: { shape: 'cylinder', diameterMm: '67', labelHeightMm: '36', overlapMm: '5' } }],
+  ['fillet-wrap', { ...bodyWash, template: 'fillet', ink: 'mallow' }],
   ['ladder', { ...bodyWash, container: { shape: 'cylinder', diameterMm: '40', labelHeightMm: '160', overlapMm: '5' } }],
   ['versal', { ...bodyWash, ink: 'mallow', container: { shape: 'flat', widthMm: '80', heightMm: '120' } }],
   ['versal-us', { ...inMarket('US'), ink: 'black', container: { shape: 'flat', widthMm: '150', heightMm: '100' } }],
@@ -34,8 +36,9 @@ test.each(CASES)('%s is a sound one-page file whose trim is the container', asyn
   const { path, scene, bytes } = await pressFile(input, name);
   expect(run('qpdf', '--check', path)).toContain('No syntax or stream encoding errors');
   expect(Buffer.from(bytes.subarray(0, 8)).toString()).toBe('%PDF-1.4');
-  // On arcs every letter has a place of its own.
-  expect(bytes.length).toBeLessThanOrEqual((input.container.shape === 'taper' ? 30 : 25) * 1024);
+  // On arcs every letter has a place of its own, and a stitched edge has hundreds of threads.
+  const isBusy = input.container.shape === 'taper' || input.template === 'headband';
+  expect(bytes.length).toBeLessThanOrEqual((isBusy ? 30 : 25) * 1024);
   const info = run('pdfinfo', '-box', path);
   expect(info).toMatch(/Pages:\s+1\n/);
   const box = (which: string): number[] => new RegExp(`${which}:\\s+(.+)`).exec(info)![1]!.trim().split(/\s+/).map(Number);

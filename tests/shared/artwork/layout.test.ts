@@ -131,8 +131,41 @@ test('best before is said in words and with the hourglass', () => {
   expect(said(scene!, 'durability')).toBe('Best used before the end of 05/2028');
 });
 
-test.each([['galley', flat('120', '80')], ['galley', flat('70', '120')], ['versal', wrap('58', '90')], ['versal', flat('120', '70')]] as const)('%s can be set on %o', (template, container) => {
+test.each([['galley', flat('120', '80')], ['galley', flat('70', '120')], ['versal', wrap('58', '90')], ['versal', flat('120', '70')],
+  ['headband', wrap('67', '36')], ['headband', wrap('58', '90')], ['fillet', wrap('58', '90')], ['fillet', { shape: 'taper', topDiameterMm: '72', bottomDiameterMm: '62', labelHeightMm: '46', overlapMm: '5' }],
+] as const)('%s can be set on %o', (template, container) => {
   const { misfits, scene } = lay({ ...bodyWash, template, container });
   expect(misfits).toEqual([]);
   expect(scene!.template).toBe(template);
+});
+
+test.each((['EU', 'UK', 'US', 'CA'] as const).flatMap((market) => (['headband', 'fillet'] as const).map((template) => [market, template] as const)))('%s in %s: every letter and margin holds', (market, template) => {
+  const { scene, misfits, checks } = lay({ ...inMarket(market), template, container: wrap('84', '100') });
+  expect(misfits).toEqual([]);
+  expect(checks.filter((check) => check.state === 'stop')).toEqual([]);
+  for (const item of textsOf(scene!)) {
+    const face = plexMetrics.face(item.weight);
+    const figures = /^[\d ]+M?$|^℮$/.test(item.text);
+    expect(item.size * (figures ? face.capHeight : face.xHeight), item.text).toBeGreaterThanOrEqual(TEXT[market]);
+  }
+});
+
+test('a front in capitals still says its words as they are written', () => {
+  const { scene } = lay({ ...bodyWash, template: 'fillet', container: wrap('58', '90') });
+  const name = textsOf(scene!, 'name');
+  expect(name.map(({ text }) => text).join('')).toBe('JUNIPER & OAT');
+  expect(name.map(({ says }) => says).join('')).toBe('Juniper & Oat');
+});
+
+test('threads meet in register where the wrap closes', () => {
+  const { scene } = lay({ ...bodyWash, template: 'headband', container: wrap('58', '90') });
+  const [ink, light] = scene!.items.filter((item) => item.kind === 'path' && item.element === 'rule');
+  const starts = (item: typeof ink): number[] => (item?.kind === 'path' ? item.steps.flatMap((step) => (step[0] === 'M' ? [step[1]] : [])) : []);
+  const round = 182_401;
+  // Every light thread has another one exactly once around, to a micrometre.
+  const all = starts(light);
+  const inside = all.filter((x) => x - round >= Math.min(...all) - 1);
+  expect(inside.length).toBeGreaterThan(3);
+  for (const x of inside) expect(Math.min(...all.map((other) => Math.abs(x - other - round)))).toBeLessThanOrEqual(1);
+  expect(Math.round(starts(ink).length / all.length)).toBe(3);
 });
