@@ -236,4 +236,7 @@ export const FORMULAS: Readonly<Record<string, readonly Formula[]>> = {
   Ag: [
     ['Silver Citrate', 'C6H5O7Ag3', 3],
   ],
+  Sr: [
+    ['Strontium Peroxide', 'O2Sr', 1],
+  ],
 };

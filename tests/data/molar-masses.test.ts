@@ -32,8 +32,9 @@ function isRight({ factor }: Member, { formula, basis, times }: (typeof cases)[n
   return compare(multiply(decimal(factor!.times), massOf(formula)), multiply(decimal(factor!.over), equivalent)) === 0;
 }
 
-test.each(cases)('$name ($formula) on the basis of $times $basis', (one) => {
-  expect(members.some((member) => foldName(member.name) === foldName(one.name) && isRight(member, one))).toBe(true);
+test('every substance listed here stands in the tables with a factor', () => {
+  const named = new Set(members.map(({ name }) => foldName(name)));
+  expect(cases.filter(({ name }) => !named.has(foldName(name))).map(({ name }) => name)).toEqual([]);
 });
 
 test('no factor of a substance listed here says anything else', () => {
@@ -41,6 +42,7 @@ test('no factor of a substance listed here says anything else', () => {
     const formulas = cases.filter(({ name }) => foldName(name) === foldName(member.name));
     return formulas.length > 0 && !formulas.some((one) => isRight(member, one));
   });
+  expect(isRight({ name: 'Sodium Benzoate', factor: { times: '122.123', over: '144.106' } }, cases.find(({ name }) => name === 'Sodium Benzoate')!)).toBe(false);
   expect(wrong.map(({ name, factor }) => `${name} ${factor!.times}/${factor!.over}`)).toEqual([]);
 });
 
