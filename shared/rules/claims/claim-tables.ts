@@ -146,33 +146,77 @@ export function claimTables(lang: string): LanguageTables | undefined {
   return opened.get(lang);
 }
 
-const marks = (texts: readonly string[]): PhraseIndex<true> => new PhraseIndex(texts.map((text) => [readPhrase(text), true] as const));
+/** @returns an index of these texts, each leading to its item */
+function index<T>(entries: readonly (readonly [texts: readonly string[], item: T])[]): PhraseIndex<T> {
+  const made = new PhraseIndex<T>();
+  for (const [texts, item] of entries) for (const text of texts) made.add(text, item);
+  return made;
+}
+const marks = (texts: readonly string[]): PhraseIndex<true> => index([[texts, true]]);
 
 function openTables(lang: string, { frame, rows }: LanguageJson): LanguageTables {
-  const ofLanguage = classes.map(({ words, plain, ...claimClass }) => ({ claimClass, words: (words[lang] ?? []).map(readPhrase), plain: (plain?.[lang] ?? []).map(readPhrase) }));
+  const ofLanguage = classes.map((claimClass) => ({ claimClass, words: claimClass.words[lang] ?? [], plain: claimClass.plain?.[lang] ?? [] }));
   return {
     lang,
     frame: openFrame(frame),
-    rows: new PhraseIndex(rows.flatMap((row) => {
-      const item: ClaimRow = { id: row.id, verdict: row.verdict, why: row.why, by: row.by, softens: row.softens ?? false, near: row.near && marks(row.near), unless: (row.unless ?? []).map(readPhrase) };
-      return row.phrases.map((text) => [readPhrase(text), item] as const);
-    })),
-    classes: new PhraseIndex(ofLanguage.flatMap(({ claimClass, words }) => words.map((phrase) => [phrase, claimClass] as const))),
-    plain: new PhraseIndex(ofLanguage.flatMap(({ claimClass, plain }) => plain.map((phrase) => [phrase, claimClass] as const))),
-    ingredients: openIngredients(lang),
-    single: ofLanguage.flatMap(({ claimClass, words }) => words.filter(({ parts }) => parts.length === 1).map(({ parts }) => ({ ...parts[0]!, claimClass }))),
+    rows: index(rows.map((row) => [row.phrases, new OpenRow(row) as ClaimRow] as const)),
+    classes: index(ofLanguage.map(({ claimClass, words }) => [words, claimClass as ClaimClass] as const)),
+    plain: index(ofLanguage.map(({ claimClass, plain }) => [plain, claimClass as ClaimClass] as const)),
+    ingredients: index(ingredients.map((one) => [wordsOf(one, lang), new OpenIngredient(one) as NamedIngredient] as const)),
+    single: ofLanguage.flatMap(({ claimClass, words }) => words.filter((text) => !text.includes(' ')).map((text) => ({ ...readPhrase(text).parts[0]!, claimClass }))),
   };
 }
 
 /** English words also in the plural; other languages by stems. */
-function openIngredients(lang: string): PhraseIndex<NamedIngredient> {
-  return new PhraseIndex(
-    ingredients.flatMap(({ word, starts, ...words }) => {
-      const item: NamedIngredient = { word, starts: starts.map((text) => text.replaceAll(' ', '')) };
-      const texts = lang === 'en' ? [word, `${word}s`] : ((words as Readonly<Record<string, readonly string[]>>)[lang] ?? []);
-      return texts.map((text) => [readPhrase(text), item] as const);
-    }),
-  );
+function wordsOf({ word, de, fr }: IngredientJson, lang: string): readonly string[] {
+  return lang === 'en' ? [word, `${word}s`] : ((lang === 'de' ? de : fr) ?? []);
+}
+
+/** Most rows are never met: what stands around their words is read on the first hit. */
+class OpenRow implements ClaimRow {
+  readonly #row: RowJson;
+  #near: PhraseIndex<true> | undefined;
+  #unless: readonly Phrase[] | undefined;
+
+  constructor(row: RowJson) {
+    this.#row = row;
+  }
+
+  get id(): string {
+    return this.#row.id;
+  }
+  get verdict(): RowJson['verdict'] {
+    return this.#row.verdict;
+  }
+  get why(): string {
+    return this.#row.why;
+  }
+  get by(): Criterion | undefined {
+    return this.#row.by;
+  }
+  get softens(): boolean {
+    return this.#row.softens ?? false;
+  }
+  get near(): PhraseIndex<true> | undefined {
+    return (this.#near ??= this.#row.near && marks(this.#row.near));
+  }
+  get unless(): readonly Phrase[] {
+    return (this.#unless ??= (this.#row.unless ?? []).map(readPhrase));
+  }
+}
+
+class OpenIngredient implements NamedIngredient {
+  readonly word: string;
+  readonly #starts: readonly string[];
+
+  constructor({ word, starts }: IngredientJson) {
+    this.word = word;
+    this.#starts = starts;
+  }
+
+  get starts(): readonly string[] {
+    return this.#starts.map((text) => text.replaceAll(' ', ''));
+  }
 }
 
 function openFrame({ ph, ...frame }: FrameJson): Frame {
@@ -182,6 +226,6 @@ function openFrame({ ph, ...frame }: FrameJson): Frame {
     deniedList: new Set(frame.deniedList), lookAfter: new Set(frame.lookAfter), parts: new Set(frame.parts), scent: new Set(frame.scent),
     likeness: new Set(frame.likeness), elsewhere: new Set(frame.elsewhere),
     phWord: ph.word,
-    phRanges: new PhraseIndex(ph.ranges.flatMap(({ phrases, from, to }) => phrases.map((text) => [readPhrase(text), { from, to }] as const))),
+    phRanges: index(ph.ranges.map(({ phrases, from, to }) => [phrases, { from, to }] as const)),
   };
 }

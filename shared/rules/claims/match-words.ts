@@ -20,11 +20,15 @@ export interface Span {
 }
 
 const WORD = /\d+[.,]\d+(?![\p{L}\p{N}])|[\p{L}\p{N}](?:[\p{L}\p{N}\p{M}\u00AD]|['’](?=\p{L}))*|%|[,:()–—.;!?•\n]/gu;
+/** The same for plain letters: the tables of all letters take long to load, and most claims need none of them. */
+const PLAIN_WORD = /\d+[.,]\d+(?![a-z0-9])|[a-z0-9](?:[a-z0-9]|'(?=[a-z]))*|%|[,:().;!?\n]/gi;
+const IS_PLAIN = /^[\x00-\x7f]*$/;
 const PAUSE = /^[,:()–—]$/;
 const CLAUSE_END = /^[.;!?•\n]$/;
 
 /** Small letters without accents, apostrophes or soft hyphens; a comma in a number is a point. */
 export function foldWord(word: string): string {
+  if (IS_PLAIN.test(word)) return word.toLowerCase().replaceAll("'", '').replace(/^(\d+),(\d+)$/, '$1.$2');
   return word.toLowerCase().replace(/ß/g, 'ss').replace(/œ/g, 'oe').normalize('NFKD').replace(/[\p{M}'’\u00AD]+/gu, '').replace(/^(\d+),(\d+)$/, '$1.$2');
 }
 
@@ -33,7 +37,7 @@ export function tokenise(text: string, lang: string): Token[] {
   const tokens: Token[] = [];
   let clause = 0;
   let isAfterComma = false;
-  for (const match of text.matchAll(WORD)) {
+  for (const match of text.matchAll(IS_PLAIN.test(text) ? PLAIN_WORD : WORD)) {
     const raw = match[0];
     if (PAUSE.test(raw)) isAfterComma = true;
     else if (CLAUSE_END.test(raw)) clause += 1;
@@ -72,28 +76,34 @@ export interface Found<T> {
   readonly span: Span;
 }
 
+interface Kept<T> {
+  readonly text: string;
+  readonly item: T;
+  /** Read when a claim first comes near it: most never are. */
+  phrase?: Phrase;
+}
+
 /** Phrases found by the beginning of their first word, so that no table is run through. */
 export class PhraseIndex<T> {
-  readonly #byStart = new Map<string, { readonly phrase: Phrase; readonly item: T }[]>();
+  readonly #byStart = new Map<string, Kept<T>[]>();
 
-  constructor(entries: Iterable<readonly [phrase: Phrase, item: T]>) {
-    for (const [phrase, item] of entries) {
-      const key = keyOf(phrase.parts[0]!.text);
-      const known = this.#byStart.get(key);
-      if (known) known.push({ phrase, item });
-      else this.#byStart.set(key, [{ phrase, item }]);
-    }
+  add(text: string, item: T): void {
+    const key = beginningOf(text);
+    const known = this.#byStart.get(key);
+    if (known) known.push({ text, item });
+    else this.#byStart.set(key, [{ text, item }]);
   }
 
   /** Everything whose phrase stands at this word; of one item only its longest phrase. */
   allAt(tokens: readonly Token[], at: number): Found<T>[] {
     const token = tokens[at];
-    const candidates = token && this.#byStart.get(keyOf(token.word));
+    const candidates = token && this.#byStart.get(token.word.slice(0, 3));
     if (!candidates) return [];
     const best = new Map<T, Span>();
-    for (const { phrase, item } of candidates) {
+    for (const kept of candidates) {
+      const phrase = (kept.phrase ??= readPhrase(kept.text));
       const to = at + phrase.parts.length;
-      if (to > (best.get(item)?.to ?? at) && standsAt(phrase, tokens, at)) best.set(item, { from: at, to });
+      if (to > (best.get(kept.item)?.to ?? at) && standsAt(phrase, tokens, at)) best.set(kept.item, { from: at, to });
     }
     return [...best].map(([item, span]) => ({ item, span }));
   }
@@ -104,8 +114,11 @@ export class PhraseIndex<T> {
   }
 }
 
-/** Stems of the tables have three letters at least. */
-const keyOf = (word: string): string => word.slice(0, 3);
+/** The first three letters of a phrase's first word; stems of the tables have three at least. */
+function beginningOf(text: string): string {
+  const space = text.indexOf(' ');
+  return text.slice(0, space >= 0 && space < 3 ? space : 3);
+}
 
 /** The words as the claim writes them. */
 export function quote(text: string, tokens: readonly Token[], span: Span): string {
