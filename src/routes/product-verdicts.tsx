@@ -1,4 +1,5 @@
 import { useCallback, useEffect, useMemo, useState } from 'react';
+import { useQuery } from '@tanstack/react-query';
 import { Link } from 'react-router-dom';
 import { MARKETS, type Market } from '#shared/law/types.ts';
 import type { ProductDraft } from '#shared/contracts/product-draft.ts';
@@ -10,6 +11,7 @@ import { ClaimsSection } from '#src/features/claims/claims-section.tsx';
 import { explainFinding, nameRule } from '#shared/report/explain.ts';
 import { findAllergenNotes } from '#src/features/verdicts/allergen-notes.tsx';
 import { findHeadroomNote } from '#src/features/verdicts/headroom-note.tsx';
+import { evidenceQueries } from '#src/features/claims/queries.ts';
 import { Ledger } from '#src/features/verdicts/ledger.tsx';
 import { countFindings, mergeFindings, type Counts, type MergedFinding } from '#src/features/verdicts/merge.ts';
 import type { LedgerNote } from '#src/features/verdicts/note-row.tsx';
@@ -37,6 +39,9 @@ export function Component() {
 
   const counts = useMemo(() => new Map(results.map((result) => [result.market, withNotes(countFindings(result.findings), notes, result.market)])), [results, notes]);
 
+  const evidence = useQuery(evidenceQueries.ofProduct(page.id));
+  const papersOf = (claim: string) => (evidence.data?.items ?? []).filter((paper) => paper.claim === claim).length;
+
   const remedyOf = (finding: MergedFinding) => {
     const own = finding.markets.get(asOf.market);
     // The other markets are judged apart: the same finding of the market at hand is found by its rule.
@@ -47,7 +52,7 @@ export function Component() {
     const remedy = remedyOf(finding);
     if (remedy) return <Button small weight="act" onClick={() => change(setGrams(remedy.lineId, remedy.grams))}>Set {remedy.grams} g of {nameOf(remedy.materialId)}</Button>;
     const asked = finding.lead.needs ?? [];
-    if (finding.lead.kind === 'claim-evidence' && asked.length === 0) return <a className="btn small" href="#claims">See the claim and its evidence</a>;
+    if (finding.lead.kind === 'claim-evidence' && asked.length === 0) return <a className="btn small" href="#claims">{sayPapers(papersOf(finding.lead.subject))}</a>;
     return asked.length > 0 ? <Link className="btn small" to={`${paths.product(page.id)}${page.search}#particulars`}>Answer: {asked.map(sayFact).join(', ')}</Link> : null;
   };
   const waysOf = (finding: MergedFinding) => {
@@ -77,6 +82,11 @@ export function Component() {
       </Sheet>
     </div>
   );
+}
+
+/** The way to a claim's papers, saying how many there are. */
+function sayPapers(count: number): string {
+  return count === 0 ? 'Attach evidence' : `Look at ${count === 1 ? 'the paper' : `the ${count} papers`} attached`;
 }
 
 /** Headroom takes some tens of milliseconds: it is worked out once the page stands. */
