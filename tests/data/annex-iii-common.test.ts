@@ -190,3 +190,138 @@ test('conditions of the whole entry are listed for each of its letters', () => {
   expect(judge([{ name: 'Benzalkonium Chloride', percent: '1', purpose: 'other' }], { category: 'shampoo' }).notChecked.map((item) => item.words).join(' ')).toContain('C14 or less');
   expect(judge([{ name: 'Triclocarban', percent: '1', purpose: 'other' }], { category: 'body-wash' }).notChecked.map((item) => item.words).join(' ')).toContain('tetrachloroazobenzene');
 });
+
+describe('citral by where it stays', () => {
+  test.each<[string, string, string]>([
+    ['lip-balm', '0.11', 'a'],
+    ['deodorant-stick', '0.032', 'b'],
+    ['intimate-deodorant-spray', '0.032', 'b'],
+    ['foundation', '0.65', 'c'],
+    ['eau-de-toilette', '0.6', 'd'],
+    ['face-cream', '0.15', 'e'],
+    ['wet-wipes', '0.15', 'e'],
+    ['nail-oil', '0.15', 'e'],
+    ['toothpaste', '0.35', 'f'],
+    ['hair-gel', '1.2', 'g'],
+    ['shampoo', '1.2', 'h'],
+    ['baby-wipes', '0.063', 'i'],
+    ['intimate-wipes', '0.063', 'i'],
+  ])('%s: %s %% (%s)', (category, limit, letter) => {
+    const asked: Asked = { category, placed: '2028-08-01', available: '2028-08-01' };
+    const [whole, part = ''] = limit.split('.');
+    expect(saidOf('Citral', limit, asked)).toEqual([]);
+    expect(said(judge(one('Citral', `${whole!}.${part.padEnd(6, '0')}1`), asked), 'limit-exceeded')).toEqual([`limit-exceeded Citral eu/annex-iii/70/${letter}`]);
+  });
+});
+
+test('dihydroxyacetone bears no warning: the entry has none', () => {
+  expect(saidOf('Dihydroxyacetone', '6.25', { category: 'hair-dye-non-oxidative' })).toEqual([]);
+  expect(saidOf('Dihydroxyacetone', '6.2500001', { category: 'hair-dye-non-oxidative' })).toEqual(['limit-exceeded Dihydroxyacetone eu/annex-iii/322/a']);
+  expect(wordsOf(one('Dihydroxyacetone', '6.25'), { category: 'hair-dye-non-oxidative' })).toBe('');
+  expect(saidOf('Dihydroxyacetone', '10.0000001', { category: 'self-tan' })).toEqual(['limit-exceeded Dihydroxyacetone eu/annex-iii/322/b']);
+});
+
+/** Limits read from the official export; each is met exactly and then passed by the least bit. */
+describe('fragrance substances and others at their limits', () => {
+  test.each<[string, string, string, string]>([
+    ['324/a', 'Methyl Salicylate', 'body-lotion', '0.06'],
+    ['324/a', 'Methyl Salicylate', 'hair-gel', '0.06'],
+    ['324/b', 'Methyl Salicylate', 'foundation', '0.05'],
+    ['324/c', 'Methyl Salicylate', 'mascara', '0.002'],
+    ['324/d', 'Methyl Salicylate', 'hair-spray', '0.009'],
+    ['324/e', 'Methyl Salicylate', 'deodorant-spray', '0.003'],
+    ['324/g', 'Methyl Salicylate', 'body-wash', '0.06'],
+    ['324/h', 'Methyl Salicylate', 'hand-wash', '0.6'],
+    ['324/i', 'Methyl Salicylate', 'eau-de-toilette', '0.6'],
+    ['324/j', 'Methyl Salicylate', 'lip-balm', '0.03'],
+    ['324/k', 'Methyl Salicylate', 'toothpaste', '2.52'],
+    ['324/m', 'Methyl Salicylate', 'mouthwash', '0.6'],
+    ['324/n', 'Methyl Salicylate', 'mouth-spray', '0.65'],
+    ['75/a', 'Benzyl Salicylate', 'eau-de-toilette', '4'],
+    ['75/b', 'Benzyl Salicylate', 'shampoo', '0.5'],
+    ['75/c', 'Benzyl Salicylate', 'shower-gel', '1.3'],
+    ['75/d', 'Benzyl Salicylate', 'face-cream', '0.5'],
+    ['75/e', 'Benzyl Salicylate', 'hair-spray', '0.5'],
+    ['75/f', 'Benzyl Salicylate', 'body-lotion', '0.7'],
+    ['75/g', 'Benzyl Salicylate', 'foundation', '0.2'],
+    ['75/h', 'Benzyl Salicylate', 'toothpaste', '0.004'],
+    ['75/i', 'Benzyl Salicylate', 'deodorant-spray', '0.91'],
+    ['380/a', 'Hexyl Salicylate', 'eau-de-toilette', '2'],
+    ['380/b', 'Hexyl Salicylate', 'body-wash', '0.5'],
+    ['380/c', 'Hexyl Salicylate', 'face-cream', '0.3'],
+    ['380/d', 'Hexyl Salicylate', 'toothpaste', '0.001'],
+    ['380/e', 'Hexyl Salicylate', 'mouthwash', '0.001'],
+    ['380/f', 'Hexyl Salicylate', 'baby-lotion', '0.1'],
+    ['382/a', 'Vetiveryl Acetate', 'eau-de-toilette', '0.9'],
+    ['382/b', 'Vetiveryl Acetate', 'deodorant-stick', '0.05'],
+    ['382/c', 'Vetiveryl Acetate', 'foundation', '0.05'],
+    ['382/d', 'Vetiveryl Acetate', 'face-cream', '0.1'],
+    ['382/e', 'Vetiveryl Acetate', 'body-wash', '0.2'],
+    ['102/a', 'Methyl Eugenol', 'eau-de-parfum', '0.01'],
+    ['102/b', 'Methyl Eugenol', 'eau-de-toilette', '0.004'],
+    ['102/c', 'Methyl Eugenol', 'fragrance-cream', '0.002'],
+    ['102/d', 'Methyl Eugenol', 'face-cream', '0.0002'],
+    ['102/d', 'Methyl Eugenol', 'toothpaste', '0.0002'],
+    ['102/e', 'Methyl Eugenol', 'body-wash', '0.001'],
+    ['96/a', 'Musk Xylene', 'eau-de-parfum', '1'],
+    ['96/b', 'Musk Xylene', 'eau-de-toilette', '0.4'],
+    ['96/c', 'Musk Xylene', 'face-cream', '0.03'],
+    ['97/a', 'Musk Ketone', 'eau-de-parfum', '1.4'],
+    ['97/b', 'Musk Ketone', 'eau-de-toilette', '0.56'],
+    ['97/c', 'Musk Ketone', 'face-cream', '0.042'],
+    ['72/b', 'Hydroxycitronellal', 'face-cream', '1'],
+    ['73/b', 'trans-Isoeugenol', 'face-cream', '0.02'],
+    ['89/b', 'Methyl 2-Octynoate', 'face-cream', '0.01'],
+    ['154', 'Myroxylon Pereirae Oil', 'face-cream', '0.4'],
+    ['157/b', 'Rose ketone 4', 'face-cream', '0.02'],
+    ['185', 'Toluene', 'nail-polish', '25'],
+    ['186', 'Diethylene Glycol', 'face-cream', '0.1'],
+    ['196', 'Lippia Citriodora Absolute', 'face-cream', '0.2'],
+    ['325/a', 'BHT', 'mouthwash', '0.001'],
+    ['325/b', 'BHT', 'toothpaste', '0.1'],
+    ['325/c', 'BHT', 'body-wash', '0.8'],
+    ['373', 'Genistein', 'face-cream', '0.007'],
+    ['374', 'Daidzein', 'face-cream', '0.02'],
+    ['375', 'Kojic Acid', 'hand-cream', '1'],
+    ['376/a', 'Retinol', 'body-lotion', '0.05'],
+    ['376/b', 'Retinol', 'face-cream', '0.3'],
+    ['377/a', 'Alpha-Arbutin', 'face-cream', '2'],
+    ['377/b', 'Alpha-Arbutin', 'body-lotion', '0.5'],
+    ['378', 'Arbutin', 'face-cream', '7'],
+    ['22/c', 'Resorcinol', 'shampoo', '0.5'],
+    ['4', 'Ammonia', 'hair-mask', '6'],
+    ['17', 'Sodium Nitrite', 'shaving-foam', '0.2'],
+    ['53/a', 'Etidronic Acid', 'shampoo', '1.5'],
+    ['53/b', 'Etidronic Acid', 'soap-bar', '0.2'],
+  ])('III/%s %s in %s: %s %%', (rule, name, category, limit) => {
+    const asked: Asked = { category, placed: '2028-08-01', available: '2028-08-01' };
+    const [whole, part = ''] = limit.split('.');
+    expect(said(judge(one(name, limit), asked), 'limit-exceeded', 'not-for-this-use')).toEqual([]);
+    expect(said(judge(one(name, `${whole!}.${part.padEnd(6, '0')}1`), asked), 'limit-exceeded')).toEqual([`limit-exceeded ${name} eu/annex-iii/${rule}`]);
+  });
+
+  /** Aluminium is 26.982 of 133.332 in the chloride. */
+  test.each<[string, string, string, string]>([
+    ['a', 'deodorant-stick', '38.197', '38.198'], // 7.73 % of aluminium
+    ['b', 'antiperspirant-spray', '16.010', '16.011'], // 3.24 % of aluminium
+    ['c', 'toothpaste', '15.714', '15.715'], // 3.18 % of aluminium
+    ['d', 'lip-balm', '72.244', '72.245'], // 14.62 % of aluminium
+    ['e', 'body-wash', '4.397', '4.398'], // 0.89 % of aluminium
+    ['f', 'soap-bar', '19.766', '19.767'], // 4 % of aluminium
+    ['g', 'shampoo', '35.282', '35.283'], // 7.14 % of aluminium
+    ['h', 'hair-spray', '0.741', '0.742'], // 0.15 % of aluminium
+    ['i', 'hair-gel', '33.108', '33.109'], // 6.7 % of aluminium
+    ['j', 'foundation', '113.654', '113.655'], // 23 % of aluminium
+    ['k', 'eyeliner', '77.878', '77.879'], // 15.76 % of aluminium
+    ['m', 'nail-polish', '17.838', '17.839'], // 3.61 % of aluminium
+    ['n', 'mascara', '15.466', '15.467'], // 3.13 % of aluminium
+    ['o', 'face-cream', '52.330', '52.331'], // 10.59 % of aluminium
+    ['p', 'hand-cream', '4.249', '4.250'], // 0.86 % of aluminium
+    ['q', 'body-lotion', '18.827', '18.828'], // 3.81 % of aluminium
+    ['r', 'body-powder', '9.883', '9.884'], // 2 % of aluminium
+  ])('III/381 (%s) in %s: %s %% of aluminium chloride passes and %s %% does not', (letter, category, at, over) => {
+    const asked: Asked = { category, ...LATER };
+    expect(said(judge(one('Aluminum Chloride', at), asked), 'limit-exceeded')).toEqual([]);
+    expect(said(judge(one('Aluminum Chloride', over), asked), 'limit-exceeded')).toEqual([`limit-exceeded Aluminum Chloride eu/annex-iii/381/${letter}`]);
+  });
+});
