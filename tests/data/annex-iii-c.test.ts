@@ -307,3 +307,10 @@ test('fragrance allergens of entries 327 to 371 are named, not limited: pinene a
   expect(rows.map((row) => row.entry)).toEqual(['371']);
   expect(rows[0]!.provisions.map((one) => one.max)).toEqual([undefined]);
 });
+
+test('every entry from 251 to 386 is a row or a fragrance allergen; entry 311 has moved to Annex II', () => {
+  const held = new Set([...law.rows.filter((row) => row.citation.includes(', Annex III, ')).map((row) => row.entry), ...law.allergenGroups.map((group) => group.entry)]);
+  const missing = Array.from({ length: 386 - 251 + 1 }, (_, index) => String(251 + index)).filter((entry) => !held.has(entry));
+  expect(missing).toEqual(['311']);
+  expect(law.rowsFor({ name: 'Trimethylbenzoyl Diphenylphosphine Oxide', cas: [] }).map((hit) => hit.row.id)).toEqual(['eu/annex-ii/1731']);
+});
