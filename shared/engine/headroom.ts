@@ -32,6 +32,8 @@ export interface Comparison {
   readonly keys: readonly string[];
   /** Where crossing it changes the list itself. */
   readonly changesList: boolean;
+  /** A least share, promised by a claim: falling below it is found too. */
+  readonly isLeast?: boolean;
   weigh(blend: Blend): Interval;
 }
 
@@ -71,7 +73,7 @@ type Fresh = (findings: readonly Finding[]) => Finding | undefined;
 /** Today's sums, and which materials any threshold or range has to do with. */
 function reachOf({ thresholds, blend }: HeadroomInput): { readonly today: readonly Interval[]; isBound(material: PreparedMaterial): boolean } {
   const today = thresholds.map((one) => one.weigh(blend));
-  const isWide = blend.plan.hasRanges || today.some(({ min, max }) => compare(min, max) !== 0);
+  const isWide = blend.plan.hasRanges || thresholds.some(({ isLeast }) => isLeast) || today.some(({ min, max }) => compare(min, max) !== 0);
   const touched = new Set<PreparedMaterial>();
   if (!isWide) {
     for (const { keys } of thresholds) for (const key of keys) for (const { at } of blend.find(key)?.occurrences ?? []) touched.add(blend.materials[at]!.prepared);
@@ -117,11 +119,11 @@ function findLawFinding({ thresholds }: HeadroomInput, today: readonly Interval[
     const now = today[index]!;
     const last = threshold.keys.some((key) => end.find(key)) ? threshold.weigh(end) : undefined;
     // What dilutes can only turn one finding into another where there is a range.
-    if (!last && compare(now.min, now.max) === 0) return;
+    if (!last && !threshold.isLeast && compare(now.min, now.max) === 0) return;
     const isFixed = compare(now.min, now.max) === 0 && (!last || compare(last.min, last.max) === 0);
     for (const side of isFixed ? (['max'] as const) : (['min', 'max'] as const)) {
       const course = courseOf(now[side], last?.[side], threshold.limit);
-      if (isFixed && course.end <= 0n) continue;
+      if (isFixed && !threshold.isLeast && course.end <= 0n) continue;
       const s = rootOf(course);
       if (s && isBefore(s, until)) places.set(keyOf(s), { s, isWide: threshold.changesList || (places.get(keyOf(s))?.isWide ?? false) });
     }

@@ -4,6 +4,7 @@ import { decimal, ONE } from '#shared/kernel/rational.ts';
 import { hasBegun } from '#shared/law/as-at.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { AllergenGroup } from '#shared/law/types.ts';
+import { claimedShares } from '#shared/rules/claims/claimed-shares.ts';
 import { judgeLaw, type LawVerdict } from '#shared/rules/judge-law.ts';
 import { findThresholds } from '#shared/rules/thresholds.ts';
 import { groupAllergens, judgeAllergens, type AllergenVerdict } from './allergens.ts';
@@ -74,7 +75,7 @@ export function headroomOf(product: JudgedProduct, blend: Blend, today: Pick<Jud
     },
     // Whether the batch adds up is asked of the amounts as they are written, not of a trial.
     judgeAll: (other) => judgeBlend(product, other).findings.filter(({ kind }) => kind !== 'sum-mismatch'),
-    thresholds: comparisonsFor(product, mixed),
+    thresholds: [...comparisonsFor(product, mixed), ...claimedShares(document, mixed).map((one): Comparison => ({ ...one, changesList: false, isLeast: true }))],
     findListFinding: (end) => findListFinding(mixed, end, declaration(), facts.market),
     withBlend: (other) => inputFor(other, () => judgeBlend(product, other).declaration),
   });
