@@ -53,7 +53,7 @@ export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: Formul
     ...judgeMayContain(context),
     ...judgeWordings(due, context),
     ...judgeParticulars(context),
-    ...judgeClaims(context, notChecked),
+    ...judgeClaims(context),
     ...judgeUpcoming(rows, outcomes, context),
     ...presentUpcomingWordings(formaldehydeNow, judgeFormaldehyde(later), context),
   ];

@@ -1,6 +1,7 @@
 import { findAbsences, type AbsenceHit } from './absences.ts';
 import { claimTables, type ClaimRow, type Frame, type LanguageTables } from './claim-tables.ts';
 import { isDenied } from './denial.ts';
+import { judgedIn } from './languages.ts';
 import { quote, standsAt, tokenise, type Span, type Token } from './match-words.ts';
 import { findNamed, type NamedHit } from './named.ts';
 import { findPh, type PhHit } from './ph.ts';
@@ -26,19 +27,20 @@ const NEAR_REACH = 7;
 const LOOK_REACH = 6;
 const REMEMBERED = 2000;
 
-const known = new Map<string, Analysis | undefined>();
+const known = new Map<string, Analysis>();
 
 /**
  * What a claim says in its language; `undefined` where the tables do not hold the language.
  * Remembered, as the same texts are judged again at every change of the formula.
  */
 export function analyseClaim(text: string, lang: string): Analysis | undefined {
-  const language = lang.toLowerCase().split(/[-_]/)[0]!;
+  const language = judgedIn(lang);
+  if (!language) return undefined;
   const key = `${language}|${text}`;
-  if (known.has(key)) return known.get(key);
+  const before = known.get(key);
+  if (before) return before;
   if (known.size > REMEMBERED) known.clear();
-  const tables = claimTables(language);
-  const analysis = tables && analyse(text, tables);
+  const analysis = analyse(text, claimTables(language));
   known.set(key, analysis);
   return analysis;
 }

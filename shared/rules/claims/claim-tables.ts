@@ -5,6 +5,7 @@ import german from '#data/parameters/claims-de.json' with { type: 'json' };
 import english from '#data/parameters/claims-en.json' with { type: 'json' };
 import french from '#data/parameters/claims-fr.json' with { type: 'json' };
 import type { Market, Sourcing } from '#shared/law/types.ts';
+import type { ClaimLanguage } from './languages.ts';
 import { PhraseIndex, readPhrase, type Phrase } from './match-words.ts';
 
 export type ClaimVerdict = 'medicinal' | 'contradicted' | 'evidence';
@@ -130,20 +131,19 @@ export interface LanguageTables {
   readonly single: readonly { readonly text: string; readonly isStem: boolean; readonly claimClass: ClaimClass }[];
 }
 
-const LANGUAGES: Readonly<Record<string, LanguageJson>> = { en: english as LanguageJson, de: german as LanguageJson, fr: french as LanguageJson };
+const LANGUAGES: Readonly<Record<ClaimLanguage, LanguageJson>> = { en: english as LanguageJson, de: german as LanguageJson, fr: french as LanguageJson };
 const classes = classesJson.classes as readonly ClassJson[];
 const ingredients = ingredientsJson.ingredients as readonly IngredientJson[];
-const opened = new Map<string, LanguageTables | undefined>();
+const opened = new Map<ClaimLanguage, LanguageTables>();
 
-/** Languages in which claims can be judged. */
-export const CLAIM_LANGUAGES: readonly string[] = Object.keys(LANGUAGES);
 /** Each criterion as each market's law cites it, and how firmly that is sourced. */
 export const claimCriteria = criteriaJson.criteria as unknown as Readonly<Record<Criterion, Readonly<Record<Market, Cited>>>>;
 
-/** The tables of a language, opened on first use; nothing where claims in it cannot be judged. */
-export function claimTables(lang: string): LanguageTables | undefined {
-  if (!opened.has(lang)) opened.set(lang, LANGUAGES[lang] && openTables(lang, LANGUAGES[lang]));
-  return opened.get(lang);
+/** The tables of a language, opened on first use. */
+export function claimTables(lang: ClaimLanguage): LanguageTables {
+  let tables = opened.get(lang);
+  if (!tables) opened.set(lang, (tables = openTables(lang, LANGUAGES[lang])));
+  return tables;
 }
 
 /** @returns an index of these texts, each leading to its item */

@@ -1,11 +1,11 @@
 import { compare, decimal, toDecimal } from '#shared/kernel/rational.ts';
 import type { Finding, FindingKind } from '#shared/engine/types.ts';
 import type { Context } from '../context.ts';
-import type { NotChecked } from '../outcome.ts';
 import type { AbsenceHit } from './absences.ts';
 import { analyseClaim, type Analysis } from './analyse-claim.ts';
-import { CLAIM_LANGUAGES, claimCriteria, type ClaimClass, type ClaimVerdict, type Criterion } from './claim-tables.ts';
+import { claimCriteria, type ClaimClass, type ClaimVerdict, type Criterion } from './claim-tables.ts';
 import { findMembers, holdsNamed, namedIngredients, shareOf, withWord } from './composition.ts';
+import { CLAIM_LANGUAGES } from './languages.ts';
 import type { NamedHit } from './named.ts';
 import { judgePh } from './ph.ts';
 
@@ -29,18 +29,31 @@ const DEFAULT_BY: Readonly<Record<ClaimVerdict, Criterion>> = { medicinal: 'medi
  * Reading: an ingredient that a claim says is contained and that is not is a contradiction; one
  * that a name only calls to mind is a question, because it may be a scent or a fancy name. A
  * claim that denies ("not intended to treat") is none; one that speaks of the look only is
- * cosmetic. Not covered: pictures, and languages other than those of the tables.
+ * cosmetic. A claim in a language without tables is left to a person. Not covered: pictures.
  */
-export function judgeClaims(context: Context, notChecked: NotChecked[]): Finding[] {
+export function judgeClaims(context: Context): Finding[] {
   const { name, claims } = context.document.product;
   const findings: Finding[] = [];
   for (const { text, lang } of claims) {
     const analysis = analyseClaim(text, lang);
-    if (analysis) findings.push(...present(text, pointsOf(analysis, context), context));
-    else notChecked.push({ rule: 'claims/language', subject: text, citation: cite('evidence', context).text, words: `Claims are judged in ${CLAIM_LANGUAGES.join(', ')} only; this one is marked "${lang}".` });
+    findings.push(...(analysis ? present(text, pointsOf(analysis, context), context) : [unread(text, lang, context)]));
   }
   if (name !== '') findings.push(...present(name, pointsOfName(name, context), context));
   return findings;
+}
+
+/** Silence would call it clean. */
+function unread(text: string, lang: string, context: Context): Finding {
+  return {
+    kind: 'claim-evidence',
+    severity: 'decide',
+    rule: 'claims/language',
+    subject: text,
+    citation: cite('evidence', context).text,
+    message: `Claims are read in English, German and French; this one is marked “${lang}” and was not read.`,
+    remedy: `Have “${text}” read by someone who knows the language.`,
+    certainty: 'possible',
+  };
 }
 
 function pointsOf(analysis: Analysis, context: Context): Point[] {

@@ -2,6 +2,7 @@ import type { ClaimEvidence } from '#shared/contracts/evidence.contract.ts';
 import type { ProductDraft } from '#shared/contracts/product-draft.ts';
 import type { Finding } from '#shared/engine/types.ts';
 import type { Market } from '#shared/law/types.ts';
+import { judgedIn } from '#shared/rules/claims/languages.ts';
 import { markWords, type Stretch } from './mark-words.ts';
 
 interface Result {
@@ -14,6 +15,8 @@ export interface ClaimRowView {
   readonly text: string;
   readonly lang: string;
   readonly isName: boolean;
+  /** In a language that has tables; a name has none of its own. */
+  readonly isJudged: boolean;
   readonly stretches: readonly Stretch[];
   readonly byMarket: ReadonlyMap<Market, readonly Finding[]>;
   readonly asksEvidence: boolean;
@@ -32,6 +35,7 @@ export function buildClaimRows(draft: Pick<ProductDraft, 'name' | 'claims'>, res
     const findings = [...byMarket.values()].flat();
     return {
       text, lang, isName, byMarket,
+      isJudged: isName || judgedIn(lang) !== undefined,
       stretches: markWords(text, findings.flatMap(({ members = [], severity }) => members.map((words) => ({ words, weight: severity })))),
       asksEvidence: findings.some(({ kind }) => kind === 'claim-evidence'),
       isBeyondEvidence: findings.length > 0 && findings.every(({ severity }) => severity === 'stop'),

@@ -37,11 +37,12 @@ export function ClaimsSection({ productId, draft, results, isReadOnly, editLink 
           <div className="claim-words">
             <p className="claim-text" lang={row.lang || undefined}>{row.isName ? <ClaimText row={row} /> : <>“<ClaimText row={row} />”</>} {row.isName ? <Tag>name</Tag> : row.lang === 'en' ? null : <Tag>{row.lang}</Tag>}</p>
             <EvidenceList productId={productId} papers={row.papers} isReadOnly={isReadOnly} />
+            {row.isJudged ? null : <p className="claim-lack">Claims are judged in English, German and French. Have this one read by a person.</p>}
             {row.isBeyondEvidence ? <p className="claim-lack">No paper mends this: change the words or the formula.</p> : null}
             {row.asksEvidence && row.papers.length === 0 && evidence.isSuccess ? <p className="claim-lack">No evidence attached yet.</p> : null}
             {isReadOnly || row.isBeyondEvidence || (row.isName && !row.asksEvidence) ? null : <EvidenceUpload productId={productId} claim={row.text} isAsked={row.asksEvidence} />}
           </div>
-          {results.map(({ market }) => <MarketCell key={market} market={market} findings={row.byMarket.get(market) ?? []} />)}
+          {results.map(({ market }) => <MarketCell key={market} market={market} isJudged={row.isJudged} findings={row.byMarket.get(market) ?? []} />)}
         </article>
       ))}
       {draft.claims.length === 0 ? <p className="claims-none">No claim is written down yet. {editLink}</p> : null}
@@ -60,12 +61,12 @@ function ClaimText({ row }: { row: ClaimRowView }) {
   return row.stretches.map(({ text, weight }, index) => (weight ? <mark key={index} className={weight}>{text}</mark> : <span key={index}>{text}</span>));
 }
 
-function MarketCell({ market, findings }: { market: Market; findings: readonly Finding[] }) {
+function MarketCell({ market, isJudged, findings }: { market: Market; isJudged: boolean; findings: readonly Finding[] }) {
   const [first] = findings;
   return (
     <div className={`claim-cell ${first ? '' : 'no'}`} data-market={market}>
       {first ? <VerdictMark weight={first.severity} silent /> : null}
-      <span><span className="sr-only">{market}: </span>{sayAnswer(findings)}</span>
+      <span><span className="sr-only">{market}: </span>{isJudged ? sayAnswer(findings) : 'not judged'}</span>
     </div>
   );
 }

@@ -56,9 +56,9 @@ describe('what a verdict says', () => {
   test('one claim can be contradicted and need evidence', () => {
     expect(kinds(judged('rich', 'Silicone-free and hypoallergenic'))).toEqual(['claim-contradicted', 'claim-evidence']);
   });
-  test('a claim in a language without tables is listed as not checked', () => {
-    const [result] = judge(claimed('gel', [{ text: 'Hypoallergenisch', lang: 'nl' }]), { markets: ['EU'] }).results;
-    expect(result!.notChecked.join()).toContain('Claims are judged in en, de, fr only; this one is marked "nl".');
+  test('a claim in a language without tables is left to a person, not called clean', () => {
+    expect(judged('gel', 'Hypoallergeen', 'EU', 'nl')).toMatchObject([{ kind: 'claim-evidence', severity: 'decide', rule: 'claims/language', remedy: 'Have “Hypoallergeen” read by someone who knows the language.' }]);
+    expect(judged('gel', 'Soft', 'EU', 'en-GB')).toEqual([]);
   });
 });
 

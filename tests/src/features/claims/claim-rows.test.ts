@@ -44,3 +44,8 @@ test('papers go to the claim they were attached for; those of dropped words stay
   expect(rows.map(({ papers }) => papers.map(({ fileName }) => fileName))).toEqual([['1.pdf'], []]);
   expect(leftOver.map(({ fileName }) => fileName)).toEqual(['2.pdf', '3.pdf']);
 });
+
+test('a claim in a language without tables is not called clean', () => {
+  const { rows } = buildClaimRows({ name: 'Wash', claims: [{ text: 'Zacht', lang: 'nl' }, { text: 'Doux', lang: 'fr' }] }, [], []);
+  expect(rows.map(({ text, isJudged }) => [text, isJudged])).toEqual([['Zacht', false], ['Doux', true], ['Wash', true]]);
+});
