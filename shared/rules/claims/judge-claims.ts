@@ -18,6 +18,7 @@ interface Point {
   readonly words: string;
   readonly why: string;
   readonly needs?: readonly string[];
+  readonly arithmetic?: NonNullable<Finding['arithmetic']>;
 }
 
 const DEFAULT_BY: Readonly<Record<ClaimVerdict, Criterion>> = { medicinal: 'medicine', contradicted: 'truthfulness', evidence: 'evidence' };
@@ -128,10 +129,12 @@ function pointsOfShare({ starts, word, words }: NamedHit, percent: string, { mix
   const claimed = decimal(percent);
   const { min, max } = shareOf(own, mixture);
   const names = own.map(({ name }) => name).join(', ');
-  const rule = 'claims/share';
-  if (compare(claimed, max) > 0) return [{ verdict: 'contradicted', by: 'truthfulness', rule, words, why: `It claims ${percent} % ${word}; at most ${toDecimal(max, 2)} % of the product is ${names}.` }];
-  if (compare(claimed, min) > 0) return [{ verdict: 'evidence', by: 'evidence', rule, words, why: `It claims ${percent} % ${word}; by the supplier's ranges ${toDecimal(min, 2)} to ${toDecimal(max, 2)} % of the product is ${names}.` }];
-  return [];
+  if (compare(claimed, min) <= 0) return [];
+  // The figures stand in the arithmetic, which a report without shares leaves out.
+  const arithmetic = [{ step: `Claimed, ${word}`, figure: `${percent} %` }, { step: names, figure: compare(min, max) === 0 ? `${toDecimal(max)} %` : `${toDecimal(min)} to ${toDecimal(max)} %` }];
+  return compare(claimed, max) > 0
+    ? [{ verdict: 'contradicted', by: 'truthfulness', rule: 'claims/share', words, why: `It claims ${percent} % ${word}; less than that is in it.`, arithmetic }]
+    : [{ verdict: 'evidence', by: 'evidence', rule: 'claims/share', words, why: `It claims ${percent} % ${word}; the suppliers’ ranges allow less.`, arithmetic }];
 }
 
 const KINDS: Readonly<Record<ClaimVerdict, FindingKind>> = { medicinal: 'claim-medicinal', contradicted: 'claim-contradicted', evidence: 'claim-evidence' };
@@ -153,6 +156,7 @@ function present(text: string, points: readonly Point[], context: Context): Find
     const words = uniq(own.map((point) => point.words));
     const quoted = words.map((one) => `“${one}”`).join(', ');
     const needs = uniq(own.flatMap((point) => point.needs ?? []));
+    const arithmetic = own.flatMap((point) => point.arithmetic ?? []);
     const sourcing = cited.some((one) => one.sourcing === 'memory') ? 'memory' : cited.some((one) => one.sourcing === 'secondary') ? 'secondary' : undefined;
     return [{
       kind: KINDS[verdict],
@@ -164,6 +168,7 @@ function present(text: string, points: readonly Point[], context: Context): Find
       message: `${quoted}: ${uniq(own.map((point) => point.why)).join(' ')}`,
       remedy: own.every(({ by }) => by === 'named') ? `Let ${quoted} be in the product, or name it otherwise.` : REMEDY[verdict](quoted),
       certainty: 'certain',
+      ...(arithmetic.length > 0 ? { arithmetic } : {}),
       ...(needs.length > 0 ? { needs } : {}),
       ...(sourcing ? { sourcing } : {}),
     }];

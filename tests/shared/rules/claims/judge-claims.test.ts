@@ -90,6 +90,11 @@ describe('shares that are claimed', () => {
     const document = formula([material('m', [part('Aqua', '90-96'), part('Glycerin', '4-10')])], [line('m', '100 g')], { product: { claims: [{ text: '8 % glycerin', lang: 'en' }] } });
     expect(kinds(findingsOf(document))).toEqual(['claim-evidence']);
   });
+  test('figures of the formula stand in the arithmetic alone', () => {
+    const [finding] = judged('cream', 'With 10 % glycerin');
+    expect(finding!.message).toBe('“10 % glycerin”: It claims 10 % glycerin; less than that is in it.');
+    expect(finding!.arithmetic).toEqual([{ step: 'Claimed, glycerin', figure: '10 %' }, { step: 'Glycerin', figure: '4 %' }]);
+  });
 });
 
 describe('unknown composition', () => {
