@@ -142,6 +142,7 @@ export function Component() {
             isReadOnly={isReadOnly}
             onChange={change}
             onSettle={desk.settle}
+            claimsLink={<Link to={`${paths.verdicts(page.id)}${page.search}#claims`}>What each market says of them, and their evidence</Link>}
           />
         </Panel>
       </Sheet>

@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
+import { useLocation } from 'react-router-dom';
 import type { ProductDraft } from '#shared/contracts/product-draft.ts';
 import type { Finding } from '#shared/engine/types.ts';
 import type { Market } from '#shared/law/types.ts';
@@ -25,9 +26,14 @@ export interface ClaimsSectionProps {
 export function ClaimsSection({ productId, draft, results, isReadOnly, editLink }: ClaimsSectionProps) {
   const evidence = useQuery(evidenceQueries.ofProduct(productId));
   const { rows, leftOver } = buildClaimRows(draft, results, evidence.data?.items ?? []);
+  const place = useRef<HTMLElement>(null);
+  const { hash } = useLocation();
+  useEffect(() => {
+    if (hash === '#claims') place.current?.scrollIntoView();
+  }, [hash]);
   const columns = { gridTemplateColumns: `minmax(0, 1fr) repeat(${results.length}, var(--market-column))` };
   return (
-    <section className="claims" id="claims" aria-labelledby="claims-title">
+    <section className="claims" id="claims" ref={place} aria-labelledby="claims-title">
       <div className="claims-head">
         <h2 id="claims-title">Claims and their evidence</h2>
         <p className="quiet">The words a verdict stands on are marked. A paper does not settle a verdict: whether it shows what the claim says is for a person to decide.</p>

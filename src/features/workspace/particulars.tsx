@@ -21,6 +21,8 @@ export interface ParticularsProps {
   readonly isReadOnly: boolean;
   readonly onChange: (recipe: (draft: ProductDraft) => ProductDraft, join?: string) => void;
   readonly onSettle: () => void;
+  /** Where claims are judged. */
+  readonly claimsLink?: ReactNode;
 }
 
 const MARKET_NAMES: Readonly<Record<Market, string>> = { EU: 'European Union', UK: 'Great Britain', US: 'United States', CA: 'Canada' };
@@ -101,6 +103,7 @@ export const Particulars = memo(function Particulars(props: ParticularsProps) {
       </Group>
       <Group title="Claims and shades">
         <TextList title="Claims" items={draft.claims} isReadOnly={isReadOnly} addWord="Add a claim" onItems={(claims) => set('claims', claims, 'claims')} onSettle={onSettle} />
+        {draft.claims.length > 0 && props.claimsLink ? <p className="hint">{props.claimsLink}</p> : null}
         {category?.decorative || draft.mayContain.length > 0 ? (
           <TextField
             label="May contain, by CI number, parted by commas"
