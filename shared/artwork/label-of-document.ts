@@ -38,7 +38,8 @@ function splitDeclaration(declaration: LabelResult['declaration'] | undefined): 
 function unique(texts: readonly string[]): string[] {
   const seen = new Set<string>();
   return texts.filter((text) => {
-    const key = text.trim().toLowerCase().replace(/\s+/g, ' ');
+    // Compared as the verdicts do: a warning that differs in punctuation alone is not printed twice.
+    const key = text.normalize('NFKD').toLowerCase().replace(/[^\p{L}\p{N}]+/gu, '');
     if (key === '' || seen.has(key)) return false;
     seen.add(key);
     return true;
