@@ -7,11 +7,13 @@ import { parseEntries } from '#shared/dictionary/parse-entries.ts';
 import { assess } from '#shared/engine/assess.ts';
 import { presentResult } from '#shared/engine/present-result.ts';
 import { dictionary, formula, law, line, material, part, TODAY } from '#tests/support/engine.ts';
-import { median, ms, time, times, type Row } from './report.ts';
+import { median, ms, timeInTurns, times, type Row } from './report.ts';
 
 const ROOT = join(import.meta.dirname, '../..');
 const MATERIALS = 40;
 const SUBSTANCES = 8;
+/** Milliseconds until a desktop spreadsheet holding the same sheet shows one edited cell's consequences: a figure given, not measured here. */
+const SPREADSHEET = 30;
 
 /** 40 materials of 8 substances each, drawn from the dictionary; water and glycerin come back in many of them. */
 export function largeFormula(): FormulaDocument {
@@ -43,12 +45,11 @@ export async function runEngineBench(): Promise<Row[]> {
     parts: document.materials[index]!.composition.map(({ inci, percent }) => [inci, parseFloat(percent!)] as const),
   }));
   const options = { law, dictionary, today: TODAY };
-  const loop = median(await time(() => floatLoop(rows), { warm: 500, runs: 500 }));
-  const check = median(await time(() => presentResult(assess(document, options)), { warm: 300, runs: 200 }));
-  const live = median(await time(() => assess(document, options), { warm: 300, runs: 200 }));
+  const [loop, check, live] = timeInTurns([() => floatLoop(rows), () => presentResult(assess(document, options)), () => assess(document, options)]).map(median) as [number, number, number];
   const perSecond = throughput();
   return [
     { name: 'check, 40 materials of 8 substances', measured: ms(check), ratio: times(check / loop), promise: `under 1.5 ms and at most 8 × a float loop (${ms(loop)})`, isKept: check < 1.5 && check <= 8 * loop },
+    { name: 'the same beside a spreadsheet', measured: ms(check), ratio: times(SPREADSHEET / check), promise: `30 × faster than one edited cell of a desktop spreadsheet (${SPREADSHEET} ms, given)`, isKept: SPREADSHEET / check >= 30 },
     { name: 'assess for the screen, same formula', measured: ms(live), ratio: times(live / loop), promise: 'under 16 ms', isKept: live < 16 },
     { name: 'check of JSON Lines', measured: `${Math.round(perSecond)} formulas/s`, promise: 'at least 1,000 formulas/s', isKept: perSecond >= 1000 },
   ];

@@ -31,6 +31,25 @@ export async function time(work: () => unknown, { warm = 20, runs = 60 } = {}): 
   return times;
 }
 
+/**
+ * Times several kinds of work in turns, so that whatever else the machine does falls on all of
+ * them alike; milliseconds of each, medians are fair to compare.
+ */
+export function timeInTurns(works: readonly (() => unknown)[], { warm = 300, turns = 200 } = {}): number[][] {
+  for (const work of works) for (let index = 0; index < warm; index += 1) work();
+  const times = works.map((): number[] => []);
+  for (let turn = 0; turn < turns; turn += 1) {
+    works.forEach((work, index) => {
+      // The first call after another kind of work finds cold caches: it is not counted.
+      work();
+      const start = performance.now();
+      work();
+      times[index]!.push(performance.now() - start);
+    });
+  }
+  return times;
+}
+
 export const ms = (value: number): string => `${value < 10 ? value.toFixed(3) : value.toFixed(1)} ms`;
 export const times = (value: number): string => `${value.toFixed(1)} ×`;
 
