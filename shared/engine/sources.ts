@@ -54,7 +54,9 @@ export function sharesOf(blend: Blend, substances: readonly BlendedSubstance[], 
       if (ways === 'ingredient' && group.way !== 'ingredient') continue;
       const weight = blend.weightOf(at);
       const figure: Figure = typeof weight === 'bigint' ? weight * group.typ : weight * safeUsual(group);
-      const known = occurrences.length === 1 && substances.length === 1 ? undefined : rows.find((row) => row.at === at);
+      // One substance's occurrences come material by material: another of the same material is the one before.
+      const before = rows.at(-1);
+      const known = substances.length === 1 ? (before?.at === at ? before : undefined) : rows.find((row) => row.at === at);
       if (known) known.figure = typeof figure === 'bigint' ? (known.figure as bigint) + figure : (known.figure as number) + figure;
       else rows.push({ at, figure });
     }
