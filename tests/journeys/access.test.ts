@@ -15,6 +15,8 @@ const SCREENS: readonly (readonly [name: string, address: (product: string, mate
   ['material', (_product, material) => material, /The parts make 100 %/],
   ['dictionary', () => '/dictionary?find=phenoxy', /122-99-6/],
   ['entry', () => '/dictionary/Phenoxyethanol', /Printed name/],
+  ['read a list', () => '/read', /Nothing pasted yet/],
+  ['law calendar', () => '/calendar', /touch(?:es)? a product of yours/],
   ['house', () => '/house', /Members/],
   ['formula', (product) => product, /All verdicts, in every market/],
   ['declaration', (product) => `${product}/declaration`, /As it must be printed/],

@@ -28,7 +28,7 @@ export function StepRow({ change, isPast, ours, sold, isWorking, link }: StepRow
       <p className="when"><b>{sayDay(change.date)}</b><span className="quiet">{change.kind === 'placed' ? 'for what is first sold from this day' : 'for all that is still sold'}</span></p>
       <p className="where">{change.market}</p>
       <div className="law">
-        <h3>{change.title}</h3>
+        <h2>{change.title}</h2>
         <p>{change.what}</p>
         <p className="cite">{change.citation}{link ? <> · <a href={link.href} target="_blank" rel="noreferrer">{link.words}</a></> : null}</p>
       </div>

@@ -13,12 +13,12 @@ export interface TimeLanesProps {
   readonly ours: ReadonlySet<string>;
 }
 
-/** All dates of the law on one scale of time, a lane for each market; each mark leads to its entry below. */
+/** All dates of the law on one scale of time, a lane for each market: a drawing of the entries below, which hold the same in words. */
 export function TimeLanes({ changes, markets, span, today, ours }: TimeLanesProps) {
   const [first, last] = [Number(span.from.slice(0, 4)), Number(span.to.slice(0, 4))];
   const years = Array.from({ length: last - first + 1 }, (_, index) => first + index);
   return (
-    <nav className="time-lanes" aria-label="Dates of the law">
+    <div className="time-lanes" role="img" aria-label={`${changes.length} dates of the law from ${first} to ${last}, ${changes.filter((change) => ours.has(stepOf(change))).length} of them touching your products`}>
       {MARKETS.filter((market) => markets.includes(market)).map((market) => (
         <div className="lane" key={market}>
           <b>{market}</b>
@@ -26,7 +26,7 @@ export function TimeLanes({ changes, markets, span, today, ours }: TimeLanesProp
             {changes.filter((change) => change.market === market).map((change) => {
               const step = stepOf(change);
               const words = `${sayDay(change.date)}: ${change.title}, ${change.kind === 'placed' ? 'for what is first sold' : 'for all that is still sold'}`;
-              return <a key={step + change.kind} href={`#${anchorOf(change)}`} className={`${change.kind} ${ours.has(step) ? 'ours' : ''}`} style={{ left: `${placeOf(change.date, span)}%` }} title={words} aria-label={words} />;
+              return <span key={step + change.kind} data-step={anchorOf(change)} className={`${change.kind} ${ours.has(step) ? 'ours' : ''}`} style={{ left: `${placeOf(change.date, span)}%` }} title={words} />;
             })}
           </div>
         </div>
@@ -35,7 +35,7 @@ export function TimeLanes({ changes, markets, span, today, ours }: TimeLanesProp
         {years.map((year) => <span key={year} style={{ left: `${placeOf(`${year}-01-01`, span)}%` }}>{year}</span>)}
       </div>
       {today >= span.from && today <= span.to ? <div className="now" aria-hidden="true"><i style={{ left: `${placeOf(today, span)}%` }}><span>today</span></i></div> : null}
-    </nav>
+    </div>
   );
 }
 

@@ -72,7 +72,7 @@ function Row({ read, index, hatch, onChoose }: { read: ReadName; index: number; 
 
 function Match({ read: { one }, onChoose }: { read: ReadName; onChoose: BoundsTableProps['onChoose'] }) {
   if (one.match === 'synonym') return <span className="quiet">read as {one.entry!.inci}</span>;
-  if (one.match === 'respelt') return <span className="quiet">respelt: {one.entry!.inci} <TextButton mini onClick={() => onChoose(one.written, one.entry!.inci)} aria-label={`Write ${one.entry!.inci} for ${one.written}`}>write it so</TextButton></span>;
+  if (one.match === 'respelt') return <span className="quiet">respelt: {one.entry!.inci} <TextButton mini onClick={() => onChoose(one.written, one.entry!.inci)} aria-label={`write it so: ${one.entry!.inci} for ${one.written}`}>write it so</TextButton></span>;
   if (one.match !== 'unknown') return null;
   return (
     <span className="likely">
