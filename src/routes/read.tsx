@@ -85,7 +85,7 @@ export function Component() {
             ) : <p className="quiet">You may read lists here; only owners and formulators begin products.</p>}
           />
         </Sheet>
-        <p className="foot">A list tells less than its formula: a limit is judged only where the order alone proves it exceeded. Read on this computer; nothing is sent. Colophon advises and does not certify.</p>
+        <p className="foot">A list tells less than its formula: a limit is judged only where the order alone proves it exceeded. The list is read on this computer; nothing is sent until you start a product from it. Colophon advises and does not certify.</p>
       </div>
     </>
   );

@@ -107,7 +107,7 @@ function Scale({ freeLine }: { freeLine: string }) {
         {TICKS.map(({ at, isLong, isHalf }) => <line key={at} x1={share(at)} x2={share(at)} y1={isLong ? 24 : isHalf ? 28 : 30} y2="34" stroke={isLong ? 'var(--ink)' : 'var(--edge)'} />)}
         <line x1="0" x2="100%" y1="33.5" y2="33.5" stroke="var(--ink)" />
         <line className="one" x1={share(1)} x2={share(1)} y1="22" y2="34" />
-        {POWERS.map((power) => <text key={power} x={share(power)} y="18" textAnchor={power === 100 ? 'end' : power === LOWEST ? 'start' : 'middle'} className={power === 1 ? 'one' : ''}>{power}{power === 100 ? ' %' : ''}</text>)}
+        {POWERS.map((power) => <text key={power} x={share(power)} y="18" textAnchor={power === 100 ? 'end' : power === LOWEST ? 'start' : 'middle'} className={power === 1 ? 'one' : power === 10 || power === 0.001 ? 'between' : ''}>{power}{power === 100 ? ' %' : ''}</text>)}
       </svg>
       <span className="free-line">order is free {freeLine}</span>
     </>
