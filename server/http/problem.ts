@@ -74,6 +74,8 @@ function translate(error: unknown): AppError | undefined {
   }
   // Express throws a URIError for a broken %-escape in a path: no such address.
   if (error instanceof URIError || (fault.status === 400 && fault.expose === true)) return new AppError('not-found');
+  const shortage = shortageOf(error);
+  if (shortage) return new AppError('unavailable', { message: shortage });
   if (isConnectionFault(error)) return new AppError('unavailable');
   return undefined;
 }
@@ -85,6 +87,23 @@ interface Faulty {
   readonly code?: unknown;
   readonly cause?: unknown;
   readonly name?: unknown;
+}
+
+/** What the database has run out of, in words (PostgreSQL manual, appendix A, classes 53 and 57). */
+const SHORTAGES: Readonly<Record<string, string>> = {
+  '53100': 'The disk of the database is full. Nothing was changed. Make room on it, then try again.',
+  '53200': 'The database is short of memory. Nothing was changed. Try again in a minute.',
+  '53300': 'The database takes no more connections now. Nothing was changed. Try again in a minute.',
+  '57014': 'The database took too long. Nothing was changed. Try again in a minute.',
+};
+
+function shortageOf(error: unknown): string | undefined {
+  for (let fault: unknown = error, depth = 0; typeof fault === 'object' && fault !== null && depth < 5; depth += 1) {
+    const { code, cause } = fault as Faulty;
+    if (typeof code === 'string' && SHORTAGES[code]) return SHORTAGES[code];
+    fault = cause;
+  }
+  return undefined;
 }
 
 const CONNECTION_CODES = new Set(['ECONNREFUSED', 'ECONNRESET', 'EPIPE', 'ETIMEDOUT', 'ENOTFOUND', '57P01', '57P02', '57P03', '53300', '08001', '08003', '08006']);

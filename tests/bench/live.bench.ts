@@ -4,6 +4,7 @@ import { chromium, type Page } from 'playwright-core';
 import { parseEntries } from '#shared/dictionary/parse-entries.ts';
 import { makeHome, removeHome, startProduct } from '#tests/support/product.ts';
 import { median, ms, quantile, type Row } from './report.ts';
+import { measureSuggestions } from './suggest.bench.ts';
 
 const MATERIALS = 40;
 const KEYSTROKES = 60;
@@ -86,6 +87,7 @@ export async function runLiveBench(): Promise<Row[]> {
         isKept: typical < 16,
       });
     }
+    rows.push(await measureSuggestions(page));
     return rows;
   } finally {
     await browser.close();

@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { gzipSync } from 'node:zlib';
+import { runClaimsBench } from './claims.bench.ts';
 import { runDictionaryBench } from './dictionary.bench.ts';
 import { runEngineBench } from './engine.bench.ts';
 import { runLabelBench } from './label.bench.ts';
@@ -43,6 +44,6 @@ function firstPage(): Row {
 }
 
 const label = (await runLabelBench()).map(({ name, figure, unit, most }): Row => ({ name, measured: `${figure.toFixed(1)} ${unit}`, promise: `under ${most} ${unit}`, isKept: figure <= most }));
-const rows = [...(await runEngineBench()), ...label, ...(await runDictionaryBench()), firstPage(), ...(await runLiveBench())];
+const rows = [...(await runEngineBench()), ...label, ...(await runDictionaryBench()), ...(await runClaimsBench()), firstPage(), ...(await runLiveBench())];
 console.log(asTable(rows));
 process.exit(rows.every(({ isKept }) => isKept) ? 0 : 1);

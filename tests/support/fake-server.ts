@@ -11,7 +11,7 @@ export interface Asked {
   readonly query: URLSearchParams;
   readonly body: unknown;
 }
-type Answer<E extends Endpoint> = z.input<E['response']> | Refusal;
+type Answer<E extends Endpoint> = z.input<E['response']> | Refusal | Promise<z.input<E['response']> | Refusal>;
 
 /** A refusal, written as the server writes them. */
 export class Refusal {

@@ -4,7 +4,7 @@ import { createDictionary } from '#shared/dictionary/create-dictionary.ts';
 import type { Dictionary, DictionaryEntry } from '#shared/dictionary/types.ts';
 import { foldName } from '#shared/law/fold.ts';
 import { rankCandidates, type Candidate } from './rank.ts';
-import { toWords, type TermKind } from './terms.ts';
+import { toWords, type TermKind } from '#shared/dictionary/terms.ts';
 
 export interface FoundEntry {
   readonly entry: DictionaryEntry;

@@ -1,8 +1,8 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { DictionaryEntry } from '#shared/dictionary/types.ts';
 
-/** An entry as the browser's own look-up needs it: what names are told by, nothing for the eye. */
-export type NameEntry = Omit<DictionaryEntry, 'ec' | 'functions' | 'source'>;
+/** An entry as the browser's own look-up needs it: what names are told by, and what it is for. */
+export type NameEntry = Omit<DictionaryEntry, 'ec' | 'source'>;
 
 /**
  * Every entry that the house sees, curated ones first and its own last: for reading lists in
@@ -15,6 +15,6 @@ export async function listNames(em: Pick<EntityManager, 'execute'>): Promise<{ r
   return { release: rows[0]?.release ?? 'empty', entries: rows.map(({ entry }) => presentName(entry)) };
 }
 
-function presentName({ id, inci, cas, names, synonyms, commonNames, misspellings, supersededBy, properties }: DictionaryEntry): NameEntry {
-  return { id, inci, cas, names, synonyms, commonNames, properties, ...(misspellings ? { misspellings } : {}), ...(supersededBy === undefined ? {} : { supersededBy }) };
+function presentName({ id, inci, cas, functions, names, synonyms, commonNames, misspellings, supersededBy, properties }: DictionaryEntry): NameEntry {
+  return { id, inci, cas, functions, names, synonyms, commonNames, properties, ...(misspellings ? { misspellings } : {}), ...(supersededBy === undefined ? {} : { supersededBy }) };
 }

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import type { RunQuery } from '#server/auth/auth-deps.ts';
 import type { DictionaryEntry } from '#shared/dictionary/types.ts';
-import { termsOf, toWords } from './terms.ts';
+import { termsOf, toWords } from '#shared/dictionary/terms.ts';
 
 export interface SeedCount {
   readonly added: number;

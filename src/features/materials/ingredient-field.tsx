@@ -1,14 +1,14 @@
 import { memo, useMemo } from 'react';
 import { useQuery } from '@tanstack/react-query';
 import { useController, useFormContext } from 'react-hook-form';
-import type { z } from 'zod';
-import type { dictionaryEntry } from '#shared/contracts/dictionary.contract.ts';
+import type { DictionaryEntry } from '#shared/dictionary/types.ts';
 import { Combobox } from '#src/ui/combobox.tsx';
 import type { ComboboxOption } from '#src/ui/combobox.tsx';
 import { Lit } from '#src/ui/lit.tsx';
+import { beginningsQuery } from '#src/features/reading/queries.ts';
 import { ingredientQueries } from './queries.ts';
 
-export type Entry = z.infer<typeof dictionaryEntry>;
+export type Entry = DictionaryEntry;
 
 export interface IngredientFieldProps {
   /** The field's path in the form: `composition.0.inci`. */
@@ -20,17 +20,21 @@ export interface IngredientFieldProps {
 }
 
 /**
- * A name found as it is typed. Each keystroke asks at once and drops the question before it:
- * waiting would be felt. The list keeps what it shows until the next answer is there, as long as the
- * word is only typed on: Enter must never take what another word had found.
+ * A name found as it is typed. What begins so is shown in the same moment, from the names in the
+ * browser's memory; the server's search, asked at every keystroke, then adds what is misspelt.
+ * Until the names are there the list keeps what it shows as long as the word is only typed on:
+ * Enter must never take what another word had found.
  */
 export const IngredientField = memo(function IngredientField({ name, label, onChoose, placeholder }: IngredientFieldProps) {
   const { control } = useFormContext();
   const { field, fieldState } = useController({ control, name });
   const typed = String(field.value ?? '');
   const asked = fieldState.isDirty || fieldState.isTouched ? typed.trim() : '';
-  const { data, isFetching } = useQuery({ ...ingredientQueries.search(asked), placeholderData: (before, query) => (isTypedOn(query?.queryKey[2], asked) ? before : undefined) });
-  const items = useMemo(() => (asked === '' ? [] : (data?.items ?? [])), [asked, data]);
+  const { data: names } = useQuery(beginningsQuery);
+  const begun = useMemo(() => (asked === '' ? [] : (names?.begin(asked, 10) ?? [])), [asked, names]);
+  const { data, isFetching, isPlaceholderData } = useQuery({ ...ingredientQueries.search(asked), placeholderData: (before, query) => (isTypedOn(query?.queryKey[2], asked) ? before : undefined) });
+  const found = isPlaceholderData ? undefined : data?.items;
+  const items = useMemo(() => (asked === '' ? [] : (found ?? (begun.length > 0 ? begun : (data?.items ?? [])))), [asked, found, begun, data]);
   const options = useMemo(() => items.map((item) => optionOf(item.entry, item.by === 'inci' ? '' : item.matched, asked)), [items, asked]);
   return (
     <Combobox
@@ -45,10 +49,10 @@ export const IngredientField = memo(function IngredientField({ name, label, onCh
       error={fieldState.error?.message}
       none={isFetching ? undefined : 'Not in the dictionary. The name may stand as you write it; it is then marked as unknown.'}
       onChoose={(option) => {
-        const found = items.find((item) => item.entry.id === option.id);
-        if (!found) return;
-        field.onChange(found.entry.inci);
-        onChoose(found.entry);
+        const chosen = items.find((item) => item.entry.id === option.id);
+        if (!chosen) return;
+        field.onChange(chosen.entry.inci);
+        onChoose(chosen.entry);
       }}
     />
   );

@@ -2,7 +2,7 @@
 import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, beforeEach, expect, test, vi } from 'vitest';
-import { resolveNames, searchDictionary } from '#shared/contracts/dictionary.contract.ts';
+import { listDictionaryNames, resolveNames, searchDictionary } from '#shared/contracts/dictionary.contract.ts';
 import { getHouse } from '#shared/contracts/house.contract.ts';
 import { createMaterial, getMaterial, listMaterials, updateMaterial, type Material, type MaterialFields } from '#shared/contracts/materials.contract.ts';
 import { FakeServer, Refusal, signedIn } from '#tests/support/fake-server.ts';
@@ -30,6 +30,7 @@ beforeEach(() => {
       return { items, total: items.length, page: 1, pageSize: 50 };
     })
     .on(getMaterial, () => OAT)
+    .on(listDictionaryNames, () => ({ release: 'test', entries: [GLYCERIN, AQUA] }))
     .on(searchDictionary, ({ query }) => ({ items: 'glycerin'.startsWith(query.get('q')!.toLowerCase()) ? [{ entry: GLYCERIN, matched: 'Glycerin', by: 'inci' as const }] : [] }))
     .on(resolveNames, ({ body }) => ({
       release: 'test',
@@ -54,13 +55,27 @@ const save = () => userEvent.click(screen.getByRole('button', { name: 'Save' }))
 test('a new material is found by name as it is typed, judged and saved', async () => {
   server.on(createMaterial, ({ body }) => saved(body, 1));
   const { router } = openRoom('/materials/new');
-  await userEvent.type(await screen.findByLabelText('Name, as you call it'), 'Vegetable glycerine');
+  await userEvent.type(await screen.findByLabelText('Name, as you call it', {}, { timeout: 10_000 }), 'Vegetable glycerine');
   await userEvent.type(cell('Ingredient 1'), 'glyc');
   await userEvent.click(await screen.findByRole('option', { name: /Glycerin/ }));
   await type('Share or least of ingredient 1, percent', '100');
   await save();
   await waitFor(() => expect(router.state.location.pathname).toBe(`/materials/${uuid(50)}`));
   expect(server.sent(createMaterial)).toEqual([expect.objectContaining({ tradeName: 'Vegetable glycerine', composition: [expect.objectContaining({ inci: 'Glycerin', cas: '56-81-5', percent: '100' })] })]);
+});
+
+test('what begins as typed is offered before the server has answered', async () => {
+  let release = (): void => undefined;
+  server.on(searchDictionary, async () => {
+    await new Promise<void>((done) => { release = done; });
+    return { items: [] };
+  });
+  openRoom('/materials/new');
+  const field = await screen.findByLabelText('Ingredient 1');
+  await waitFor(() => expect(server.sent(listDictionaryNames)).toHaveLength(1));
+  await userEvent.type(field, 'gly');
+  expect(await screen.findByRole('option', { name: /Glycerin/ })).toBeTruthy();
+  release();
 });
 
 test('a composition over 100 % is said at once, and refused on saving at its place', async () => {
