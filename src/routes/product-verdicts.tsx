@@ -17,7 +17,7 @@ import { countFindings, mergeFindings, type Counts, type MergedFinding } from '#
 import type { LedgerNote } from '#src/features/verdicts/note-row.tsx';
 import { NotChecked } from '#src/features/verdicts/not-checked.tsx';
 import { RoomLeft } from '#src/features/verdicts/room-left.tsx';
-import { sayFact } from '#src/features/workspace/fact-fields.tsx';
+import { sayFact } from '#src/features/workspace/fact-words.ts';
 import { useProductPage } from '#src/features/workspace/product-page.ts';
 import { useRemedies } from '#src/features/workspace/use-remedies.ts';
 import { Button } from '#src/ui/button.tsx';

@@ -1,18 +1,9 @@
 import type { ProductDraft } from '#shared/contracts/product-draft.ts';
 import { SelectField, TextField } from '#src/ui/field.tsx';
+import { FACT_WORDS, isProductFact, sayFact } from './fact-words.ts';
 
 type Facts = ProductDraft['facts'];
 
-/** Facts that conditions of the law turn on, in the words of the bench. */
-const WORDS: Readonly<Record<string, { label: string; kind: 'figure' | 'yes-no' | 'form'; hint?: string }>> = {
-  pH: { label: 'pH', kind: 'figure' },
-  physicalForm: { label: 'Physical form', kind: 'form' },
-  releasedFormaldehyde: { label: 'Formaldehyde released, measured', kind: 'figure', hint: 'in percent' },
-  fromAge: { label: 'For use from the age of', kind: 'figure', hint: 'in years' },
-  particleSizeNm: { label: 'Particle size', kind: 'figure', hint: 'in nanometres' },
-  inhalable: { label: 'Can be breathed in when used', kind: 'yes-no' },
-  antiperspirant: { label: 'Antiperspirant', kind: 'yes-no' },
-};
 const FORMS = ['liquid', 'cream', 'powder', 'solid', 'gas'];
 
 export interface FactFieldsProps {
@@ -25,14 +16,9 @@ export interface FactFieldsProps {
   readonly onSettle: () => void;
 }
 
-/** Words for a fact's key that no one has named yet: `bodyPart` as `body part`. */
-export function sayFact(key: string): string {
-  return WORDS[key]?.label ?? key.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
-}
-
 /** Answers that verdicts wait for; those that are asked for now stand first. */
 export function FactFields({ facts, known, asked, isReadOnly, onFacts, onSettle }: FactFieldsProps) {
-  const keys = [...new Set([...asked, ...Object.keys(facts), 'pH', 'physicalForm'])];
+  const keys = [...new Set([...asked.filter(isProductFact), ...Object.keys(facts), 'pH', 'physicalForm'])];
   const set = (key: string, value: string | boolean | undefined) => {
     const { [key]: _, ...rest } = facts;
     onFacts(value === undefined || value === '' ? rest : { ...rest, [key]: value }, `fact:${key}`);
@@ -40,7 +26,7 @@ export function FactFields({ facts, known, asked, isReadOnly, onFacts, onSettle 
   return (
     <>
       {keys.map((key) => {
-        const { label, kind, hint } = WORDS[key] ?? { label: sayFact(key), kind: typeof facts[key] === 'boolean' ? ('yes-no' as const) : ('figure' as const), hint: undefined };
+        const { label, kind, hint } = FACT_WORDS[key] ?? { label: sayFact(key), kind: typeof facts[key] === 'boolean' ? ('yes-no' as const) : ('figure' as const), hint: undefined };
         const value = facts[key];
         const standing = known[key];
         const wanted = asked.includes(key) && value === undefined ? 'A verdict waits for this answer.' : hint;

@@ -1,0 +1,43 @@
+/** A fact that conditions of the law turn on, in the words of the bench. */
+export interface FactWords {
+  readonly label: string;
+  readonly kind: 'figure' | 'yes-no' | 'form';
+  readonly hint?: string;
+}
+
+/** Every fact that a row of the law can ask for, but what is worked out and what the material says. */
+export const FACT_WORDS: Readonly<Record<string, FactWords>> = {
+  pH: { label: 'pH', kind: 'figure' },
+  physicalForm: { label: 'Physical form', kind: 'form' },
+  releasedFormaldehyde: { label: 'Formaldehyde released, measured', kind: 'figure', hint: 'in percent' },
+  fromAge: { label: 'For use from the age of', kind: 'figure', hint: 'in years' },
+  particleSizeNm: { label: 'Particle size', kind: 'figure', hint: 'in nanometres' },
+  inhalable: { label: 'Can be breathed in when used', kind: 'yes-no' },
+  loosePowder: { label: 'Loose powder', kind: 'yes-no' },
+  antiperspirant: { label: 'Antiperspirant', kind: 'yes-no' },
+  adultsOnly: { label: 'For adults only', kind: 'yes-no' },
+  mightBeUsedUnder3: { label: 'Might be used on children under 3', kind: 'yes-no' },
+  addedAsSuch: { label: 'The substance is added as such', kind: 'yes-no', hint: 'not only inside an oil or extract' },
+  exfoliatingAcid: { label: 'The acid is there to exfoliate', kind: 'yes-no' },
+  plasticParticlesAsExfoliant: { label: 'Plastic particles that scrub', kind: 'yes-no' },
+  laurelOilFromSeeds: { label: 'The laurel oil is pressed from the seeds', kind: 'yes-no' },
+  titaniumDioxideCoatedWithManganeseDioxide: { label: 'Titanium dioxide coated with manganese dioxide', kind: 'yes-no' },
+  fullRefiningHistory: { label: 'The full refining history of the mineral oil is known', kind: 'yes-no', hint: 'and its feedstock is no carcinogen' },
+  butadieneInMaterial: { label: 'Butadiene in the material', kind: 'figure', hint: 'in percent, from its certificate' },
+  benzeneInMaterial: { label: 'Benzene in the material', kind: 'figure', hint: 'in percent, from its certificate' },
+  benzoPyreneInMaterial: { label: 'Benzo[a]pyrene in the material', kind: 'figure', hint: 'in percent, from its certificate' },
+  dmsoExtractOfMaterial: { label: 'DMSO extract of the material, IP 346', kind: 'figure', hint: 'in percent, from its certificate' },
+  peanutProteinPpm: { label: 'Peanut protein in the oil', kind: 'figure', hint: 'in ppm, from its certificate' },
+  wheatPeptideKilodalton: { label: 'Average size of the wheat protein’s peptides', kind: 'figure', hint: 'in kilodalton, from its certificate' },
+};
+
+/** What is asked of the product; what a substance is for is said with its material. */
+export function isProductFact(key: string): boolean {
+  return key !== 'purpose';
+}
+
+/** Words for a fact's key, also for one that no one has named yet: `bodyPart` as `body part`. */
+export function sayFact(key: string): string {
+  if (key === 'purpose') return 'what the substance is for, with its material';
+  return FACT_WORDS[key]?.label ?? key.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
+}
