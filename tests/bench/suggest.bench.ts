@@ -43,13 +43,17 @@ export async function measureSuggestions(page: Page): Promise<Row> {
       requestAnimationFrame(look);
     }, { capture: true });
   });
-  for (const word of wordsToType()) {
+  const words = wordsToType();
+  for (const word of words) {
     await field.fill('');
     await page.waitForTimeout(250);
     await field.pressSequentially(word, { delay: 200 });
   }
   await page.waitForTimeout(500);
-  const times = (await page.evaluate(() => (window as unknown as { times: number[] }).times)).slice(10);
+  const drawn = await page.evaluate(() => (window as unknown as { times: number[] }).times);
+  // A letter whose suggestions never came counts as the slowest of all.
+  const typed = words.reduce((sum, word) => sum + word.length, 0);
+  const times = [...drawn, ...new Array<number>(Math.max(0, typed - drawn.length)).fill(Infinity)].slice(10);
   const p95 = times.length > 0 ? quantile(times, 0.95) : Infinity;
-  return { name: 'keystroke to painted suggestions', measured: `median ${ms(times.length > 0 ? median(times) : Infinity)}, p95 ${ms(p95)} (${times.length})`, promise: 'p95 under 30 ms', isKept: p95 < 30 };
+  return { name: 'keystroke to painted suggestions', measured: `median ${ms(times.length > 0 ? median(times) : Infinity)}, p95 ${ms(p95)} (${drawn.length} of ${typed} letters)`, promise: 'p95 under 30 ms', isKept: p95 < 30 };
 }

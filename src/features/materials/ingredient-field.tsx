@@ -10,6 +10,9 @@ import { ingredientQueries } from './queries.ts';
 
 export type Entry = DictionaryEntry;
 
+/** As many as are read at a glance: a longer list is drawn later and read by nobody. */
+const SHOWN = 6;
+
 export interface IngredientFieldProps {
   /** The field's path in the form: `composition.0.inci`. */
   readonly name: string;
@@ -31,7 +34,7 @@ export const IngredientField = memo(function IngredientField({ name, label, onCh
   const typed = String(field.value ?? '');
   const asked = fieldState.isDirty || fieldState.isTouched ? typed.trim() : '';
   const { data: names } = useQuery(beginningsQuery);
-  const begun = useMemo(() => (asked === '' ? [] : (names?.begin(asked, 10) ?? [])), [asked, names]);
+  const begun = useMemo(() => (asked === '' ? [] : (names?.begin(asked, SHOWN) ?? [])), [asked, names]);
   const { data, isFetching, isPlaceholderData } = useQuery({ ...ingredientQueries.search(asked), placeholderData: (before, query) => (isTypedOn(query?.queryKey[2], asked) ? before : undefined) });
   const found = isPlaceholderData ? undefined : data?.items;
   const items = useMemo(() => (asked === '' ? [] : (found ?? (begun.length > 0 ? begun : (data?.items ?? [])))), [asked, found, begun, data]);

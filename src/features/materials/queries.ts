@@ -28,7 +28,7 @@ export const ingredientQueries = {
   search: (q: string) =>
     queryOptions({
       queryKey: ['dictionary', 'search', q] as const,
-      queryFn: ({ signal }) => call(searchDictionary, { query: { q, limit: 10 } }, signal),
+      queryFn: ({ signal }) => call(searchDictionary, { query: { q, limit: 6 } }, signal),
       staleTime: Infinity,
       enabled: q !== '',
     }),
