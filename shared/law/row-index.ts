@@ -54,7 +54,7 @@ export class RowIndex {
         found = found === named ? [...(named ?? []), hit] : [...found!, hit];
       }
     }
-    return found ? dedupe(found) : [];
+    return found ? dedupe(found, substance.cas) : [];
   }
 
   /** Folded once for each spelling: the same names come back at every keystroke. */
@@ -73,8 +73,20 @@ function isSameList(a: LawRow, b: LawRow): boolean {
   return a.list === b.list && a.instrument === b.instrument;
 }
 
-function dedupe(hits: readonly RowHit[]): readonly RowHit[] {
+/**
+ * Each row once. An INCI name may cover two members of a row (a dye and its hydrochloride bear
+ * one name): the substance's own number then says which; without one the first, the stricter.
+ */
+function dedupe(hits: readonly RowHit[], cas: readonly string[]): readonly RowHit[] {
   if (hits.length < 2) return hits;
-  const rows = new Set<LawRow>();
-  return hits.filter((hit) => !rows.has(hit.row) && rows.add(hit.row) !== undefined);
+  const byRow = new Map<LawRow, RowHit>();
+  for (const hit of hits) {
+    const known = byRow.get(hit.row);
+    if (!known || (!bears(known.member, cas) && bears(hit.member, cas))) byRow.set(hit.row, hit);
+  }
+  return [...byRow.values()];
+}
+
+function bears(member: Member, cas: readonly string[]): boolean {
+  return member.cas?.some((one) => cas.includes(one)) ?? false;
 }

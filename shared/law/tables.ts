@@ -22,6 +22,7 @@ import warnings from '#data/parameters/product-warnings.json' with { type: 'json
 import usColours from '#data/parameters/us-colours.json' with { type: 'json' };
 import usProhibited from '#data/parameters/us-prohibited.json' with { type: 'json' };
 import usRestricted from '#data/parameters/us-restricted.json' with { type: 'json' };
+import wordingAnnexIIIB from '#data/parameters/wording-annex-iii-b.json' with { type: 'json' };
 import wordingAnnexIIIC from '#data/parameters/wording-annex-iii-c.json' with { type: 'json' };
 import wordingAnnexIII from '#data/parameters/wording-annex-iii.json' with { type: 'json' };
 import wording from '#data/parameters/wording.json' with { type: 'json' };
@@ -40,7 +41,7 @@ export const lawTables = {
     ...[annexII1, annexII2, annexII3, annexIIICommon, annexIII1, annexIII2, annexIII3, annexIIIC, annexIII4, annexIV, annexV, annexVI],
     ...[usProhibited, usRestricted, caProhibited, caHotlist],
   ],
-  wording: [...wording, ...wordingAnnexIII, ...wordingAnnexIIIC],
+  wording: [...wording, ...wordingAnnexIII, ...wordingAnnexIIIB, ...wordingAnnexIIIC],
   warnings,
   changes,
   usColours,

@@ -23,8 +23,45 @@ export const FORMULAS: Readonly<Record<string, readonly Formula[]>> = {
     ['Phenyl Mercuric Chloride', 'C6H5HgCl', 1],
     ['Mercurous Chloride', 'Hg2Cl2', 2],
   ],
+  C7H11N3O: [
+    ['6-Methoxy-2-Methylamino-3-Aminopyridine HCl', 'C7H12ClN3O', 1],
+    ['6-Methoxy-2-Methylamino-3-Aminopyridine Dihydrochloride', 'C7H13Cl2N3O', 1],
+  ],
   C8H12N2O: [
     ['2-Methoxymethyl-p-Phenylenediamine Sulfate', 'C8H14N2O5S', 1],
+    ['Hydroxyethyl-p-Phenylenediamine Sulfate', 'C8H14N2O5S', 1],
+  ],
+  C11H10O: [
+    ['1-Acetoxy-2-Methylnaphthalene', 'C13H12O2', 1],
+  ],
+  // Two molecules of base give one of the sulfate.
+  C14H20N2O6S: [
+    ['p-Methylaminophenol', 'C14H18N2O2', 1],
+  ],
+  C12H20ClN3O4: [
+    ['HC Blue No. 12', 'C12H19N3O4', 1],
+  ],
+  C15H20N4O2: [
+    ['1,3-Bis-(2,4-Diaminophenoxy)Propane HCl', 'C15H24Cl4N4O2', 1],
+  ],
+  C6H6Cl3NO: [
+    ['3-Amino-2,4-Dichlorophenol', 'C6H5Cl2NO', 1],
+  ],
+  C7H13Cl2N3O2: [
+    ['2,6-Dimethoxy-3,5-Pyridinediamine', 'C7H11N3O2', 1],
+  ],
+  C10H16ClN3O4: [
+    ["2,2'-[(4-Amino-3-nitrophenyl)imino]bisethanol", 'C10H15N3O4', 1],
+  ],
+  C19H32Cl4N4O3: [
+    ['Hydroxypropyl Bis(N-Hydroxyethyl-p-Phenylenediamine)', 'C19H28N4O3', 1],
+  ],
+  C8H14Cl2N2O2: [
+    ['2,4-Diaminophenoxyethanol', 'C8H12N2O2', 1],
+    ['2,4-Diaminophenoxyethanol Sulfate', 'C8H14N2O6S', 1],
+  ],
+  C9H16N2O6S: [
+    ['2-Amino-4-Hydroxyethylaminoanisole', 'C9H14N2O2', 1],
   ],
   C13H20ClN5: [
     ['Dimethylpiperazinium Aminopyrazolopyridine HCl', 'C13H21Cl2N5', 1],
