@@ -5,16 +5,14 @@ import {
   removeEvidence as removeContract,
   type ClaimEvidence,
 } from '#shared/contracts/evidence.contract.ts';
-import { AppError } from '#server/http/app-error.ts';
-import { FileAnswer } from '#server/http/file-answer.ts';
 import { route, type Call, type Route } from '#server/http/route.ts';
-import { readPaper } from '#server/modules/materials/read-paper.ts';
+import { readPaper } from '#server/storage/read-paper.ts';
 import { getProduct } from '#server/modules/products/products.service.ts';
-import type { ObjectStore } from '#server/storage/object-store.ts';
-import { addEvidence, getEvidence, listEvidence, newEvidenceKey, presentEvidence, removeEvidence } from './evidence.service.ts';
+import { dropPaper, fetchPaper, newPaperKey, storePaper, type PaperStore } from '#server/storage/papers.ts';
+import { addEvidence, getEvidence, listEvidence, presentEvidence, removeEvidence } from './evidence.service.ts';
 
 interface Deps {
-  readonly storage: Pick<ObjectStore, 'putObject' | 'getObject' | 'deleteObject'>;
+  readonly storage: PaperStore;
   readonly now: () => Date;
 }
 
@@ -26,14 +24,11 @@ export function evidenceRoutes(deps: Deps): Route[] {
     route(addContract, { may: ['edit', 'products'] }, (call) => takePaper(deps, call)),
     route(getContract, { may: ['read', 'products'] }, async ({ inHouse, actor, params }) => {
       const evidence = await inHouse((em) => getEvidence(em, actor, params));
-      const stored = await storage.getObject(evidence.storageKey);
-      if (!stored) throw new AppError('unavailable', { message: 'This paper is missing in the storage for files. Add it again.' });
-      return new FileAnswer({ bytes: stored.bytes, mediaType: evidence.mediaType, fileName: evidence.fileName });
+      return fetchPaper(storage, evidence, 'This paper is missing in the storage for files. Add it again.');
     }),
     route(removeContract, { may: ['edit', 'products'] }, async ({ inHouse, actor, params }) => {
       const { left, storageKey } = await inHouse((em) => removeEvidence(em, actor, params));
-      // The row is gone for good; bytes that stay behind because the store is away are reachable by nobody.
-      await storage.deleteObject(storageKey).catch(() => undefined);
+      await dropPaper(storage, storageKey);
       return presentEvidence(left);
     }),
   ];
@@ -41,16 +36,9 @@ export function evidenceRoutes(deps: Deps): Route[] {
 
 type Upload = Call<{ readonly id: string }, unknown, { readonly kind: ClaimEvidence['kind']; readonly claim?: string | undefined; readonly dated?: string | undefined }>;
 
-/** Bytes first, then the row: a paper that is listed can always be fetched. */
 async function takePaper({ storage, now }: Deps, { inHouse, actor, params, body, upload }: Upload) {
   await inHouse((em) => getProduct(em, actor, params.id));
   const paper = await readPaper(upload.bytes, upload.fileName);
-  const storageKey = newEvidenceKey(actor);
-  await storage.putObject(storageKey, paper.bytes, paper.mediaType);
-  try {
-    return await inHouse(async (em) => presentEvidence(await addEvidence(em, actor, { productId: params.id, paper, storageKey, now: now(), ...body })));
-  } catch (error) {
-    await storage.deleteObject(storageKey).catch(() => undefined);
-    throw error;
-  }
+  const storageKey = newPaperKey(actor, 'evidence');
+  return storePaper(storage, paper, storageKey, () => inHouse(async (em) => presentEvidence(await addEvidence(em, actor, { productId: params.id, paper, storageKey, now: now(), ...body }))));
 }

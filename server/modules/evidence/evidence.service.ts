@@ -1,19 +1,14 @@
-import { randomUUID } from 'node:crypto';
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { ClaimEvidence as EvidenceShape } from '#shared/contracts/evidence.contract.ts';
 import { AppError } from '#server/http/app-error.ts';
 import type { Actor } from '#server/http/session.ts';
-import type { Paper } from '#server/modules/materials/read-paper.ts';
+import type { Paper } from '#server/storage/read-paper.ts';
 import { getProduct } from '#server/modules/products/products.service.ts';
+import { noteOf } from '#server/storage/papers.ts';
 import { ProductEvidence } from './evidence.entity.ts';
 
 /** Papers of one product's claims. */
 const EVIDENCE_LIMIT = 100;
-
-/** Our own key: nothing of the user's naming reaches the store. */
-export function newEvidenceKey(actor: Actor): string {
-  return `houses/${actor.houseId}/evidence/${randomUUID()}`;
-}
 
 /** The papers of a product, oldest first. @throws AppError `not-found` */
 export async function listEvidence(em: EntityManager, actor: Actor, productId: string): Promise<ProductEvidence[]> {
@@ -41,15 +36,7 @@ export async function addEvidence(em: EntityManager, actor: Actor, input: NewEvi
     productId: input.productId,
     claim: input.claim ?? '',
     kind: input.kind,
-    fileName: input.paper.fileName,
-    mediaType: input.paper.mediaType,
-    bytes: input.paper.bytes.length,
-    sha256: input.paper.sha256,
-    storageKey: input.storageKey,
-    dated: input.dated ?? null,
-    addedAt: input.now,
-    addedById: actor.personId,
-    addedBy: actor.name,
+    ...noteOf(input.paper, { ...input, actor }),
   });
   await em.flush();
   return listEvidence(em, actor, input.productId);

@@ -1,19 +1,14 @@
-import { randomUUID } from 'node:crypto';
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { MaterialDocument as DocumentShape } from '#shared/contracts/materials.contract.ts';
 import { AppError } from '#server/http/app-error.ts';
 import type { Actor } from '#server/http/session.ts';
+import { noteOf } from '#server/storage/papers.ts';
 import { MaterialDocument } from './material-document.entity.ts';
 import { getMaterial, type MaterialView } from './materials.service.ts';
-import type { Paper } from './read-paper.ts';
+import type { Paper } from '#server/storage/read-paper.ts';
 
 /** Papers of one material; a shelf, not an archive. */
 const DOCUMENTS_LIMIT = 100;
-
-/** Our own key: nothing of the user's naming reaches the store. */
-export function newStorageKey(actor: Actor): string {
-  return `houses/${actor.houseId}/materials/${randomUUID()}`;
-}
 
 /** Notes a paper whose bytes already lie in the store. @throws AppError `not-found`, `invalid` when the shelf is full */
 export async function addDocument(
@@ -32,16 +27,8 @@ export async function addDocument(
     houseId: actor.houseId,
     materialId: view.material.id,
     kind: input.kind,
-    fileName: input.paper.fileName,
-    mediaType: input.paper.mediaType,
-    bytes: input.paper.bytes.length,
-    sha256: input.paper.sha256,
-    storageKey: input.storageKey,
-    dated: input.dated ?? null,
     runsOut: input.runsOut ?? null,
-    addedAt: input.now,
-    addedById: actor.personId,
-    addedBy: actor.name,
+    ...noteOf(input.paper, { ...input, actor }),
   });
   await em.flush();
   return getMaterial(em, actor, input.materialId);

@@ -8,17 +8,15 @@ import {
   removeMaterialDocument,
   updateMaterial as updateMaterialContract,
 } from '#shared/contracts/materials.contract.ts';
-import { AppError } from '#server/http/app-error.ts';
-import { FileAnswer } from '#server/http/file-answer.ts';
 import { route, type Call, type Route } from '#server/http/route.ts';
-import type { ObjectStore } from '#server/storage/object-store.ts';
-import { addDocument, getDocument, newStorageKey, removeDocument } from './material-documents.service.ts';
+import { dropPaper, fetchPaper, newPaperKey, storePaper, type PaperStore } from '#server/storage/papers.ts';
+import { addDocument, getDocument, removeDocument } from './material-documents.service.ts';
 import { presentMaterial, presentMaterialSummary } from './materials.present.ts';
 import { archiveMaterial, createMaterial, getMaterial, listMaterials, updateMaterial } from './materials.service.ts';
-import { readPaper } from './read-paper.ts';
+import { readPaper } from '#server/storage/read-paper.ts';
 
 interface Deps {
-  readonly storage: Pick<ObjectStore, 'putObject' | 'getObject' | 'deleteObject'>;
+  readonly storage: PaperStore;
   readonly now: () => Date;
 }
 
@@ -54,14 +52,11 @@ function documentRoutes(deps: Deps): Route[] {
     route(addMaterialDocument, { may: ['edit', 'materials'] }, (call) => takePaper(deps, call)),
     route(getMaterialDocument, { may: ['read', 'materials'] }, async ({ inHouse, actor, params }) => {
       const document = await inHouse((em) => getDocument(em, actor, params));
-      const stored = await storage.getObject(document.storageKey);
-      if (!stored) throw new AppError('unavailable', { message: 'This document is missing in the storage for files. Add it again.' });
-      return new FileAnswer({ bytes: stored.bytes, mediaType: document.mediaType, fileName: document.fileName });
+      return fetchPaper(storage, document, 'This document is missing in the storage for files. Add it again.');
     }),
     route(removeMaterialDocument, { may: ['edit', 'materials'] }, async ({ inHouse, actor, params }) => {
       const { view, storageKey } = await inHouse((em) => removeDocument(em, actor, params));
-      // The row is gone for good; bytes that stay behind because the store is away are reachable by nobody.
-      await storage.deleteObject(storageKey).catch(() => undefined);
+      await dropPaper(storage, storageKey);
       return presentMaterial(view);
     }),
   ];
@@ -69,16 +64,9 @@ function documentRoutes(deps: Deps): Route[] {
 
 type Upload = Call<{ readonly id: string }, unknown, { readonly kind: 'safety-data-sheet' | 'composition-sheet' | 'allergen-sheet' | 'certificate-of-analysis' | 'other'; readonly dated?: string; readonly runsOut?: string }>;
 
-/** Bytes first, then the row: a paper that is listed can always be fetched. */
 async function takePaper({ storage, now }: Deps, { inHouse, actor, params, body, upload }: Upload) {
   await inHouse((em) => getMaterial(em, actor, params.id));
   const paper = await readPaper(upload.bytes, upload.fileName);
-  const storageKey = newStorageKey(actor);
-  await storage.putObject(storageKey, paper.bytes, paper.mediaType);
-  try {
-    return await inHouse(async (em) => presentMaterial(await addDocument(em, actor, { materialId: params.id, paper, storageKey, now: now(), ...body })));
-  } catch (error) {
-    await storage.deleteObject(storageKey).catch(() => undefined);
-    throw error;
-  }
+  const storageKey = newPaperKey(actor, 'materials');
+  return storePaper(storage, paper, storageKey, () => inHouse(async (em) => presentMaterial(await addDocument(em, actor, { materialId: params.id, paper, storageKey, now: now(), ...body }))));
 }
