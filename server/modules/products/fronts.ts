@@ -4,6 +4,7 @@ import { labelOfDocument } from '#shared/artwork/label-of-document.ts';
 import { layOutLabel } from '#shared/artwork/layout.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import { hasLines, judge, type Dossier, type Knowledge } from './dossier.ts';
+import { createMemory } from './remembered.ts';
 
 /** Fronts kept in memory: enough for a few houses' shelves. */
 const KEPT = 200;
@@ -13,17 +14,11 @@ const KEPT = 200;
  * the product, a material, the house's print, the tables or the day has changed.
  */
 export function createFronts() {
-  const kept = new Map<string, ProductFront>();
+  const remember = createMemory<ProductFront>(KEPT);
   return (dossier: Dossier, knows: Knowledge): ProductFront => {
     const { product, materials, house } = dossier;
     const key = [product.id, product.version, knows.law.release, knows.dictionary.release, knows.today, ...materials.map((one) => `${one.id}:${one.version}`), JSON.stringify(house)].join(' ');
-    let front = kept.get(key);
-    if (!front) {
-      front = frontOf(dossier, knows);
-      if (kept.size >= KEPT) kept.delete(kept.keys().next().value ?? '');
-      kept.set(key, front);
-    }
-    return front;
+    return remember(key, () => frontOf(dossier, knows));
   };
 }
 

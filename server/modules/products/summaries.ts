@@ -6,6 +6,7 @@ import type { getHouse } from '#server/modules/house/house.service.ts';
 import { usedMaterialIds } from './keep-save.ts';
 import type { Product } from './product.entity.ts';
 import { presentProduct } from './products.present.ts';
+import { createMemory } from './remembered.ts';
 
 /** What the house prints stands behind missing particulars, so its version counts too. */
 type HouseRow = Pick<Awaited<ReturnType<typeof getHouse>>, 'version' | 'name' | 'particulars'>;
@@ -17,19 +18,14 @@ const SEVERITIES = ['stop', 'decide', 'note'] as const;
 
 /**
  * Rows of the product list. A product is judged anew only when it, one of its materials, its
- * house's print, the tables or the day has changed; the memory of earlier judgements is per server and may be lost.
+ * house's print, the tables or the day has changed.
  */
 export function createSummaries() {
-  const kept = new Map<string, Standing>();
+  const remember = createMemory<Standing>(KEPT);
   return (product: Product, house: HouseRow, materials: ReadonlyMap<string, MaterialShape>, knows: Knowledge): ProductSummary => {
     const own = usedMaterialIds(product.draft).flatMap((id) => materials.get(id) ?? []);
     const key = [product.id, product.version, house.version, knows.law.release, knows.dictionary.release, knows.today, ...own.map((one) => `${one.id}:${one.version}`)].join(' ');
-    let standing = kept.get(key);
-    if (!standing) {
-      standing = standingOf({ house: { name: house.name, ...house.particulars }, product: presentProduct(product), materials: own }, knows);
-      if (kept.size >= KEPT) kept.delete(kept.keys().next().value ?? '');
-      kept.set(key, standing);
-    }
+    const standing = remember(key, () => standingOf({ house: { name: house.name, ...house.particulars }, product: presentProduct(product), materials: own }, knows));
     return { ...presentRow(product), ...standing };
   };
 }
