@@ -98,22 +98,23 @@ const SHORTAGES: Readonly<Record<string, string>> = {
 };
 
 function shortageOf(error: unknown): string | undefined {
-  for (let fault: unknown = error, depth = 0; typeof fault === 'object' && fault !== null && depth < 5; depth += 1) {
-    const { code, cause } = fault as Faulty;
-    if (typeof code === 'string' && SHORTAGES[code]) return SHORTAGES[code];
-    fault = cause;
-  }
+  for (const { code } of causesOf(error)) if (typeof code === 'string' && SHORTAGES[code]) return SHORTAGES[code];
   return undefined;
+}
+
+/** An error and what lies behind it, the driver's own fault last. */
+function* causesOf(error: unknown): Generator<Faulty> {
+  for (let fault: unknown = error; typeof fault === 'object' && fault !== null; fault = (fault as Faulty).cause) yield fault as Faulty;
 }
 
 const CONNECTION_CODES = new Set(['ECONNREFUSED', 'ECONNRESET', 'EPIPE', 'ETIMEDOUT', 'ENOTFOUND', '57P01', '57P02', '57P03', '53300', '08001', '08003', '08006']);
 
 /** True where the database (or the pool in front of it) does not answer. */
 export function isConnectionFault(error: unknown): boolean {
-  if (typeof error !== 'object' || error === null) return false;
-  const fault: Faulty = error;
-  if (typeof fault.code === 'string' && CONNECTION_CODES.has(fault.code)) return true;
-  if (fault.name === 'KnexTimeoutError') return true;
-  if (error instanceof Error && /^(Connection terminated|Unable to acquire a connection|timeout exceeded when trying to connect)/.test(error.message)) return true;
-  return isConnectionFault(fault.cause);
+  return [...causesOf(error)].some(
+    (fault) =>
+      (typeof fault.code === 'string' && CONNECTION_CODES.has(fault.code)) ||
+      fault.name === 'KnexTimeoutError' ||
+      (fault instanceof Error && /^(Connection terminated|Unable to acquire a connection|timeout exceeded when trying to connect)/.test(fault.message)),
+  );
 }
