@@ -1,4 +1,5 @@
 import type { DocumentLabel, FormulaDocument } from '#shared/contracts/formula-document.ts';
+import { essence } from '#shared/law/essence.ts';
 import type { Market } from '#shared/law/types.ts';
 import type { ContainerSettings, LabelInput } from './label-input.ts';
 
@@ -39,7 +40,7 @@ function unique(texts: readonly string[]): string[] {
   const seen = new Set<string>();
   return texts.filter((text) => {
     // Compared as the verdicts do: a warning that differs in punctuation alone is not printed twice.
-    const key = text.normalize('NFKD').toLowerCase().replace(/[^\p{L}\p{N}]+/gu, '');
+    const key = essence(text);
     if (key === '' || seen.has(key)) return false;
     seen.add(key);
     return true;

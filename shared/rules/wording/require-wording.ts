@@ -1,4 +1,5 @@
 import type { Finding, RequiredWording } from '#shared/engine/types.ts';
+import { essence } from '#shared/law/essence.ts';
 import type { Market, Sourcing } from '#shared/law/types.ts';
 import type { Context } from '../context.ts';
 import { ruleId, subjectOf } from '../substances/present.ts';
@@ -93,11 +94,6 @@ export function judgeWordings(due: readonly DueWording[], context: Context): Fin
     }
   }
   return findings;
-}
-
-/** Letters and digits only: case, punctuation and line breaks of a printed text do not matter. */
-function essence(text: string): string {
-  return text.normalize('NFKD').toLowerCase().replace(/[^\p{L}\p{N}]+/gu, '');
 }
 
 /** True where the document gives particulars, and no text of theirs holds the words in any language held. */
