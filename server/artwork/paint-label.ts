@@ -44,12 +44,12 @@ function paintItem(item: Item, scene: Scene, painter: Painter): string {
 
 /** Runs whose words are told: no straight line joins letters on arcs, and capitals are only a dress. */
 const isTold = (item: Item | undefined): item is Text => item?.kind === 'text' && (item.places !== undefined || item.says !== undefined);
-const isOneParagraph = (item: Item, next: Item | undefined): boolean => isTold(next) && next.element === item.element;
+const isOneParagraph = (item: Item | undefined, next: Item | undefined): boolean => isTold(item) && isTold(next) && next.element === item.element;
 
 /** What the told runs say from here to the end of their element, or `null` where none begins. */
 function wordsFrom(items: readonly Item[], from: number): string | null {
   const first = items[from]!;
-  if (!isTold(first) || (from > 0 && isOneParagraph(items[from - 1]!, first) && isTold(items[from - 1]))) return null;
+  if (!isTold(first) || isOneParagraph(items[from - 1], first)) return null;
   let words = '';
   for (let i = from; isTold(items[i]) && items[i]!.element === first.element; i += 1) {
     const { says, text } = items[i] as Text;

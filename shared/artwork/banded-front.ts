@@ -176,7 +176,7 @@ function overflowsOf(job: Job, lines: readonly Line[], width: Micrometres, over:
     const least = line.element === 'name' ? Math.round(leastText(job, line.weight) * 1.2) : leastText(job, line.weight);
     const needed = lineLength(job, { ...line, size: Math.max(least, line.size) }) - width;
     if (needed > 0) out.push({ element: line.element, direction: 'width', missing: needed, room: width, word: line.text });
-    else if (line.size < least) out.push({ element: line.element, direction: 'height', missing: Math.ceil(((least - line.size) * 1000) / 1000), room: width });
+    else if (line.size < least) out.push({ element: line.element, direction: 'height', missing: least - line.size, room: width });
   }
   if (over > 0 && out.length === 0) out.push({ element: 'function', direction: 'height', missing: over, room: width });
   return out;

@@ -1,4 +1,5 @@
 import { add, compare, decimal, parseDecimal, ZERO } from '#shared/kernel/rational.ts';
+import { USUAL_OVERLAP_MM, USUAL_STOCK_MM } from './containers.ts';
 import type { ContainerSettings } from './label-input.ts';
 import { isWithin, micrometresOf, roundLength } from './lengths.ts';
 import type { Micrometres } from './scene.ts';
@@ -24,10 +25,6 @@ export interface ContainerFault {
   readonly field: string;
   readonly message: string;
 }
-
-/** Stock thickness in mm where none is given: film with its adhesive. Common practice, no source. */
-const STOCK = '0.06';
-const OVERLAP = '5';
 
 const BOUNDS: Readonly<Record<string, readonly [string, string, string]>> = {
   diameterMm: ['10', '400', 'The diameter'],
@@ -59,7 +56,7 @@ export function readContainer(container: ContainerSettings): Sheet | { readonly 
     const width = micrometresOf(decimal(container.widthMm));
     return { shape: 'flat', width, height: micrometresOf(decimal(container.heightMm)), overlap: 0, round: width, diameter: 0 };
   }
-  const { diameterMm, labelHeightMm, overlapMm = OVERLAP, stockMm = STOCK } = container;
+  const { diameterMm, labelHeightMm, overlapMm = USUAL_OVERLAP_MM, stockMm = USUAL_STOCK_MM } = container;
   const faults = faultsOf({ diameterMm, labelHeightMm, overlapMm, stockMm });
   if (faults.length > 0) return { faults };
   const across = add(decimal(diameterMm), decimal(stockMm));
@@ -74,7 +71,7 @@ export function readContainer(container: ContainerSettings): Sheet | { readonly 
 }
 
 /** A cone's label: `labelHeightMm` is measured along the wall, the diameters at the label's two edges. */
-function readTaper({ topDiameterMm, bottomDiameterMm, labelHeightMm, overlapMm = OVERLAP }: Extract<ContainerSettings, { shape: 'taper' }>): Sheet | { readonly faults: readonly ContainerFault[] } {
+function readTaper({ topDiameterMm, bottomDiameterMm, labelHeightMm, overlapMm = USUAL_OVERLAP_MM }: Extract<ContainerSettings, { shape: 'taper' }>): Sheet | { readonly faults: readonly ContainerFault[] } {
   const faults = faultsOf({ topDiameterMm, bottomDiameterMm, labelHeightMm, overlapMm });
   if (faults.length > 0) return { faults };
   const [top, bottom, slant, overlap] = [topDiameterMm, bottomDiameterMm, labelHeightMm, overlapMm].map((text) => micrometresOf(decimal(text))) as [number, number, number, number];

@@ -46,6 +46,6 @@ export const CONTAINERS: readonly UsualContainer[] = [
   face('face-box', 'Box label, 150 × 100 mm', '150', '100'),
 ];
 
-/** The overlap and stock a usual bottle starts with, in millimetres. Common practice, no source. */
+/** The overlap, and the stock (film with its adhesive), where none is given, in millimetres. Common practice, no source. */
 export const USUAL_OVERLAP_MM = '5';
 export const USUAL_STOCK_MM = '0.06';

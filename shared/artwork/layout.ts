@@ -2,6 +2,7 @@ import { barcodeFault } from './barcode.ts';
 import { bendScene } from './bend.ts';
 import { checkLabel, type Check } from './checks.ts';
 import { readContainer, type Sheet } from './container.ts';
+import { USUAL_OVERLAP_MM } from './containers.ts';
 import { contentOf, textsOf } from './content.ts';
 import { fitLabel } from './fit.ts';
 import { heightAt, minimumsFor, sizeForHeight } from './heights.ts';
@@ -103,11 +104,16 @@ function missingCharacters(input: LabelInput, metrics: FontMetrics): Misfit[] {
   });
 }
 
+/** The body a label goes on, for the slug. */
+function bodyOf({ container }: LabelInput, sheet: Sheet): string {
+  if (container.shape === 'taper') return `cone Ø ${container.topDiameterMm} to ${container.bottomDiameterMm}, overlap ${container.overlapMm ?? USUAL_OVERLAP_MM}`;
+  return sheet.shape === 'cylinder' ? `wrap Ø ${sheet.diameter / 1000}, overlap ${sheet.overlap / 1000}` : 'flat';
+}
+
 function legendOf(input: LabelInput, sheet: Sheet, bleed: Micrometres): string {
-  const { trim } = sheetTrim(sheet);
-  const wrap = input.container.shape === 'taper' ? `cone Ø ${input.container.topDiameterMm} to ${input.container.bottomDiameterMm}, overlap ${input.container.overlapMm ?? '5'}` : sheet.shape === 'cylinder' ? `wrap Ø ${sheet.diameter / 1000}, overlap ${sheet.overlap / 1000}` : 'flat';
+  const { width, height } = sheet.taper ?? sheet;
   const content = input.netContent ? ` ${input.netContent.value} ${input.netContent.unit}` : '';
-  return `${content.trim()}${content ? ' · ' : ''}${input.market} · ${wrap} · trim ${trim.width / 1000} × ${trim.height / 1000} mm · bleed ${bleed / 1000} mm`;
+  return `${content.trim()}${content ? ' · ' : ''}${input.market} · ${bodyOf(input, sheet)} · trim ${width / 1000} × ${height / 1000} mm · bleed ${bleed / 1000} mm`;
 }
 
 /**
@@ -145,10 +151,6 @@ export function layOutLabel(input: LabelInput, metrics: FontMetrics): Layout {
   const bent = sheet.taper ? bendScene(scene, sheet.taper, metrics) : { scene, overflows: [] };
   const misfits = [...lacking, ...[...fitted.overflows, ...bent.overflows].map(misfitOf)];
   return { scene: bent.scene, misfits, checks: checkLabel({ input, job, scene, setting: fitted.setting, misfits }) };
-}
-
-function sheetTrim(sheet: Sheet): Pick<Scene, 'trim'> {
-  return { trim: sheet.taper ? { width: sheet.taper.width, height: sheet.taper.height } : { width: sheet.width, height: sheet.height } };
 }
 
 /** For people: the height of a share of an em, in millimetres cut to two decimals. */
