@@ -29,6 +29,9 @@ export interface DictionaryEntry {
   readonly source: string;
 }
 
+/** An entry as the browser's own look-up needs it: what names are told by, and what it is for. */
+export type NameEntry = Omit<DictionaryEntry, 'ec' | 'source'>;
+
 /** How a written name was recognised. */
 export interface NameMatch {
   readonly entry: DictionaryEntry;

@@ -1,8 +1,5 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
-import type { DictionaryEntry } from '#shared/dictionary/types.ts';
-
-/** An entry as the browser's own look-up needs it: what names are told by, and what it is for. */
-export type NameEntry = Omit<DictionaryEntry, 'ec' | 'source'>;
+import type { DictionaryEntry, NameEntry } from '#shared/dictionary/types.ts';
 
 /**
  * Every entry that the house sees, curated ones first and its own last: for reading lists in

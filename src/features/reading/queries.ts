@@ -2,11 +2,8 @@ import { queryOptions } from '@tanstack/react-query';
 import { listDictionaryNames } from '#shared/contracts/dictionary.contract.ts';
 import { createNameBeginner } from '#shared/dictionary/begin-names.ts';
 import { createDictionary } from '#shared/dictionary/create-dictionary.ts';
-import type { Dictionary, DictionaryEntry } from '#shared/dictionary/types.ts';
+import type { Dictionary, DictionaryEntry, NameEntry } from '#shared/dictionary/types.ts';
 import { call } from '#src/lib/api/call.ts';
-
-/** An entry as it is sent: what names are told by. */
-type NameEntry = Omit<DictionaryEntry, 'ec' | 'source'>;
 
 const fresh = { staleTime: 10 * 60_000, gcTime: 60 * 60_000, structuralSharing: false } as const;
 
