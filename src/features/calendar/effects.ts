@@ -3,7 +3,7 @@ import type { Assessment, MarketAssessment } from '#shared/engine/assessment.ts'
 import type { Finding } from '#shared/engine/types.ts';
 import type { LawBook, LawChange } from '#shared/law/law-book.ts';
 import type { Market } from '#shared/law/types.ts';
-import { daysAround } from '#src/features/workspace/law-days.ts';
+import { daysAround, pointOf } from '#src/features/workspace/law-days.ts';
 import type { AssessInput } from '#src/features/workspace/engine.ts';
 
 /** What one dated change of the law does to one product. */
@@ -54,13 +54,12 @@ export async function findEffects(judge: Judge, document: FormulaDocument, law: 
 
 /** `upcoming` tells of the same change beforehand; a day that the tables do not cover is none of the law's. */
 const isOfTheDay = ({ kind }: Finding): boolean => kind !== 'upcoming' && kind !== 'date-not-covered' && kind !== 'wording-required';
-const keyOf = ({ kind, subject, rule, limit }: Finding): string => [kind, subject, rule, limit ?? ''].join('|');
 
 function compare(before: MarketAssessment, on: MarketAssessment): Pick<Effect, 'added' | 'removed' | 'list' | 'wording'> | undefined {
   const then = before.findings.filter(isOfTheDay);
   const now = on.findings.filter(isOfTheDay);
-  const added = without(now, then, keyOf);
-  const removed = without(then, now, keyOf);
+  const added = without(now, then, pointOf);
+  const removed = without(then, now, pointOf);
   const [namesThen, namesNow] = [before, on].map((one) => one.declaration.entries.map(({ name }) => name)) as [string[], string[]];
   const same = (text: string) => text;
   const list = { added: without(namesNow, namesThen, same), removed: without(namesThen, namesNow, same), isChanged: before.declaration.text !== on.declaration.text };

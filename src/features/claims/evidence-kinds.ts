@@ -8,6 +8,3 @@ export const EVIDENCE_KINDS: Readonly<Record<ClaimEvidence['kind'], string>> = {
   'supplier-statement': 'Supplier’s statement',
   other: 'Other paper',
 };
-/** What the server takes; it looks at the content, not at the name. */
-export const ACCEPTED = '.pdf,.jpg,.jpeg,.png,.webp,application/pdf,image/jpeg,image/png,image/webp';
-export const MOST_BYTES = 20 * 1024 * 1024;

@@ -1,10 +1,9 @@
 import { useState } from 'react';
 import { getEvidence, type ClaimEvidence } from '#shared/contracts/evidence.contract.ts';
-import { sayError } from '#src/lib/api/error.ts';
 import { urlOf } from '#src/lib/api/url.ts';
 import { sayBytes, sayDay } from '#src/lib/say.ts';
-import { Button, IconButton } from '#src/ui/button.tsx';
-import { Dialog } from '#src/ui/dialog.tsx';
+import { IconButton } from '#src/ui/button.tsx';
+import { TakeAwayDialog } from '#src/ui/take-away-dialog.tsx';
 import { Icon } from '#src/ui/icon.tsx';
 import { useToast } from '#src/ui/toast.tsx';
 import { EVIDENCE_KINDS } from './evidence-kinds.ts';
@@ -45,20 +44,13 @@ function RemoveDialog({ productId, paper, onClose }: { productId: string; paper:
   const remove = useRemoveEvidence(productId);
   const toast = useToast();
   return (
-    <Dialog
+    <TakeAwayDialog
       title="Take this paper away?"
-      role="alertdialog"
-      isOpen
+      what={`${EVIDENCE_KINDS[paper.kind]}, ${paper.fileName}`}
+      isBusy={remove.isPending}
+      error={remove.error}
+      onTakeAway={() => remove.mutate(paper.id, { onSuccess: () => { toast(`${paper.fileName} taken away.`); onClose(); } })}
       onClose={onClose}
-      foot={
-        <>
-          <Button onClick={onClose}>Keep it</Button>
-          <Button weight="stop" busy={remove.isPending} onClick={() => remove.mutate(paper.id, { onSuccess: () => { toast(`${paper.fileName} taken away.`); onClose(); } })}>Take away</Button>
-        </>
-      }
-    >
-      <p className="quiet">{EVIDENCE_KINDS[paper.kind]}, {paper.fileName}. It cannot be brought back; keep your own copy.</p>
-      {remove.error ? <p className="error mt-2" role="alert">{sayError(remove.error)}</p> : null}
-    </Dialog>
+    />
   );
 }

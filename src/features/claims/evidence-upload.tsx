@@ -2,13 +2,14 @@ import { useId, useState } from 'react';
 import type { ChangeEvent } from 'react';
 import type { ClaimEvidence } from '#shared/contracts/evidence.contract.ts';
 import { ApiError, sayError } from '#src/lib/api/error.ts';
+import { ACCEPTED, MOST_BYTES } from '#src/lib/papers.ts';
 import { sayBytes, sayDay } from '#src/lib/say.ts';
 import { Button } from '#src/ui/button.tsx';
 import { FieldFault, SelectField, TextField } from '#src/ui/field.tsx';
 import { Icon } from '#src/ui/icon.tsx';
 import { Progress } from '#src/ui/progress.tsx';
 import { useToast } from '#src/ui/toast.tsx';
-import { ACCEPTED, EVIDENCE_KINDS, MOST_BYTES } from './evidence-kinds.ts';
+import { EVIDENCE_KINDS } from './evidence-kinds.ts';
 import { useAddEvidence } from './mutations.ts';
 
 /** A place to attach what shows a claim: a file, its kind and its day. */

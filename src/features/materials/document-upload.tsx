@@ -2,12 +2,13 @@ import { useId, useState } from 'react';
 import type { ChangeEvent, DragEvent } from 'react';
 import type { MaterialDocument } from '#shared/contracts/materials.contract.ts';
 import { ApiError, sayError } from '#src/lib/api/error.ts';
+import { ACCEPTED, MOST_BYTES } from '#src/lib/papers.ts';
 import { sayBytes, sayDay } from '#src/lib/say.ts';
 import { Button } from '#src/ui/button.tsx';
 import { FieldFault, SelectField, TextField } from '#src/ui/field.tsx';
 import { Progress } from '#src/ui/progress.tsx';
 import { useToast } from '#src/ui/toast.tsx';
-import { ACCEPTED, DOCUMENT_KINDS, MOST_BYTES } from './document-kinds.ts';
+import { DOCUMENT_KINDS } from './document-kinds.ts';
 import { useAddDocument } from './mutations.ts';
 
 /** Adding a paper: dropped here or chosen, with its kind and days; a refusal is said here and the choice stays. */

@@ -2,10 +2,9 @@ import { useState } from 'react';
 import { getMaterialDocument } from '#shared/contracts/materials.contract.ts';
 import type { Material, MaterialDocument } from '#shared/contracts/materials.contract.ts';
 import { urlOf } from '#src/lib/api/url.ts';
-import { sayError } from '#src/lib/api/error.ts';
 import { sayBytes, sayDay, today } from '#src/lib/say.ts';
-import { Button, IconButton } from '#src/ui/button.tsx';
-import { Dialog } from '#src/ui/dialog.tsx';
+import { IconButton } from '#src/ui/button.tsx';
+import { TakeAwayDialog } from '#src/ui/take-away-dialog.tsx';
 import { useToast } from '#src/ui/toast.tsx';
 import { VerdictWord } from '#src/ui/verdict-mark.tsx';
 import { DocumentUpload } from './document-upload.tsx';
@@ -51,20 +50,13 @@ function RemoveDialog({ materialId, document, onClose }: { materialId: string; d
   const remove = useRemoveDocument(materialId);
   const toast = useToast();
   return (
-    <Dialog
+    <TakeAwayDialog
       title="Take this document away?"
-      role="alertdialog"
-      isOpen
+      what={`${DOCUMENT_KINDS[document.kind]}, ${document.fileName}`}
+      isBusy={remove.isPending}
+      error={remove.error}
+      onTakeAway={() => remove.mutate(document.id, { onSuccess: () => { toast(`${document.fileName} taken away.`); onClose(); } })}
       onClose={onClose}
-      foot={
-        <>
-          <Button onClick={onClose}>Keep it</Button>
-          <Button weight="stop" busy={remove.isPending} onClick={() => remove.mutate(document.id, { onSuccess: () => { toast(`${document.fileName} taken away.`); onClose(); } })}>Take away</Button>
-        </>
-      }
-    >
-      <p className="quiet">{DOCUMENT_KINDS[document.kind]}, {document.fileName}. It cannot be brought back; keep your own copy.</p>
-      {remove.error ? <p className="error mt-2" role="alert">{sayError(remove.error)}</p> : null}
-    </Dialog>
+    />
   );
 }

@@ -4,7 +4,7 @@ import { compare, toDecimal, ZERO } from '#shared/kernel/rational.ts';
 import type { ReadName } from '#shared/reading/read-list.ts';
 import { VerdictMark } from '#src/ui/verdict-mark.tsx';
 import { TextButton } from '#src/ui/button.tsx';
-import { roughly, toFigure } from './figures.ts';
+import { roughlyText, toNumber } from '#src/lib/figures.ts';
 
 const LOWEST = 0.0001;
 /** Where a share stands on the scale, in percent of its width. */
@@ -60,11 +60,11 @@ function Row({ read, index, hatch, onChoose }: { read: ReadName; index: number; 
         {one.block === 'may-contain' ? <span className="quiet">may contain</span> : null}
       </th>
       <td className="rule">
-        <Stretch min={toFigure(bounds.min)} max={toFigure(bounds.max)} cap={cap && toFigure(cap.share)} hatch={hatch} />
+        <Stretch min={toNumber(bounds.min)} max={toNumber(bounds.max)} cap={cap && toNumber(cap.share)} hatch={hatch} />
         {cap ? <span className="law-cap" title={cap.citation}>the law allows {cap.limit} %{cap.basis ? ` ${cap.basis}` : ''}: <span className="cite">{cap.citation}</span></span> : null}
       </td>
       <td className="num" title={`${min} % to ${max} %`}>
-        {compare(bounds.min, ZERO) === 0 ? <>at most <b>{roughly(max)}</b></> : min === max ? <b>{roughly(max)}</b> : <><b>{roughly(min)}</b> to <b>{roughly(max)}</b></>}
+        {compare(bounds.min, ZERO) === 0 ? <>at most <b>{roughlyText(max)}</b></> : min === max ? <b>{roughlyText(max)}</b> : <><b>{roughlyText(min)}</b> to <b>{roughlyText(max)}</b></>}
       </td>
     </tr>
   );

@@ -1,6 +1,7 @@
 import type { AllergenVerdict } from '#shared/engine/allergens.ts';
 import { toDecimal, type Rational } from '#shared/kernel/rational.ts';
 import { MARKETS, type Market } from '#shared/law/types.ts';
+import { roughlyText } from '#src/lib/figures.ts';
 import { sayCount, sayList } from '#src/lib/say.ts';
 import type { LedgerNote } from './note-row.tsx';
 
@@ -11,7 +12,7 @@ interface Judged {
 }
 
 const isPresent = ({ total }: AllergenVerdict): boolean => total.max.n > 0n;
-const figure = (share: Rational): string => String(Number(Number(toDecimal(share, 12)).toPrecision(4)));
+const figure = (share: Rational): string => roughlyText(toDecimal(share, 12));
 
 /** Which fragrance allergens are named and which stay unnamed, with their totals against the threshold. */
 export function findAllergenNotes(results: readonly Judged[]): LedgerNote[] {

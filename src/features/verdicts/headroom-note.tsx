@@ -1,4 +1,5 @@
 import type { Market } from '#shared/law/types.ts';
+import { roughlyText } from '#src/lib/figures.ts';
 import type { LedgerNote } from './note-row.tsx';
 
 export interface RoomOfLine {
@@ -8,8 +9,6 @@ export interface RoomOfLine {
   readonly max: string | null;
   readonly limitedBy: string | null;
 }
-
-const roughly = (text: string): string => String(Number(Number(text).toPrecision(4)));
 
 /** The line with the least room: how far it may rise before something new is found. Nothing where no line is bounded. */
 export function findHeadroomNote(market: Market, room: readonly RoomOfLine[] | null, nameOf: (line: number) => string, nameRule: (rule: string) => string): LedgerNote[] {
@@ -21,8 +20,8 @@ export function findHeadroomNote(market: Market, room: readonly RoomOfLine[] | n
     id: 'headroom',
     head: `${nameOf(line)} has the least room`,
     why: 'Above this share, with the other lines in proportion, something is found that is not there now. Room for every line stands below.',
-    sum: `${roughly(share)} % of the product now; up to ${roughly(max!)} % nothing new is found.`,
+    sum: `${roughlyText(share)} % of the product now; up to ${roughlyText(max!)} % nothing new is found.`,
     citations: limitedBy === null ? [] : [`Held by ${nameRule(limitedBy)}`],
-    cells: new Map([[market, { figure: `${roughly(max!)} %`, against: `now ${roughly(share)} %` }]]),
+    cells: new Map([[market, { figure: `${roughlyText(max!)} %`, against: `now ${roughlyText(share)} %` }]]),
   }];
 }

@@ -1,5 +1,6 @@
 import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { Assessment } from '#shared/engine/assessment.ts';
+import type { Finding } from '#shared/engine/types.ts';
 import type { LawBook, LawChange } from '#shared/law/law-book.ts';
 import type { Market } from '#shared/law/types.ts';
 import type { AssessInput } from './engine.ts';
@@ -31,10 +32,15 @@ export function daysAround(change: LawChange, changes: readonly LawChange[]): Da
   return { before: at(dayBefore(change.date)), on: at(change.date), ...(begun && { begun: begun.date }) };
 }
 
+/** What tells a point from others on another day. */
+export function pointOf({ kind, subject, rule, limit }: Finding): string {
+  return [kind, subject, rule, limit ?? ''].join('|');
+}
+
 /** What a person would notice: the printed list, the verdicts and the wording. */
 function impression(assessment: Assessment): string {
   const result = assessment.results[0]!;
-  const findings = result.findings.filter((finding) => finding.kind !== 'upcoming').map((finding) => `${finding.kind}|${finding.subject}|${finding.rule}|${finding.limit ?? ''}`);
+  const findings = result.findings.filter((finding) => finding.kind !== 'upcoming').map(pointOf);
   return JSON.stringify([result.declaration.text, findings.toSorted(), result.requiredWording.map((wording) => wording.text).toSorted()]);
 }
 

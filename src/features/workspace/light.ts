@@ -1,4 +1,4 @@
-import { roughlyText } from './figures.ts';
+import { roughlyText } from '#src/lib/figures.ts';
 import type { EntryView } from './view.ts';
 
 /** What someone points at: substances, a formula line, or nothing. */

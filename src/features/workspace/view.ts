@@ -1,7 +1,8 @@
 import type { Assessment, DeclarationEntry, EntrySource, MarketAssessment } from '#shared/engine/assessment.ts';
 import type { Finding, Interval } from '#shared/engine/types.ts';
-import { toDecimal, type Rational } from '#shared/kernel/rational.ts';
+import { toDecimal } from '#shared/kernel/rational.ts';
 import { foldName } from '#shared/law/fold.ts';
+import { toNumber } from '#src/lib/figures.ts';
 
 /** One name of the list as the screens show it. Figures without text are for drawing only. */
 export interface EntryView {
@@ -48,10 +49,6 @@ export interface MarketView {
   readonly lines: readonly { readonly id: string; readonly at: number; readonly weight: 'zone' | 'binding' | 'idle'; readonly caption: string }[];
 }
 
-/** A float for drawing: twelve places are plenty for a pixel. */
-export function toNumber(value: Rational): number {
-  return Number((value.n * 10n ** 12n) / value.d) / 1e12;
-}
 const PLACES = 6;
 const texts = ({ min, typical, max }: Interval, places = 12) => ({ min: toDecimal(min, places), typical: toDecimal(typical, places), max: toDecimal(max, places) });
 
