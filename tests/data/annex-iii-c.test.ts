@@ -1,35 +1,16 @@
 import { describe, expect, test } from 'vitest';
 import { judge, law, said, type Asked, type Given } from '../shared/rules/judging.ts';
+import { DYE, RINSE, LASH, HAIR, EYELASH, NONE, missingEntries, notCheckedOf, saidOf, tryClosedUses, tryColourants, tryLimits, tryTogether, wordsOf, type Limit } from './annex-iii-cases.ts';
 
 /**
  * Entries 251 to 386 of Annex III to Regulation (EC) No 1223/2009 that are not among the common
  * ones. Every figure here is written out by hand from the official export of 18 June 2026 (the
  * consolidated text of 18 May 2026 where the export is short), not read out of the tables.
  */
-const DYE = 'hair-dye-oxidative';
-const RINSE = 'hair-dye-non-oxidative';
-const LASH = 'brow-and-lash-dye';
 /** Regulation (EU) 2026/909: on the last of its days. */
 const LATER: Asked = { placed: '2027-01-01', available: '2028-07-01' };
 
-const HAIR = 'Hair colourants can cause severe allergic reactions.';
-const EYELASH = 'Eyelashes shall not be coloured if the consumer:';
-const NONE = '';
 
-function justOver(limit: string): string {
-  const [whole, part = ''] = limit.split('.');
-  return `${whole!}.${part.padEnd(6, '0')}1`;
-}
-
-const saidOf = (name: string, percent: string, asked: Asked): string[] => said(judge([{ name, percent }], asked));
-const wordsOf = (name: string, percent: string, asked: Asked): string =>
-  judge([{ name, percent }], asked)
-    .requiredWording.filter((one) => one.lang === 'en')
-    .map((one) => one.text)
-    .join(' ');
-
-/** Rule, substance, category, greatest share, the words its label bears, and what else is asked. */
-type Limit = readonly [string, string, string, string, string, Asked?];
 const LIMITS: readonly Limit[] = [
   ['251', 'HC Red No. 7', RINSE, '1', HAIR],
   ['252/a', '2-Amino-6-Chloro-4-Nitrophenol', DYE, '2', HAIR],
@@ -132,14 +113,7 @@ const LIMITS: readonly Limit[] = [
 ];
 
 describe('exactly the maximum is allowed, the least bit more is not', () => {
-  const cases = LIMITS.map(([rule, name, category, limit, words, more]) => ({ rule, name, category, limit, words, asked: { category, ...more } }));
-  test.each(cases)('III/$rule $name in $category: $limit %', ({ rule, name, limit, words, asked }) => {
-    expect(saidOf(name, limit, asked)).toEqual([]);
-    expect(saidOf(name, justOver(limit), asked)).toEqual([`limit-exceeded ${name} eu/annex-iii/${rule}`]);
-    const printed = wordsOf(name, limit, asked);
-    if (words === NONE) expect(printed).toBe('');
-    else expect(printed).toContain(words);
-  });
+  tryLimits(LIMITS);
 });
 
 describe('a limit on another basis', () => {
@@ -166,7 +140,7 @@ describe('a limit on another basis', () => {
 });
 
 describe('what an entry names together counts together', () => {
-  test.each<[string, string, string, string, Asked]>([
+  tryTogether([
     ['280/a', 'Picramic Acid', 'Sodium Picramate', '0.3', { category: DYE }],
     ['283/b', '5-Amino-6-Chloro-o-Cresol', '5-Amino-6-Chloro-o-Cresol HCl', '0.25', { category: RINSE }],
     ['284/a', "2,2'-Methylenebis 4-Aminophenol HCl", "2,2'-Methylenebis 4-Aminophenol", '0.5', { category: DYE }],
@@ -174,15 +148,11 @@ describe('what an entry names together counts together', () => {
     ['308/b', 'Tagetes Minuta Flower Extract', 'Tagetes Patula Flower Oil', '0.05', { category: 'shampoo' }],
     ['320', 'Indigofera Tinctoria Leaf', 'Indigofera Tinctoria Leaf Extract', '12.5', { category: RINSE }],
     ['384', 'Hydroxypropyl-p-Phenylenediamine', 'Hydroxypropyl-p-Phenylenediamine HCl', '1', { category: DYE, ...LATER }],
-  ])('III/%s: %s and %s, %s %% of each', (rule, first, second, half, asked) => {
-    const pair = (share: string): Given[] => [{ name: first, percent: share }, { name: second, percent: half }];
-    expect(said(judge(pair(half), asked))).toEqual([]);
-    expect(said(judge(pair(justOver(half)), asked), 'limit-exceeded')).toEqual([`limit-exceeded ${first} eu/annex-iii/${rule}`]);
-  });
+  ]);
 });
 
 describe('a field of use that the entry does not open', () => {
-  test.each<[string, string, string]>([
+  tryClosedUses([
     ['HC Red No. 7', DYE, '251'],
     ['HC Yellow No. 4', 'shampoo', '253'],
     ['Acid Red 33', DYE, '254'],
@@ -210,19 +180,13 @@ describe('a field of use that the entry does not open', () => {
     ['Acid Orange 7', DYE, '318'],
     ['Indigofera Tinctoria Leaf', DYE, '320'],
     ['Acid Yellow 3', DYE, '326'],
-  ])('%s in %s', (name, category, rule) => {
-    expect(saidOf(name, '0.0001', { category })).toEqual([`not-for-this-use ${name} eu/annex-iii/${rule}`]);
-  });
+  ]);
 
   test('lash dye is for professionals alone', () => {
     expect(saidOf('p-Aminophenol', '0.1', { category: LASH, flags: { professionalUseOnly: false } })).toEqual(['not-for-this-use p-Aminophenol eu/annex-iii/272/a']);
   });
 
-  test('a dye that Annex IV lists too stays a colourant elsewhere', () => {
-    for (const name of ['CI 17200', 'CI 45410', 'CI 61570', 'CI 20470', 'CI 15850', 'CI 15510', 'CI 47005']) {
-      expect(said(judge([{ name, percent: '0.1', purpose: 'colourant' }], { category: 'body-wash' })), name).toEqual([]);
-    }
-  });
+  tryColourants(['CI 17200', 'CI 45410', 'CI 61570', 'CI 20470', 'CI 15850', 'CI 15510', 'CI 47005']);
 
   test('indigo leaf in a cream is not judged by the entry on hair dyes', () => {
     expect(saidOf('Indigofera Tinctoria Extract', '30', { category: 'face-cream' })).toEqual([]);
@@ -289,7 +253,7 @@ describe('days', () => {
 });
 
 test('what cannot be computed is listed as not checked', () => {
-  const words = (name: string, category: string, more: Asked = {}): string => judge([{ name, percent: '0.0001' }], { category, ...more }).notChecked.map((one) => one.words).join(' ');
+  const words = (name: string, category: string, more: Asked = {}): string => notCheckedOf(name, { category, ...more });
   expect(words('HC Red No. 7', RINSE)).toContain('50 micrograms per kilogram');
   expect(words('HC Yellow No. 2', DYE)).toContain('mixing ratio');
   expect(words('p-Aminophenol', LASH)).toContain('mixing ratio');
@@ -309,8 +273,6 @@ test('fragrance allergens of entries 327 to 371 are named, not limited: pinene a
 });
 
 test('every entry from 251 to 386 is a row or a fragrance allergen; entry 311 has moved to Annex II', () => {
-  const held = new Set([...law.rows.filter((row) => row.citation.includes(', Annex III, ')).map((row) => row.entry), ...law.allergenGroups.map((group) => group.entry)]);
-  const missing = Array.from({ length: 386 - 251 + 1 }, (_, index) => String(251 + index)).filter((entry) => !held.has(entry));
-  expect(missing).toEqual(['311']);
+  expect(missingEntries(251, 386)).toEqual(['311']);
   expect(law.rowsFor({ name: 'Trimethylbenzoyl Diphenylphosphine Oxide', cas: [] }).map((hit) => hit.row.id)).toEqual(['eu/annex-ii/1731']);
 });

@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { judge, said, type Asked, type Given } from '../shared/rules/judging.ts';
+import { notCheckedOf, saidOf } from './annex-iii-cases.ts';
 
 /**
  * The entries of Annex III to Regulation (EC) No 1223/2009 that makers meet most, as read against
@@ -8,13 +9,11 @@ import { judge, said, type Asked, type Given } from '../shared/rules/judging.ts'
 const LATER: Asked = { placed: '2027-01-01', available: '2028-07-01' };
 
 const one = (name: string, percent: string): Given[] => [{ name, percent }];
-const saidOf = (name: string, percent: string, asked: Asked): string[] => said(judge(one(name, percent), asked));
 const wordsOf = (given: readonly Given[], asked: Asked): string =>
   judge(given, asked)
     .requiredWording.filter((text) => text.lang === 'en')
     .map((text) => text.text)
     .join(' | ');
-const notChecked = (name: string, asked: Asked): string => judge(one(name, '0.0001'), asked).notChecked.map((item) => item.words).join(' ');
 
 describe('thioglycolates', () => {
   const pH: Asked = { category: 'hair-lotion', facts: { pH: '8' } };
@@ -65,7 +64,7 @@ describe('hydrogen peroxide', () => {
   });
 
   test('a tooth whitener states its share', () => {
-    expect(notChecked('Hydrogen Peroxide', { category: 'tooth-whitening' })).toContain('share of hydrogen peroxide in percent');
+    expect(notCheckedOf('Hydrogen Peroxide', { category: 'tooth-whitening' })).toContain('share of hydrogen peroxide in percent');
   });
 });
 
@@ -99,7 +98,7 @@ test('quinine salts count as quinine', () => {
 describe('resorcinol', () => {
   test('in an oxidative dye it bears its own words after those of all hair dyes', () => {
     expect(wordsOf(one('Resorcinol', '1.25'), { category: 'hair-dye-oxidative' })).toMatch(/^Hair colourants can cause .* Contains resorcinol\. Rinse hair well after application\. Rinse eyes immediately if product comes into contact with them\. Do not use to dye eyelashes\.$/s);
-    expect(notChecked('Resorcinol', { category: 'hair-dye-oxidative' })).toContain('mixing ratio');
+    expect(notCheckedOf('Resorcinol', { category: 'hair-dye-oxidative' })).toContain('mixing ratio');
   });
 
   test('in a lash dye its name stands after the professional use', () => {
@@ -182,10 +181,10 @@ describe('fragrance substances in pressurised packs', () => {
 });
 
 test('conditions of the whole entry are listed for each of its letters', () => {
-  expect(notChecked('Alpha-Arbutin', { category: 'face-cream' })).toContain('Hydroquinone');
-  expect(notChecked('Alpha-Arbutin', { category: 'body-lotion' })).toContain('Hydroquinone');
+  expect(notCheckedOf('Alpha-Arbutin', { category: 'face-cream' })).toContain('Hydroquinone');
+  expect(notCheckedOf('Alpha-Arbutin', { category: 'body-lotion' })).toContain('Hydroquinone');
   for (const category of ['eau-de-toilette', 'deodorant-stick', 'foundation', 'face-cream', 'body-wash']) {
-    expect(notChecked('Vetiveryl Acetate', { category, ...LATER }), category).toContain('alpha-tocopherol');
+    expect(notCheckedOf('Vetiveryl Acetate', { category, ...LATER }), category).toContain('alpha-tocopherol');
   }
   expect(judge([{ name: 'Benzalkonium Chloride', percent: '1', purpose: 'other' }], { category: 'shampoo' }).notChecked.map((item) => item.words).join(' ')).toContain('C14 or less');
   expect(judge([{ name: 'Triclocarban', percent: '1', purpose: 'other' }], { category: 'body-wash' }).notChecked.map((item) => item.words).join(' ')).toContain('tetrachloroazobenzene');

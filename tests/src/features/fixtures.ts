@@ -1,5 +1,5 @@
 import type { FormulaLine, ProductDraft } from '#shared/contracts/product-draft.ts';
-import type { Product } from '#shared/contracts/products.contract.ts';
+import type { Product, ProductSummary } from '#shared/contracts/products.contract.ts';
 
 /** Material ids of the fixtures, readable. */
 export const uuid = (n: number): string => `00000000-0000-4000-8000-${String(n).padStart(12, '0')}`;
@@ -29,4 +29,8 @@ export function makeDraft(over: Partial<ProductDraft> = {}): ProductDraft {
 }
 export function makeProduct(draft = makeDraft(), version = 7): Product {
   return { id: uuid(90), version, savedAt: '2026-12-01T09:14:00.000Z', savedBy: 'Ida Fenn', archived: false, draft };
+}
+/** A row of the product list. */
+export function makeSummary(n: number, name: string, counts: ProductSummary['counts'], more: Partial<ProductSummary> = {}): ProductSummary {
+  return { id: uuid(n), version: 1, name, brand: 'Brackenmere', category: 'body-wash', markets: ['EU'], netContent: '250 ml', savedAt: '2026-12-01T09:00:00.000Z', savedBy: 'Ines Tarrow', archived: false, counts, headline: '', ...more };
 }

@@ -3,15 +3,16 @@ import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, beforeEach, expect, test, vi } from 'vitest';
 import { listCategories } from '#shared/contracts/law.contract.ts';
-import { createProduct, listProducts, type ProductSummary } from '#shared/contracts/products.contract.ts';
+import { createProduct, listProducts } from '#shared/contracts/products.contract.ts';
 import { FakeServer, Refusal, signedIn } from '#tests/support/fake-server.ts';
 import { openRoom } from '#tests/support/open-room.tsx';
-import { uuid } from '../fixtures.ts';
+import { makeSummary } from '../fixtures.ts';
 
-const row = (n: number, name: string, counts: ProductSummary['counts'], markets: ProductSummary['markets'] = ['EU']): ProductSummary => ({
-  id: uuid(n), version: 1, name, brand: 'Brackenmere', category: 'body-wash', markets, netContent: '250 ml', savedAt: '2026-12-01T09:00:00.000Z', savedBy: 'Ines Tarrow', archived: false, counts, headline: counts.stop ? 'Bring Phenoxyethanol to 1 % or less.' : '',
-});
-const SHELF = [row(1, 'Sluice Wash', { stop: 0, decide: 2, note: 1 }), row(2, 'Heron Lotion', { stop: 1, decide: 0, note: 0 }, ['EU', 'US']), row(3, 'Reed Balm', { stop: 0, decide: 0, note: 0 })];
+const SHELF = [
+  makeSummary(1, 'Sluice Wash', { stop: 0, decide: 2, note: 1 }),
+  makeSummary(2, 'Heron Lotion', { stop: 1, decide: 0, note: 0 }, { markets: ['EU', 'US'], headline: 'Bring Phenoxyethanol to 1 % or less.' }),
+  makeSummary(3, 'Reed Balm', { stop: 0, decide: 0, note: 0 }),
+];
 
 let server: FakeServer;
 beforeEach(() => {

@@ -10,16 +10,12 @@ import { getProductFront, listProducts, type ProductSummary } from '#shared/cont
 import { FakeServer, Refusal, signedIn } from '#tests/support/fake-server.ts';
 import { openRoom } from '#tests/support/open-room.tsx';
 import { bodyWash } from '#tests/shared/artwork/samples.ts';
-import { uuid } from '../fixtures.ts';
-
-const row = (n: number, name: string, counts: ProductSummary['counts'], headline = ''): ProductSummary => ({
-  id: uuid(n), version: 1, name, brand: 'Brackenmere', category: 'body-wash', markets: ['EU'], netContent: '250 ml', savedAt: '2026-12-01T09:00:00.000Z', savedBy: 'Ines Tarrow', archived: false, counts, headline,
-});
+import { makeSummary, uuid } from '../fixtures.ts';
 
 let server: FakeServer;
 let shelf: ProductSummary[];
 beforeEach(() => {
-  shelf = [row(1, 'Sluice Wash', { stop: 0, decide: 2, note: 1 }, 'Ask for narrower figures.'), row(2, 'Heron Lotion', { stop: 1, decide: 3, note: 0 }, 'Bring it to 1 %.'), row(3, 'Reed Balm', { stop: 0, decide: 0, note: 4 })];
+  shelf = [makeSummary(1, 'Sluice Wash', { stop: 0, decide: 2, note: 1 }, { headline: 'Ask for narrower figures.' }), makeSummary(2, 'Heron Lotion', { stop: 1, decide: 3, note: 0 }, { headline: 'Bring it to 1 %.' }), makeSummary(3, 'Reed Balm', { stop: 0, decide: 0, note: 4 })];
   server = signedIn(new FakeServer())
     .on(listMaterials, () => ({ items: [], total: 26, page: 1, pageSize: 50 }))
     .on(listProducts, () => ({ items: shelf, total: shelf.length, page: 1, pageSize: 50 }))
@@ -42,7 +38,7 @@ test('what stops sale stands before what needs a decision, each product once', a
 });
 
 test('a house that nothing holds up is told so, without a certificate', async () => {
-  shelf = [row(3, 'Reed Balm', { stop: 0, decide: 0, note: 4 })];
+  shelf = [makeSummary(3, 'Reed Balm', { stop: 0, decide: 0, note: 4 })];
   openRoom('/');
   expect(await screen.findByText('No product of yours is held up by a rule that this data release holds.')).toBeTruthy();
 });
