@@ -1,3 +1,4 @@
+import type { ByHand } from '#shared/contracts/by-hand.ts';
 import type { Market } from '#shared/law/types.ts';
 
 /** Decimal millimetres as text, as the formula document writes them. */
@@ -37,5 +38,7 @@ export interface LabelInput {
   readonly barcode: BarcodeSettings | null;
   readonly template?: string | undefined;
   readonly ink?: string | undefined;
+  /** What a person changed on the template's setting. */
+  readonly byHand?: ByHand | undefined;
   readonly press?: { readonly standard?: 'PDF/X-1a:2003' | 'PDF/X-4' | undefined; readonly condition?: string | undefined } | undefined;
 }

@@ -78,6 +78,6 @@ export function labelOfDocument(document: FormulaDocument, result: LabelResult |
     countryOfOrigin: particulars?.countryOfOrigin ?? '',
     batchCode: particulars?.batchCode ?? '',
     barcode: label?.barcode ?? null,
-    template: label?.template, ink: label?.ink, press: label?.press,
+    template: label?.template, ink: label?.ink, byHand: label?.byHand, press: label?.press,
   };
 }

@@ -5,6 +5,7 @@ import { readContainer, type Sheet } from './container.ts';
 import { USUAL_OVERLAP_MM } from './containers.ts';
 import { contentOf, textsOf } from './content.ts';
 import { fitLabel } from './fit.ts';
+import { applyHand, isByHand, leanFor } from './hand/apply-hand.ts';
 import { heightAt, minimumsFor, sizeForHeight } from './heights.ts';
 import { BLACK, DIE_LINE, paletteOf } from './inks.ts';
 import type { LabelInput } from './label-input.ts';
@@ -17,6 +18,8 @@ import { strongWeight, type Job, type TemplateName } from './setting.ts';
 export interface Layout {
   /** `null` only where the measures themselves cannot be read. */
   readonly scene: Scene | null;
+  /** The scene before it is bent onto a cone, on which things are moved by hand; else the scene itself. */
+  readonly straight: Scene | null;
   /** Empty when everything has its place. */
   readonly misfits: readonly Misfit[];
   readonly checks: readonly Check[];
@@ -43,7 +46,7 @@ export function templatesFor(shape: LabelInput['container']['shape']): typeof TE
 }
 
 const READING_ORDER: readonly ElementName[] = [
-  'ground', 'rule', 'brand', 'name', 'function', 'claim', 'net content', 'directions', 'warnings', 'ingredients', 'responsible person', 'batch', 'durability', 'barcode',
+  'ground', 'rule', 'drawing', 'brand', 'name', 'function', 'claim', 'own text', 'net content', 'directions', 'warnings', 'ingredients', 'responsible person', 'batch', 'durability', 'barcode', 'code',
 ];
 
 /** Paint order is reading order: grounds first, then texts as the law lists them. Stable, so lines keep theirs. */
@@ -122,9 +125,9 @@ function legendOf(input: LabelInput, sheet: Sheet, bleed: Micrometres): string {
  */
 export function layOutLabel(input: LabelInput, metrics: FontMetrics): Layout {
   const sheet = readContainer(input.container);
-  if ('faults' in sheet) return { scene: null, checks: [], misfits: sheet.faults.map((fault) => ({ element: 'container', missing: 0, direction: 'measure', message: fault.message })) };
+  if ('faults' in sheet) return { scene: null, straight: null, checks: [], misfits: sheet.faults.map((fault) => ({ element: 'container', missing: 0, direction: 'measure', message: fault.message })) };
   const bleed = input.bleedMm === undefined ? 3000 : readMillimetres(input.bleedMm);
-  if (bleed === null || bleed < 0 || bleed > 20_000) return { scene: null, checks: [], misfits: [{ element: 'container', missing: 0, direction: 'measure', message: 'The bleed lies between 0 and 20 mm.' }] };
+  if (bleed === null || bleed < 0 || bleed > 20_000) return { scene: null, straight: null, checks: [], misfits: [{ element: 'container', missing: 0, direction: 'measure', message: 'The bleed lies between 0 and 20 mm.' }] };
   const lacking = missingCharacters(input, metrics);
   const drawn = jobOf(input, sheet, metrics);
   let job = drawn;
@@ -136,6 +139,10 @@ export function layOutLabel(input: LabelInput, metrics: FontMetrics): Layout {
       if (again.overflows.length === 0) [job, fitted] = [leaner, again];
     }
   }
+  const byHand = isByHand(input.byHand) ? input.byHand : null;
+  // What was set free no longer needs its place in the template, where that helps.
+  if (byHand && fitted.overflows.length > 0) fitted = fitLabel(leanFor(job, byHand));
+  const set = byHand ? applyHand(job, fitted.setting, fitted, byHand) : { items: fitted.items, misfits: fitted.overflows.map(misfitOf) };
   const palette = paletteOf(input.ink);
   const full: Box = { x: -bleed, y: -bleed, width: sheet.width + 2 * bleed, height: sheet.height + 2 * bleed };
   const edge = sheet.shape === 'cylinder' ? Math.max(2000, sheet.overlap + 3000) : 2000;
@@ -144,13 +151,13 @@ export function layOutLabel(input: LabelInput, metrics: FontMetrics): Layout {
     safe: { x: edge, y: 2000, width: sheet.width - 2 * edge, height: sheet.height - 4000 },
     panels: fitted.panels,
     inks: { black: BLACK, ink: palette.ink, tint: palette.tint, light: palette.light },
-    items: inReadingOrder(fitted.items).map((item) => cutToBleed(item, full)),
+    items: inReadingOrder(set.items).map((item) => cutToBleed(item, full)),
     dieLine: { ink: DIE_LINE, stroke: 250, steps: [['M', 0, 0], ['L', sheet.width, 0], ['L', sheet.width, sheet.height], ['L', 0, sheet.height], ['Z']] },
     legend: legendOf(input, sheet, bleed), template: job.template,
   };
   const bent = sheet.taper ? bendScene(scene, sheet.taper, metrics) : { scene, overflows: [] };
-  const misfits = [...lacking, ...[...fitted.overflows, ...bent.overflows].map(misfitOf)];
-  return { scene: bent.scene, misfits, checks: checkLabel({ input, job, scene, setting: fitted.setting, misfits }) };
+  const misfits = [...lacking, ...set.misfits, ...bent.overflows.map(misfitOf)];
+  return { scene: bent.scene, straight: scene, misfits, checks: checkLabel({ input, job, scene, setting: fitted.setting, misfits }) };
 }
 
 /** For people: the height of a share of an em, in millimetres cut to two decimals. */

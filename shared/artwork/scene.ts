@@ -35,13 +35,17 @@ export type PathStep =
 /** What an item is for: used by checks, misfits and the studio's inspector. */
 export type ElementName =
   | 'ground' | 'brand' | 'name' | 'function' | 'claim' | 'net content' | 'directions' | 'warnings' | 'ingredients'
-  | 'responsible person' | 'batch' | 'durability' | 'barcode' | 'rule';
+  | 'responsible person' | 'batch' | 'durability' | 'barcode' | 'rule'
+  /** The house's own: words, drawings, a code that leads to an address. */
+  | 'own text' | 'drawing' | 'code';
 
 interface Common {
   readonly element: ElementName;
   /** Key into `Scene.inks`. */
   readonly ink: string;
   readonly clip?: Box;
+  /** Which thing of the house's own it belongs to. */
+  readonly own?: string;
 }
 export interface Boxes extends Common {
   readonly kind: 'boxes';

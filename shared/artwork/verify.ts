@@ -9,7 +9,7 @@ const DESCENT = 210;
 
 /** Box around an item's ink, or `null` for grounds and rules, which may run off. */
 export function inkBox(item: Item, job: Pick<Job, 'metrics'>): Box | null {
-  if (item.element === 'ground' || item.element === 'rule') return null;
+  if (item.element === 'ground' || item.element === 'rule' || item.element === 'drawing') return null;
   return shapeBox(item, job);
 }
 

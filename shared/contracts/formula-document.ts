@@ -1,3 +1,4 @@
+import type { ByHand } from './by-hand.ts';
 import { z } from './zod.ts';
 import type { Market, ProductFlag, Purpose } from '#shared/law/types.ts';
 
@@ -101,6 +102,7 @@ export interface DocumentLabel {
   readonly press?: { readonly standard?: 'PDF/X-1a:2003' | 'PDF/X-4'; readonly condition?: string };
   readonly template?: string;
   readonly ink?: string;
+  readonly byHand?: ByHand;
 }
 
 /** One fault of an input: where it stands and what is wrong, in a maker's words. */

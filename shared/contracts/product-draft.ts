@@ -1,4 +1,5 @@
 import { z } from './zod.ts';
+import { byHand } from './by-hand.ts';
 import { amountField, dateField, idField, langField, marketField, nameField, textField } from './fields.ts';
 
 /** A product as its house edits it: everything but the materials, which are referred to by id. */
@@ -48,6 +49,7 @@ export const labelSettings = z.strictObject({
   /** Template of shared/artwork. */
   template: z.string().max(40),
   ink: z.string().max(40),
+  byHand: byHand.optional(),
 });
 
 export const productDraft = z.strictObject({

@@ -1,5 +1,6 @@
 import { MARKETS } from '#shared/law/types.ts';
 import { isAbsent, show, type DocumentWalk } from './document-walk.ts';
+import { readByHand } from './read-by-hand.ts';
 import type { DocumentContainer, DocumentLabel } from './formula-document.ts';
 
 const LENGTHS = { EAN: 13, UPC: 12 };
@@ -20,6 +21,7 @@ export function readLabel(walk: DocumentWalk, value: unknown): DocumentLabel | u
   const condition = press && walk.text(press['condition'], '/label/press/condition', { most: 200 });
   const template = walk.text(label['template'], '/label/template', { most: 80 });
   const ink = walk.text(label['ink'], '/label/ink', { most: 80 });
+  const byHand = readByHand(walk, label['byHand']);
   return {
     ...(container && { container }),
     ...(bleedMm !== undefined && { bleedMm }),
@@ -29,6 +31,7 @@ export function readLabel(walk: DocumentWalk, value: unknown): DocumentLabel | u
     ...(press && { press: { ...(standard && { standard }), ...(condition !== undefined && { condition }) } }),
     ...(template !== undefined && { template }),
     ...(ink !== undefined && { ink }),
+    ...(byHand && { byHand }),
   };
 }
 

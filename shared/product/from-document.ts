@@ -59,6 +59,7 @@ export function fromFormulaDocument(document: FormulaDocument, { blank, material
       press: { standard: label?.press?.standard ?? blank.label.press.standard, condition: label?.press?.condition ?? blank.label.press.condition },
       ...(label?.template !== undefined && { template: label.template }),
       ...(label?.ink !== undefined && { ink: label.ink }),
+      ...(label?.byHand && { byHand: label.byHand }),
     },
   };
 }

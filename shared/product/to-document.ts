@@ -150,8 +150,8 @@ function toParticulars(own: ProductDraft['particulars'], house: HouseDefaults | 
 }
 
 function toLabel(label: ProductDraft['label']): DocumentLabel {
-  const { container, bleedMm, languages, market, barcode, press, template, ink } = label;
-  return { container, bleedMm, languages, market, press, template, ink, ...(barcode && barcode.digits !== '' && { barcode }) };
+  const { container, bleedMm, languages, market, barcode, press, template, ink, byHand } = label;
+  return { container, bleedMm, languages, market, press, template, ink, ...(byHand && { byHand }), ...(barcode && barcode.digits !== '' && { barcode }) };
 }
 
 /** A formula document in the form in which it is exchanged: what the reader reads back to the same document. */
