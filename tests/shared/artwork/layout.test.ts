@@ -114,7 +114,7 @@ test('letters that the type lacks are reported, letters with accents are set', (
 
 test('impossible measures are said and nothing is laid out', () => {
   expect(lay({ ...bodyWash, container: wrap('0', '90') })).toEqual({
-    scene: null, checks: [], misfits: [{ element: 'container', missing: 0, direction: 'measure', message: 'The diameter is 0 mm. Labels are set from 10 to 400 mm.' }],
+    scene: null, straight: null, checks: [], misfits: [{ element: 'container', missing: 0, direction: 'measure', message: 'The diameter is 0 mm. Labels are set from 10 to 400 mm.' }],
   });
 });
 
