@@ -1,6 +1,7 @@
 import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { Dictionary } from '#shared/dictionary/types.ts';
 import { foldName } from '#shared/law/fold.ts';
+import type { LawBook } from '#shared/law/law-book.ts';
 import type { AllergenGroup, Category, Market } from '#shared/law/types.ts';
 import { larger, smaller, ZERO, compare } from '#shared/kernel/rational.ts';
 import type { AllergenVerdict } from './allergens.ts';
@@ -18,6 +19,7 @@ export interface DeclareInput {
   readonly document: FormulaDocument;
   readonly blend: Blend;
   readonly dictionary: Dictionary;
+  readonly lawBook: LawBook;
   readonly market: Market;
   readonly category: Category;
   readonly allergens: readonly AllergenVerdict[];
@@ -72,8 +74,8 @@ export function declare(input: DeclareInput): { declaration: Declaration; ambigu
   };
 }
 
-function draftEntries({ blend, market, document, category, allergens }: DeclareInput, law: ListLaw, ambiguities: Ambiguity[]): Iterable<Draft> {
-  const names = namesFor(blend.plan, { market, joined: document.declaration?.joinedNames ?? false, areHairColours: category.tags.includes('hair-dye') });
+function draftEntries({ blend, market, document, category, allergens, lawBook }: DeclareInput, law: ListLaw, ambiguities: Ambiguity[]): Iterable<Draft> {
+  const names = namesFor(blend.plan, lawBook, { market, joined: document.declaration?.joinedNames ?? false, areHairColours: category.tags.includes('hair-dye') });
   const groupOf = law.usesGroupNames ? prescribedGroups(allergens) : NO_GROUPS;
   const byName = new Map<string, Draft>();
   const { substances } = blend;
@@ -110,14 +112,14 @@ type PlannedName = PrintedName & { readonly isColourant: boolean };
 const planned = new WeakMap<MixingPlan, Map<string, readonly PlannedName[]>>();
 
 /** The printed names of all substances, remembered with the plan: they do not depend on amounts. */
-function namesFor(plan: MixingPlan, { market, joined, areHairColours }: NameChoice): readonly PlannedName[] {
+function namesFor(plan: MixingPlan, law: LawBook, { market, joined, areHairColours }: NameChoice): readonly PlannedName[] {
   let known = planned.get(plan);
   if (!known) planned.set(plan, (known = new Map()));
   const id = `${market} ${joined} ${areHairColours}`;
   let found = known.get(id);
   if (!found) {
     found = plan.substances.map((substance) => ({
-      ...printedName(naming(substance), market, joined),
+      ...printedName(naming(substance, law), market, joined),
       isColourant: !areHairColours && isColourant(ingredientPurposes(substance), substance.first, hasPlainUse(substance)),
     }));
     known.set(id, found);
@@ -125,10 +127,11 @@ function namesFor(plan: MixingPlan, { market, joined, areHairColours }: NameChoi
   return found;
 }
 
-function naming(substance: PlannedSubstance): { inci: string; written: string; isNano: boolean; entry?: NonNullable<PlannedSubstance['first']['entry']>; usName?: string } {
+function naming(substance: PlannedSubstance, law: LawBook): Parameters<typeof printedName>[0] {
   const { inci, written, entry } = substance.first;
   const usName = usNameOf(substance);
-  return { inci, written, isNano: substance.nano, ...(entry && { entry }), ...(usName !== undefined && { usName }) };
+  const canada = entry?.names.ca === undefined ? undefined : law.canadianName(written);
+  return { inci, written, isNano: substance.nano, ...(entry && { entry }), ...(usName !== undefined && { usName }), ...(canada && { canada }) };
 }
 
 /** A US colour name given with any of the materials. */

@@ -16,6 +16,8 @@ export interface Named {
   readonly entry?: DictionaryEntry;
   readonly isNano: boolean;
   readonly usName?: string;
+  /** The row of Canada's schedule that the name as written stands in. */
+  readonly canada?: { readonly inci: string; readonly fr: string };
 }
 
 /** The printed name of an ingredient in a market; the shortest lawful form unless joined names are chosen. */
@@ -43,11 +45,11 @@ function usName({ inci, written, entry, usName: given }: Named, joinedNames: boo
   return { name: joins ? `${us} (${inci})` : us, why: joins ? 'The English name first, the INCI name in brackets.' : 'The name that US consumers know it by.' };
 }
 
-function canadianName({ inci, entry }: Named, joinedNames: boolean): PrintedName {
+function canadianName({ inci, entry, canada }: Named, joinedNames: boolean): PrintedName {
   const own = entry?.names.ca ?? inci;
-  const french = entry?.names.fr;
+  const french = canada?.fr ?? entry?.names.fr;
   if (joinedNames && french !== undefined) {
-    const names = [own, entry?.names.us, french].filter((name, index, all) => name !== undefined && all.indexOf(name) === index);
+    const names = [own, canada?.inci ?? entry?.names.us, french].filter((name, index, all) => name !== undefined && all.indexOf(name) === index);
     return { name: names.join('/'), why: 'The three-part form of the schedule to the Cosmetic Regulations.' };
   }
   return { name: own, why: entry ? 'The INCI name; for items of the schedule its EU name.' : 'The name as written: the dictionary does not know it.' };

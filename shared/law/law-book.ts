@@ -1,8 +1,9 @@
 import { DomainError } from '#shared/kernel/errors.ts';
 import { plainDate, type PlainDate } from '#shared/kernel/plain-date.ts';
 import { readAllergens, readDates, readRows } from './read-rows.ts';
+import { foldName } from './fold.ts';
 import { RowIndex, type Named, type RowHit } from './row-index.ts';
-import type { FormaldehydeJson, InstrumentJson, LawTables, ProductWarningJson, UsColourJson, WordingJson } from './tables.types.ts';
+import type { DutyJson, FormaldehydeJson, InstrumentJson, LawTables, ProductConditionJson, ProductWarningJson, ScheduleNameJson, UsColourJson, WordingJson } from './tables.types.ts';
 import type { AllergenGroup, Category, Dates, LawRow, Market, Member, Sourcing } from './types.ts';
 
 /** One step of the law calendar. */
@@ -30,6 +31,9 @@ export interface WordingText {
 
 export type ProductWarning = Omit<ProductWarningJson, 'from' | 'until'> & { readonly from?: Dates; readonly until?: Dates };
 
+/** A duty that nothing entered decides. */
+export type Duty = Omit<DutyJson, 'from'> & { readonly from?: Dates };
+
 /** The law tables, checked and indexed. */
 export interface LawBook {
   /** Of the tables: `2026-12`. */
@@ -46,6 +50,10 @@ export interface LawBook {
   readonly warnings: readonly ProductWarning[];
   readonly usColours: readonly UsColourJson[];
   readonly formaldehyde: FormaldehydeJson;
+  readonly duties: readonly Duty[];
+  readonly productConditions: readonly ProductConditionJson[];
+  /** The row of Canada's schedule that bears this INCI or French name: one EU name may have several. */
+  canadianName(written: string): ScheduleNameJson | undefined;
   /** Rows of every list and market that speak of a substance, by name first, then by CAS number. */
   rowsFor(substance: Named): readonly RowHit[];
   /** The releaser of formaldehyde that a substance is, with its factor to formaldehyde. */
@@ -77,6 +85,7 @@ export function openLawBook(tables: LawTables): LawBook {
   const releasers = new RowIndex([asRow({ id: 'formaldehyde', entry: '', citation: '', label: '', prescribesName: false, members: tables.formaldehyde.members, markets: [], leaveOn: '0', rinseOff: '0' })]);
   checkRows(rows, instruments, wordings);
   const changes = readChanges(tables, rows);
+  const canadianNames = indexSchedule(tables.canadianNames.names);
   const coveredFrom = plainDate(tables.release.coveredFrom);
 
   return {
@@ -92,6 +101,9 @@ export function openLawBook(tables: LawTables): LawBook {
     warnings: tables.warnings.map(readWarning),
     usColours: tables.usColours,
     formaldehyde: tables.formaldehyde,
+    duties: tables.duties.map(readDuty),
+    productConditions: tables.productConditions,
+    canadianName: (written) => canadianNames.get(foldName(written)),
     rowsFor: (substance) => index.find(substance),
     releaserFor: (substance) => releasers.find(substance)[0]?.member,
     row(id) {
@@ -146,6 +158,23 @@ function readWarning(json: ProductWarningJson): ProductWarning {
   const begins = readDates(from, json.id);
   const ends = readDates(until, json.id);
   return { ...rest, ...(begins ? { from: begins } : {}), ...(ends ? { until: ends } : {}) };
+}
+
+function readDuty(json: DutyJson): Duty {
+  const { from, ...rest } = json;
+  const begins = readDates(from, json.id);
+  return { ...rest, ...(begins ? { from: begins } : {}) };
+}
+
+function indexSchedule(names: readonly ScheduleNameJson[]): ReadonlyMap<string, ScheduleNameJson> {
+  const index = new Map<string, ScheduleNameJson>();
+  for (const key of ['inci', 'fr'] as const) {
+    for (const one of names) {
+      const folded = foldName(one[key]);
+      if (folded && !index.has(folded)) index.set(folded, one);
+    }
+  }
+  return index;
 }
 
 function readChanges(tables: LawTables, rows: readonly LawRow[]): LawChange[] {

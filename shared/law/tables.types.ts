@@ -107,6 +107,50 @@ export interface ProductWarningJson {
   readonly from?: DatesJson;
   readonly until?: DatesJson;
   readonly reading?: string;
+  /** Silent, instead of asking, where its condition cannot be answered: another warning asks for the same fact. */
+  readonly onlyWhenKnown?: boolean;
+}
+
+/** A condition on the product as a whole, whatever its substances. */
+export interface ProductConditionJson {
+  readonly id: string;
+  readonly instrument: string;
+  readonly market: Market;
+  readonly citation: string;
+  readonly sourcing: Sourcing;
+  readonly subject: string;
+  readonly where: Condition;
+  /** What must hold. */
+  readonly requires: Condition;
+  readonly words: string;
+  readonly remedy: string;
+}
+
+/** A duty of a market that nothing entered decides, and why. */
+export interface DutyJson {
+  readonly id: string;
+  readonly market: Market;
+  readonly instrument: string;
+  readonly citation: string;
+  readonly sourcing: Sourcing;
+  readonly subject: string;
+  /** The duty in our own words. */
+  readonly says: string;
+  /** Why it is not computed here. */
+  readonly because: string;
+  /** For which products; absent: all. */
+  readonly where?: Condition;
+  readonly from?: DatesJson;
+  /** Told in the report's list of what was not checked; the others are kept for the record. */
+  readonly onReport?: boolean;
+}
+
+/** A row of Canada's schedule of names: the EU technical name, or the INCI name with its French equivalent, or all three. */
+export interface ScheduleNameJson {
+  readonly item: string;
+  readonly eu: string;
+  readonly inci: string;
+  readonly fr: string;
 }
 
 /** A change of law with its dates, as a calendar shows it. */
@@ -173,4 +217,7 @@ export interface LawTables {
   readonly changes: readonly ChangeJson[];
   readonly usColours: readonly UsColourJson[];
   readonly formaldehyde: FormaldehydeJson;
+  readonly duties: readonly DutyJson[];
+  readonly productConditions: readonly ProductConditionJson[];
+  readonly canadianNames: { readonly names: readonly ScheduleNameJson[] };
 }

@@ -10,9 +10,12 @@ import type { Context } from './context.ts';
 import { judgeParticulars } from './particulars/judge-particulars.ts';
 import { judgePositiveLists } from './positive-lists/use-not-listed.ts';
 import { judgeFormaldehyde, theoreticalFormaldehyde } from './preservatives/formaldehyde.ts';
+import { listDuties } from './duties/duties.ts';
 import { judgeIsothiazolinones } from './preservatives/isothiazolinones.ts';
+import { judgeProductConditions } from './products/product-conditions.ts';
 import { judgeMayContain } from './shades/may-contain.ts';
 import { gatherRows } from './substances/gather.ts';
+import { listNotRead } from './substances/not-read.ts';
 import { judgeRow } from './substances/judge-row.ts';
 import { judgeRows, presentSubstances } from './substances/judge-substances.ts';
 import type { NotChecked, Outcome } from './outcome.ts';
@@ -50,6 +53,7 @@ export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: Formul
     ...judgePositiveLists(context).filter((one) => !prohibited.has(one.subject)),
     ...judgeIsothiazolinones(context),
     ...judgeUsColours(context),
+    ...judgeProductConditions(context),
     ...judgeMayContain(context),
     ...judgeWordings(due, context),
     ...judgeParticulars(context),
@@ -57,7 +61,7 @@ export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: Formul
     ...judgeUpcoming(rows, outcomes, context),
     ...presentUpcomingWordings(formaldehydeNow, judgeFormaldehyde(later), context),
   ];
-  return { findings, requiredWording: presentWording(due, context), notChecked };
+  return { findings, requiredWording: presentWording(due, context), notChecked: [...notChecked, ...listNotRead(context), ...listDuties(context)] };
 }
 
 /** Colourants of other shades: their uses are judged, their amounts are not known. */

@@ -10,7 +10,7 @@ export function judgeProductWarnings(context: Context): DueWording[] {
     if (warning.market !== context.facts.market || !isInForce(warning, context.days)) continue;
     const needs = new Set<string>();
     const isDue = answer(warning.where, { facts: context.facts, needs });
-    if (isDue === false) continue;
+    if (isDue === false || (isDue === undefined && warning.onlyWhenKnown)) continue;
     due.push({
       wordingId: warning.wording,
       rule: warning.id,

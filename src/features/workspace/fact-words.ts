@@ -28,6 +28,10 @@ export const FACT_WORDS: Readonly<Record<string, FactWords>> = {
   benzoPyreneInMaterial: { label: 'Benzo[a]pyrene in the material', kind: 'figure', hint: 'in percent, from its certificate' },
   dmsoExtractOfMaterial: { label: 'DMSO extract of the material, IP 346', kind: 'figure', hint: 'in percent, from its certificate' },
   peanutProteinPpm: { label: 'Peanut protein in the oil', kind: 'figure', hint: 'in ppm, from its certificate' },
+  flameProjectionCm: { label: 'Flame projection of the aerosol', kind: 'figure', hint: 'in centimetres, 0 where there is none' },
+  flashback: { label: 'The flame runs back to the pack', kind: 'yes-no' },
+  packHolds5MlMethylAlcohol: { label: 'One pack holds 5 mL or more of methyl alcohol', kind: 'yes-no' },
+  packHoldsBromateLimit: { label: 'One pack holds 600 mg of sodium bromate or 50 mg of potassium bromate', kind: 'yes-no', hint: 'or more' },
   wheatPeptideKilodalton: { label: 'Average size of the wheat protein’s peptides', kind: 'figure', hint: 'in kilodalton, from its certificate' },
 };
 

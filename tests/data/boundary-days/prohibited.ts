@@ -84,7 +84,4 @@ export const PROHIBITED: readonly Boundary[] = [
   banned('EU', 'eu/annex-ii/1730', '4-Methylbenzylidene Camphor', { placed: '2025-05-01', available: '2026-05-01' }),
   // Footnote 13: not placed from 1 January 2027, not made available from 1 July 2028.
   banned('EU', 'eu/annex-ii/1767', 'Triphenyl Phosphate', { placed: '2027-01-01', available: '2028-07-01' }),
-  // Great Britain: the date of the first is from memory; the second binds from 15 July 2026, stock to the end of 14 January 2027.
-  banned('UK', 'uk/annex-ii/bmhca', 'Butylphenyl Methylpropional', { available: '2022-10-15' }),
-  banned('UK', 'uk/annex-ii/4-mbc', '4-Methylbenzylidene Camphor', { placed: '2026-07-15', available: '2027-01-15' }),
 ];

@@ -4,8 +4,7 @@ import type { Boundary } from './boundary.ts';
 /*
  * Every dated provision of Annex III to Regulation (EC) No 1223/2009. Days and limits are those of
  * the official export of 18 June 2026 and of the footnotes in the consolidated text of 18 May 2026,
- * typed out here, not read out of the tables; those of Great Britain are from the notes on its
- * instruments. Each substance is given at a share just above the limit that begins or ends.
+ * typed out here, not read out of the tables. Each substance is given at a share just above the limit that begins or ends.
  */
 type Dates = Pick<Boundary, 'placed' | 'available'>;
 type Line = readonly [rule: string, name: string, percent: string, category: string, more?: Partial<Boundary> & { readonly with?: Asked }];
@@ -154,25 +153,6 @@ const SILVER: readonly Line[] = [
   ['379', 'Silver', '0.01', 'face-cream', { ...silver('0.01'), ...forbidden }],
 ];
 
-/** SI 2025/413: in force 30 September 2025, stock to the end of 31 March 2026; the limits are those of the entry in the Union. */
-const METHYL_SALICYLATE: readonly Line[] = [
-  ['324/a', 'Methyl Salicylate', '0.0600001', 'face-cream'],
-  ['324/b', 'Methyl Salicylate', '0.0500001', 'foundation'],
-  ['324/c', 'Methyl Salicylate', '0.0020001', 'mascara'],
-  ['324/d', 'Methyl Salicylate', '0.0090001', 'hair-spray'],
-  ['324/e', 'Methyl Salicylate', '0.0030001', 'deodorant-spray'],
-  ['324/f', 'Methyl Salicylate', '0.0400001', 'body-lotion', { with: { flags: { spray: true } } }],
-  ['324/g', 'Methyl Salicylate', '0.0600001', 'body-wash'],
-  ['324/h', 'Methyl Salicylate', '0.6000001', 'hand-wash'],
-  ['324/i', 'Methyl Salicylate', '0.6000001', 'eau-de-toilette'],
-  ['324/j', 'Methyl Salicylate', '0.0300001', 'lipstick'],
-  ['324/k', 'Methyl Salicylate', '2.5200001', 'toothpaste'],
-  ['324/l', 'Methyl Salicylate', '0.1000001', 'mouthwash', { with: { facts: { fromAge: '7' } } }],
-  ['324/m', 'Methyl Salicylate', '0.6000001', 'mouthwash'],
-  ['324/n', 'Methyl Salicylate', '0.6500001', 'mouth-spray'],
-  ['324', 'Methyl Salicylate', '0.001', 'baby-lotion', forbidden],
-];
-
 export const RESTRICTED: readonly Boundary[] = [
   ...limits('EU', FOOTNOTE_46, ZINC),
   ...limits('EU', FOOTNOTE_46, [['24', 'Zinc Sulfate', '2.5', 'face-cream', { ends: true }]]),
@@ -195,13 +175,6 @@ export const RESTRICTED: readonly Boundary[] = [
     ['322/b', 'Dihydroxyacetone', '10.0000001', 'self-tan'],
     ['322', 'Dihydroxyacetone', '1', 'face-cream', forbidden],
   ]),
-  // SI 2023/836: stock of before 6 July 2024 may stay until 6 July 2026.
-  ...limits('UK', { placed: '2024-07-06', available: '2026-07-07' }, [
-    ['323/a', 'Methyl N-Methylanthranilate', '0.1000001', 'face-cream'],
-    ['323/b', 'Methyl N-Methylanthranilate', '0.2000001', 'body-wash'],
-    ['323/a', 'Methyl N-Methylanthranilate', '0.01', 'sunscreen-lotion', forbidden],
-  ], 'uk/annex-iii/'),
-  ...limits('UK', { placed: '2025-09-30', available: '2026-04-01' }, METHYL_SALICYLATE, 'uk/annex-iii/'),
   ...limits('EU', FOOTNOTE_34, [
     ['325/a', 'BHT', '0.0010001', 'mouthwash'],
     ['325/b', 'BHT', '0.1000001', 'toothpaste'],

@@ -17,7 +17,7 @@ test('a range is told with both ends', () => {
 
 test('what is second hand or from memory says so', () => {
   expect(judge([{ name: 'Phenoxyethanol', percent: '2' }], { market: 'UK' }).findings[0]!.sourcing).toBe('secondary');
-  expect(judge([{ name: 'Salicylic Acid', percent: '3' }], { market: 'CA' }).findings[0]!.sourcing).toBe('memory');
+  expect(judge([{ name: 'Methyl Salicylate', percent: '3' }], { market: 'CA' }).findings[0]!.sourcing).toBe('memory');
   expect(judge([{ name: 'Phenoxyethanol', percent: '2' }]).findings[0]!.sourcing).toBeUndefined();
 });
 

@@ -11,7 +11,8 @@ test.each<[string, Asked, string[]]>([
   ['a US self-tanner', { market: 'US', category: 'self-tan' }, ['us/740.19']],
   ['a US body wash', { market: 'US', category: 'body-wash' }, []],
   ['a Canadian oxidative hair dye', { market: 'CA', category: 'hair-dye-oxidative' }, ['ca/cr-22']],
-  ['a Canadian aerosol', { market: 'CA', category: 'hair-spray' }, ['ca/cr-25', 'ca/cr-25-other']],
+  ['a Canadian aerosol whose flame was not measured', { market: 'CA', category: 'hair-spray' }, ['ca/cr-25', 'ca/cr-25-other', 'ca/cr-26']],
+  ['a Canadian aerosol without a flame', { market: 'CA', category: 'hair-spray', facts: { flameProjectionCm: '0', flashback: false } }, ['ca/cr-25', 'ca/cr-25-other']],
   ['an EU bubble bath', { market: 'EU', category: 'bubble-bath' }, []],
 ])('%s', (_, asked, expected) => {
   expect(rules(asked)).toEqual(expected);
