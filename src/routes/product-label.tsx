@@ -27,7 +27,7 @@ export function Component() {
     <div className="wrap full">
       <LabelStudio
         draft={desk.draft} result={result} house={house} isLocked={isLabelLocked}
-        onChange={(label) => desk.change((draft) => ({ ...draft, label }), 'label')}
+        onChange={(label, join = 'label') => desk.change((draft) => ({ ...draft, label }), join)}
         onPressFile={fetchPressFile}
       />
       <p className="foot">Screen and press file are painted from one scene.</p>

@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useRef, useState, type KeyboardEvent, type ReactNode } from 'react';
 import type { Misfit } from '#shared/artwork/misfits.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import { inMillimetres } from '#shared/artwork/lengths.ts';
@@ -20,6 +20,11 @@ export interface LabelBoardProps {
   readonly pixelsPerMm: number;
   /** 1 is true size; 0 fits the board. */
   readonly zoom: number;
+  /** Laid over the label; `px` is the millimetres of one pixel. */
+  readonly over?: (px: number) => ReactNode;
+  readonly onKeyDown?: (event: KeyboardEvent) => void;
+  /** A press on nothing. */
+  readonly onEmptyPress?: () => void;
 }
 
 const PAD = 12;
@@ -40,7 +45,7 @@ function useWidth(): [React.RefObject<HTMLDivElement | null>, number] {
 }
 
 /** The label unrolled on the bench, with rulers, cut line, bleed, panels and rings. */
-export function LabelBoard({ scene, misfits, shown, pixelsPerMm, zoom }: LabelBoardProps) {
+export function LabelBoard({ scene, misfits, shown, pixelsPerMm, zoom, over, onKeyDown, onEmptyPress }: LabelBoardProps) {
   const [ref, width] = useWidth();
   const [W, H, bleed] = [scene.trim.width / 1000, scene.trim.height / 1000, scene.bleed / 1000];
   const need = W + 2 * bleed + 2 * PAD + RULER;
@@ -53,14 +58,16 @@ export function LabelBoard({ scene, misfits, shown, pixelsPerMm, zoom }: LabelBo
   const percent = Math.round((scale / pixelsPerMm) * 100);
   return (
     // The board scrolls sideways when the label is wider than the window: the keyboard must reach it.
-    // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
-    <div className="board" ref={ref} tabIndex={0} role="region" aria-label={`Label, unrolled, at ${percent} % of true size`}>
+    // While it is composed by hand, its keys move what is chosen.
+    // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex, jsx-a11y/no-noninteractive-element-interactions
+    <div className="board" ref={ref} tabIndex={0} role="region" aria-label={`Label, unrolled, at ${percent} % of true size`} onKeyDown={onKeyDown} onPointerDown={onEmptyPress}>
       <svg width={across * scale} height={down * scale} viewBox={`${left} ${top} ${across} ${down}`}>
         <LabelArt scene={scene} bleed={shown.bleed} />
         {shown.bleed ? <Bleed scene={scene} W={W} H={H} bleed={bleed} px={px} /> : null}
         {shown.panels ? <Panels scene={scene} px={px} bleed={bleed} /> : null}
         {shown.die ? <path d={pathData(scene.dieLine.steps)} fill="none" stroke={scene.dieLine.ink.screen} strokeWidth={Math.max(scene.dieLine.stroke / 1000, px)} /> : null}
         {shown.rings ? <Rings scene={scene} misfits={misfits} px={px} /> : null}
+        {over?.(px)}
         <Rulers left={left} top={top} across={across} down={down} px={px} H={H} />
       </svg>
     </div>

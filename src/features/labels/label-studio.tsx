@@ -13,6 +13,10 @@ import { CheckField } from '#src/ui/field.tsx';
 import { Panel, Sheet } from '#src/ui/sheet.tsx';
 import { sayDay } from '#src/lib/say.ts';
 import { BottleView } from './bottle-view.tsx';
+import { HandLayer } from './hand/hand-layer.tsx';
+import { HandPanel } from './hand/hand-panel.tsx';
+import { useHand } from './hand/use-hand.ts';
+import { handKeys } from './hand/use-hand-keys.ts';
 import { CalibrationDialog } from './calibration-dialog.tsx';
 import { useCalibration } from './calibration.ts';
 import { LabelBoard, type Shown } from './label-board.tsx';
@@ -26,7 +30,8 @@ export interface LabelStudioProps {
   readonly result: LabelResult | undefined;
   /** What the house prints where the product says nothing. */
   readonly house?: HouseDefaults | undefined;
-  readonly onChange: (label: LabelSettings) => void;
+  /** `join` names changes that are one step of the history. */
+  readonly onChange: (label: LabelSettings, join?: string) => void;
   /** Fetches the press file; its refusal is told in words here. */
   readonly onPressFile: () => Promise<void>;
   readonly isLocked?: boolean;
@@ -43,7 +48,11 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
   const [shown, setShown] = useState<Shown>({ die: true, bleed: true, panels: true, rings: true });
   const [isMeasuring, setIsMeasuring] = useState(false);
   const calibration = useCalibration();
-  const { scene, misfits, checks } = layout;
+  const { misfits, checks } = layout;
+  const [byHand, setByHand] = useState(false);
+  // Things are moved on the straight sheet; a cone bends them afterwards.
+  const scene = byHand ? layout.straight : layout.scene;
+  const hand = useHand({ label: draft.label, scene: layout.straight, onChange });
   const container = draft.label.container;
   return (
     <Sheet className="hung studio">
@@ -52,6 +61,7 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
           <div className="switch" role="group" aria-label="Scale">
             {ZOOMS.map(([value, word]) => <button key={value} type="button" aria-pressed={zoom === value} onClick={() => setZoom(value)}>{word}</button>)}
           </div>
+          <button type="button" className="btn small" aria-pressed={byHand} onClick={() => { setByHand(!byHand); hand.choose(null); }}>Compose by hand</button>
           {LAYERS.map(([key, word]) => <CheckField key={key} label={word} checked={shown[key]} onChange={() => setShown({ ...shown, [key]: !shown[key] })} />)}
           <span className="calibrated quiet">
             {calibration.on ? `Calibrated on ${sayDay(calibration.on)}. ` : 'This screen was never measured. '}
@@ -59,7 +69,7 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
           </span>
         </div>
         {misfits.length > 0 ? <Misfits messages={misfits.map((misfit) => misfit.message)} /> : null}
-        {scene ? <LabelBoard scene={scene} misfits={misfits} shown={shown} pixelsPerMm={calibration.pixelsPerMm} zoom={zoom} /> : null}
+        {scene ? <LabelBoard scene={scene} misfits={misfits} shown={shown} pixelsPerMm={calibration.pixelsPerMm} zoom={zoom} {...(byHand && { onKeyDown: handKeys(hand, isLocked), onEmptyPress: () => hand.choose(null), over: (px: number) => <HandLayer hand={hand} scene={scene} px={px} isLocked={isLocked} /> })} /> : null}
         {scene ? <SpecLine scene={scene} label={draft.label} /> : null}
         {scene ? <PressList checks={checks} /> : null}
         {scene && scene.shape !== 'taper' ? (
@@ -69,6 +79,7 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
         ) : null}
       </div>
       <aside className="studio-side" aria-label="Settings of the label">
+        {byHand && scene ? <HandPanel hand={hand} scene={scene} isLocked={isLocked} /> : null}
         <Panel title="Press file">
           <PressFile isReady={misfits.length === 0 && !checks.some((check) => check.state === 'stop')} onPressFile={onPressFile} standard={draft.label.press.standard} />
         </Panel>
