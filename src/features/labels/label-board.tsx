@@ -130,7 +130,7 @@ function Rings({ scene, misfits, px }: { scene: Scene; misfits: readonly Misfit[
     const box = unionOf(scene.items.filter((item) => item.element === misfit.element).flatMap((item) => inkBox(item, { metrics: plexMetrics }) ?? []));
     if (!box) return null;
     const [x, y, w, h] = [box.x, box.y, box.width, box.height].map((figure) => figure / 1000) as [number, number, number, number];
-    const words = misfit.missing > 0 ? `needs ${inMillimetres(misfit.missing)} mm more ${misfit.direction}` : 'letters missing';
+    const words = misfit.direction === 'place' ? (misfit.missing > 0 ? `${inMillimetres(misfit.missing)} mm in the way` : 'dark on dark') : misfit.missing > 0 ? `needs ${inMillimetres(misfit.missing)} mm more ${misfit.direction}` : 'letters missing';
     const length = words.length * size * 0.54;
     return (
       <g key={misfit.element}>

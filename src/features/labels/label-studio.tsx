@@ -3,6 +3,7 @@ import './labels.css';
 import { layOutLabel } from '#shared/artwork/layout.ts';
 import { exactMillimetres } from '#shared/artwork/lengths.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
+import type { Misfit } from '#shared/artwork/misfits.ts';
 import type { Scene } from '#shared/artwork/scene.ts';
 import type { LabelSettings, ProductDraft } from '#shared/contracts/product-draft.ts';
 import type { LabelResult } from '#shared/artwork/label-of-document.ts';
@@ -23,6 +24,7 @@ import { LabelBoard, type Shown } from './label-board.tsx';
 import { labelOfDraft } from './label-of-draft.ts';
 import { LabelSettingsPanel } from './label-settings-panel.tsx';
 import { PressList } from './press-list.tsx';
+import { useIsNarrow } from './use-is-narrow.ts';
 
 export interface LabelStudioProps {
   readonly draft: ProductDraft;
@@ -54,6 +56,10 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
   const scene = byHand ? layout.straight : layout.scene;
   const hand = useHand({ label: draft.label, scene: layout.straight, onChange });
   const container = draft.label.container;
+  // Under the board while composing: a sentence that comes and goes must not push the label from under the hand.
+  const told = misfits.length > 0 ? <Misfits misfits={misfits} /> : null;
+  const handPanel = byHand && scene ? <HandPanel hand={hand} scene={scene} isLocked={isLocked} /> : null;
+  const isNarrow = useIsNarrow();
   return (
     <Sheet className="hung studio">
       <div className="studio-main">
@@ -61,15 +67,17 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
           <div className="switch" role="group" aria-label="Scale">
             {ZOOMS.map(([value, word]) => <button key={value} type="button" aria-pressed={zoom === value} onClick={() => setZoom(value)}>{word}</button>)}
           </div>
-          <button type="button" className="btn small" aria-pressed={byHand} onClick={() => { setByHand(!byHand); hand.choose(null); }}>Compose by hand</button>
+          <button type="button" id="studio-hand" className="btn small" aria-pressed={byHand} onClick={() => { setByHand(!byHand); hand.choose(null); }}>Compose by hand</button>
           {LAYERS.map(([key, word]) => <CheckField key={key} label={word} checked={shown[key]} onChange={() => setShown({ ...shown, [key]: !shown[key] })} />)}
           <span className="calibrated quiet">
             {calibration.on ? `Calibrated on ${sayDay(calibration.on)}. ` : 'This screen was never measured. '}
             <TextButton mini onClick={() => setIsMeasuring(true)}>Check with a bank card</TextButton>
           </span>
         </div>
-        {misfits.length > 0 ? <Misfits messages={misfits.map((misfit) => misfit.message)} /> : null}
+        {byHand ? null : told}
         {scene ? <LabelBoard scene={scene} misfits={misfits} shown={shown} pixelsPerMm={calibration.pixelsPerMm} zoom={zoom} {...(byHand && { onKeyDown: handKeys(hand, isLocked), onEmptyPress: () => hand.choose(null), over: (px: number) => <HandLayer hand={hand} scene={scene} px={px} isLocked={isLocked} /> })} /> : null}
+        {byHand ? told : null}
+        {isNarrow ? handPanel : null}
         {scene ? <SpecLine scene={scene} label={draft.label} /> : null}
         {scene ? <PressList checks={checks} /> : null}
         {scene && scene.shape !== 'taper' ? (
@@ -79,7 +87,7 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
         ) : null}
       </div>
       <aside className="studio-side" aria-label="Settings of the label">
-        {byHand && scene ? <HandPanel hand={hand} scene={scene} isLocked={isLocked} /> : null}
+        {isNarrow ? null : handPanel}
         <Panel title="Press file">
           <PressFile isReady={misfits.length === 0 && !checks.some((check) => check.state === 'stop')} onPressFile={onPressFile} standard={draft.label.press.standard} />
         </Panel>
@@ -90,12 +98,13 @@ export function LabelStudio({ draft, result, house, onChange, onPressFile, isLoc
   );
 }
 
-function Misfits({ messages }: { messages: readonly string[] }) {
+function Misfits({ misfits }: { misfits: readonly Misfit[] }) {
+  const isPlace = misfits.every(({ direction }) => direction === 'place');
   return (
     <div className="misfits" role="status">
-      <Banner weight="stop" title="This label does not hold everything">
-        <ul>{[...new Set(messages)].map((message) => <li key={message}>{message}</li>)}</ul>
-        <p>Choose a larger container or shorter texts. Nothing is set smaller than the market allows.</p>
+      <Banner weight="stop" title={isPlace ? 'Some things stand in each other’s way' : 'This label does not hold everything'}>
+        <ul>{[...new Set(misfits.map(({ message }) => message))].map((message) => <li key={message}>{message}</li>)}</ul>
+        {isPlace ? null : <p>Choose a larger container or shorter texts. Nothing is set smaller than the market allows.</p>}
       </Banner>
     </div>
   );

@@ -138,7 +138,7 @@ function TypeFields({ keys, hand, scene, isHeld }: { keys: readonly HandKey[]; h
   if (!isType) return keys.every((key) => key !== 'barcode') ? <div className="hand-figures">{ink}</div> : null;
   const size = (
     <FigureField
-      label="Size, pt" value={style.size === undefined ? undefined : Math.round((style.size * 72) / 25.4)} least={1500} most={500_000} step={100} disabled={isHeld} whenEmpty="fills the frame"
+      label="Size, pt" value={style.size === undefined ? undefined : Math.round((style.size * 7.2) / 25.4) * 10} least={1500} most={500_000} step={100} disabled={isHeld} whenEmpty="fills the frame"
       hint={keys.length === 1 ? letterWords(scene, keys[0]!) : undefined}
       onCommit={(value) => hand.style({ size: value === undefined ? undefined : Math.round((value * 25.4) / 72) })}
     />

@@ -5,7 +5,7 @@ import type { FreeElement } from '#shared/contracts/free-elements.ts';
 import { freeElement, handBoxes, type HandKey } from '#shared/artwork/hand/elements.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import type { Scene } from '#shared/artwork/scene.ts';
-import { addThing, alignThings, copyThings, freeAll, groupThings, lockThings, moveThings, orderThings, removeThings, setFrame, setStyle, spreadThings, thingOf, withGroups, type Alignment } from './edit-hand.ts';
+import { addThing, alignThings, copyThings, freeAll, groupThings, keyOfThing, lockThings, moveThings, orderThings, removeThings, setFrame, setStyle, spreadThings, thingOf, withGroups, type Alignment } from './edit-hand.ts';
 
 export interface HandOptions {
   readonly label: LabelSettings;
@@ -36,7 +36,8 @@ export function useHand({ label, scene, onChange }: HandOptions) {
   const [chosen, setChosen] = useState<readonly HandKey[]>([]);
   const boxes = useMemo(() => (scene ? handBoxes(scene, plexMetrics) : new Map<HandKey, HandFrame>()), [scene]);
   const free = useCallback((element: FreeElement) => (scene ? freeElement(scene, element, plexMetrics) : null), [scene]);
-  const things = useMemo(() => [...boxes.keys()].map((key): Chosen => {
+  // What has no ink just now, as a text whose words are being rewritten, is still there to be chosen.
+  const things = useMemo(() => [...new Set([...boxes.keys(), ...[...byHand.freed, ...byHand.added].map(keyOfThing)])].map((key): Chosen => {
     const thing = thingOf(byHand, key);
     return { key, frame: thing?.frame ?? boxes.get(key)!, isFree: thing !== undefined, isLocked: Boolean(thing?.locked) };
   }), [boxes, byHand]);
