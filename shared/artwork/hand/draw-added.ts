@@ -24,6 +24,11 @@ function boxSteps({ x, y, width, height }: HandFrame): PathStep[] {
   return [['M', x, y], ['L', x + width, y], ['L', x + width, y + height], ['L', x, y + height], ['Z']];
 }
 
+/** Readers guess at letters beyond ASCII: in an address they are written in its own escapes (RFC 3986, 2.1). */
+function plainAddress(text: string): string {
+  return /^[a-z][a-z0-9+.-]*:/i.test(text) ? text.replace(/[^\x21-\x7e]/gu, encodeURIComponent) : text;
+}
+
 export interface DrawnCode {
   readonly items: readonly Item[];
   /** Edge of one module. */
@@ -37,7 +42,7 @@ export interface DrawnCode {
 export function drawCode(added: Extract<AddedElement, { kind: 'code' }>): DrawnCode {
   qrcode.stringToBytes = (text) => [...new TextEncoder().encode(text)];
   const code = qrcode(0, 'M');
-  code.addData(added.text, 'Byte');
+  code.addData(plainAddress(added.text), 'Byte');
   code.make();
   const count = code.getModuleCount();
   const { frame } = added;
