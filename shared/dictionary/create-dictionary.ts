@@ -106,10 +106,16 @@ function index(
       const key = fold(text);
       const before = found.get(key);
       if (before === undefined) found.set(key, entry);
-      else if (before !== entry) found.set(key, null);
+      else if (before && succeeds(entry, before)) found.set(key, entry);
+      else if (before !== entry && !(before && succeeds(before, entry))) found.set(key, null);
     }
   }
   return found;
+}
+
+/** Whether one entry is the other's successor: a name that both bear leads to it. */
+function succeeds(entry: DictionaryEntry, former: DictionaryEntry): boolean {
+  return former.supersededBy !== undefined && foldName(former.supersededBy) === foldName(entry.inci);
 }
 
 /**

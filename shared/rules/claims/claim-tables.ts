@@ -11,7 +11,7 @@ import { PhraseIndex, readPhrase, type Phrase } from './match-words.ts';
 export type ClaimVerdict = 'medicinal' | 'contradicted' | 'evidence';
 
 /** What a verdict is measured by: a key of `claims-criteria.json`. */
-export type Criterion = 'medicine' | 'truthfulness' | 'evidence' | 'honesty' | 'fairness' | 'legal-compliance' | 'animal-testing' | 'injury' | 'named' | `drug-${string}`;
+export type Criterion = 'medicine' | 'truthfulness' | 'evidence' | 'honesty' | 'fairness' | 'legal-compliance' | 'animal-testing' | 'injury' | 'prescription' | 'named' | `drug-${string}`;
 
 interface Cited {
   readonly text: string;

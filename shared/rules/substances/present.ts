@@ -100,7 +100,7 @@ function messageOf(outcome: Outcome, kind: FindingKind, subject: string): string
     return outcome.needs.includes('purpose') ? `${what} for this purpose; for another use it may be lawful.` : outcome.needs.length > 0 ? `${what} where the open question is answered so.` : `${what}; only part of the range is above it.`;
   }
   const open = outcome.certainty === 'possible' ? ' It cannot be told yet whether this applies.' : '';
-  if (outcome.type === 'prohibited') return `${subject} is prohibited in cosmetic products. ${outcome.words ?? ''}`.trim() + open;
+  if (outcome.type === 'prohibited') return `${subject} is prohibited in ${outcome.provision.where ? 'this kind of product' : 'cosmetic products'}. ${outcome.words ?? ''}`.trim() + open;
   if (outcome.type === 'unlisted') return `${subject} has no listed use in this kind of product.${open}`;
   return `${subject}: ${outcome.words ?? 'not for this use.'}${open}`;
 }

@@ -45,3 +45,9 @@ test('letters to change are counted with exchanges as one', () => {
 test('check digits of registry numbers are verified', () => {
   expect([isCasNumber('7732-18-5'), isCasNumber('7732-18-4'), isEcNumber('231-791-2'), isEcNumber('231-791-3')]).toEqual([true, false, true, false]);
 });
+
+test('a name that an entry and its successor both bear leads to the successor, in either order', () => {
+  const former = entry('Candelilla Cera', { names: { us: 'Candelilla Wax' }, supersededBy: 'Euphorbia Cerifera Cera' });
+  const present = entry('Euphorbia Cerifera Cera', { names: { us: 'Candelilla Wax' } });
+  for (const entries of [[former, present], [present, former]]) expect(createDictionary(entries, 'r').resolve('candelilla wax')?.entry).toBe(present);
+});
