@@ -82,7 +82,7 @@ export interface Provision {
   readonly until?: Dates;
   /** Interpretation chosen, in plain words. */
   readonly reading?: string;
-  /** `forbidden`: present in this field at all is a breach. Default `allowed`. */
+  /** `forbidden`: present in this field at all is a breach. `allowed` opens a field in a row of prohibited substances; elsewhere it is the default. */
   readonly use?: 'allowed' | 'forbidden';
   /** Why it is forbidden here, in our words. */
   readonly words?: string;

@@ -173,6 +173,8 @@ describe('uses', () => {
     ['a coal-tar dye on the brows', { name: 'p-Phenylenediamine', percent: '0.1' }, { category: 'brow-and-lash-dye' }, ['prohibited p-Phenylenediamine ca/cr-14']],
     ['a coal-tar dye on the hair', { name: 'p-Phenylenediamine', percent: '0.1' }, { category: 'hair-dye-oxidative' }, []],
     ['mercury in a wash', { name: 'Thimerosal', percent: '0.001' }, { category: 'body-wash' }, ['prohibited Thimerosal ca/cr-15.1']],
+    ['mercury to preserve a mascara', { name: 'Thimerosal', percent: '0.001', purpose: 'preservative' }, { category: 'mascara' }, []],
+    ['mercury in a mascara for another reason', { name: 'Thimerosal', percent: '0.001', purpose: 'other' }, { category: 'mascara' }, ['prohibited Thimerosal ca/cr-15.1']],
     ['sulfides in a shampoo', { name: 'Sodium Sulfide', percent: '1' }, { category: 'shampoo' }, ['not-for-this-use Sodium Sulfide ca/hotlist/alkali-sulfides']],
     ['sulfides to remove hair', { name: 'Sodium Sulfide', percent: '1' }, { category: 'depilatory' }, []],
   ])('%s', (_, given, asked, expected) => {

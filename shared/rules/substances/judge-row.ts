@@ -94,7 +94,7 @@ function judgeProvision(spoken: Spoken, outcomes: Outcome[]): void {
       outcomes.push({ ...common, type: row.list === 'prohibited' ? 'prohibited' : 'forbidden', ...(provision.words ? { words: provision.words } : {}) });
       continue;
     }
-    if (row.list === 'prohibited' && provision.max === undefined) outcomes.push({ ...common, type: 'prohibited' });
+    if (row.list === 'prohibited' && provision.max === undefined && provision.use !== 'allowed') outcomes.push({ ...common, type: 'prohibited' });
     if (isRatioOf(row, provision, common.parts)) judgeRatios(common, group, context, outcomes);
     else if (provision.max !== undefined) judgeLimit(common, group, context, outcomes);
     for (const required of provision.requires ?? []) judgeRequirement(common, required, context, outcomes);
