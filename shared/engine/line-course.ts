@@ -36,35 +36,59 @@ export function isBefore(a: Rational, b: Rational): boolean {
   return a.n * b.d < b.n * a.d;
 }
 
-/** Whether all demands hold at `s`. */
-export function holdsAt(demands: readonly Demand[], s: Rational): boolean {
-  return demands.every(({ course, orZero }) => {
-    const value = course.now * (s.d - s.n) + course.end * s.n;
-    return value > 0n || (orZero && value === 0n);
-  });
-}
-
 export function middle(a: Rational, b: Rational): Rational {
   return { n: a.n * b.d + b.n * a.d, d: a.d * b.d * 2n };
 }
 
-const START: Rational = { n: 0n, d: 1n };
-const WHOLE: Rational = { n: 1n, d: 1n };
+/** A part of the way, from one place up to and without another; `holds` says whether a place is the point itself or just behind it. */
+export interface Stretch {
+  readonly from: Beginning;
+  readonly to: Beginning;
+}
+
+/** All of the way between today and the whole, without either. */
+export const WAY: Stretch = { from: { s: { n: 0n, d: 1n }, holds: false }, to: { s: { n: 1n, d: 1n }, holds: true } };
+
+/** Whether `a` comes sooner on the way: a point comes before what is just behind it. */
+export function isSooner(a: Beginning, b: Beginning): boolean {
+  const left = a.s.n * b.s.d;
+  const right = b.s.n * a.s.d;
+  return left < right || (left === right && a.holds && !b.holds);
+}
 
 /**
- * Where on the way from today to the whole all demands first hold together, `extra` being
- * further places where `when` may change its answer; `undefined` where they never do.
+ * Where on a stretch all demands hold together: a demand of something linear holds on one side of
+ * its root, so that is a stretch again, or nothing.
  */
-export function firstHolding(demands: readonly Demand[], when?: { readonly holds: (s: Rational) => boolean; readonly places: readonly Rational[] }): Beginning | undefined {
-  // Demands that fail at both ends fail all the way.
-  if (demands.some(({ course }) => course.now < 0n && course.end < 0n)) return undefined;
-  const places = [START, ...demands.flatMap(({ course }) => rootOf(course) ?? []), ...(when?.places ?? []), WHOLE].sort((a, b) => (isBefore(a, b) ? -1 : isBefore(b, a) ? 1 : 0));
-  const isTrue = (s: Rational): boolean => holdsAt(demands, s) && (when?.holds(s) ?? true);
-  for (let index = 0; index < places.length; index += 1) {
-    const here = places[index]!;
-    if (here.n > 0n && isBefore(here, WHOLE) && isTrue(here)) return { s: here, holds: true };
-    const next = places[index + 1];
-    if (next && isBefore(here, next) && isTrue(middle(here, next))) return { s: here, holds: false };
+export function whereAllHold(demands: readonly Demand[], { from, to }: Stretch = WAY): Stretch | undefined {
+  for (const { course, orZero } of demands) {
+    const { now, end } = course;
+    if (now > 0n && end > 0n) continue;
+    if (now < 0n && end < 0n) return undefined;
+    if (now === end) {
+      if (!orZero) return undefined;
+    } else if (end > now) {
+      const place: Beginning = { s: { n: -now, d: end - now }, holds: orZero };
+      if (isSooner(from, place)) from = place;
+    } else {
+      const place: Beginning = { s: { n: now, d: now - end }, holds: !orZero };
+      if (isSooner(place, to)) to = place;
+    }
   }
-  return undefined;
+  return isSooner(from, to) ? { from, to } : undefined;
+}
+
+/** The first place of a stretch that none of the others covers. */
+export function firstUncovered({ from, to }: Stretch, covers: readonly Stretch[]): Beginning | undefined {
+  let place = from;
+  for (let isCovered = true; isCovered;) {
+    isCovered = false;
+    for (const cover of covers) {
+      if (isSooner(place, cover.from) || !isSooner(place, cover.to)) continue;
+      place = cover.to;
+      if (!isSooner(place, to)) return undefined;
+      isCovered = true;
+    }
+  }
+  return place;
 }

@@ -1,10 +1,9 @@
 import { toBig } from '#shared/kernel/figure.ts';
-import type { Rational } from '#shared/kernel/rational.ts';
 import type { Market } from '#shared/law/types.ts';
 import type { Blend } from './blend.ts';
 import { ListedEntry } from './entry.ts';
 import type { Declaration } from './assessment.ts';
-import { firstHolding, isBefore, minus, rootOf, type Beginning, type Course, type Demand } from './line-course.ts';
+import { firstUncovered, isSooner, minus, WAY, whereAllHold, type Beginning, type Course, type Demand, type Stretch } from './line-course.ts';
 import { LIST_LAW } from './list-law.ts';
 
 /** Where a finding that is not there today begins. */
@@ -18,6 +17,8 @@ interface Entry {
   readonly lo: Course;
   readonly typ: Course;
   readonly hi: Course;
+  /** Today and at the end its share is one figure. */
+  readonly isFixed: boolean;
 }
 
 /** The list of today, of the line's material alone, and the denominator both are brought to. */
@@ -30,22 +31,26 @@ interface Way {
 
 /**
  * The first uncertainty of place or order that a line brings on its way up. Every pair and every
- * entry is asked where its own conditions first hold together; nothing is tried out.
+ * entry is asked where its own conditions first hold together; nothing is tried out, and nothing
+ * is asked that could only begin behind what is found already.
  */
 export function findListFinding(now: Blend, end: Blend, declaration: Declaration, market: Market): NewFinding | undefined {
   const den = now.den * end.den;
   const way: Way = { now, end, market, one: { now: den, end: den } };
   const entries = declaration.entries.flatMap((listed) => (listed instanceof ListedEntry && listed.zone !== 'colourant' ? [coursesOf(listed, way)] : []));
   let first: NewFinding | undefined;
-  const take = (found: Beginning | undefined, rule: string): void => {
-    if (found && (!first || isBefore(found.s, first.s) || (found.holds && !first.holds && !isBefore(first.s, found.s)))) first = { ...found, rule };
-  };
-  for (const entry of entries) take(findStraddle(entry, way), 'zone-proved');
+  for (const entry of entries) {
+    const found = findStraddle(entry, way);
+    if (found && (!first || isSooner(found, first))) first = { ...found, rule: 'zone-proved' };
+  }
   const today = new Set(declaration.uncertainPairs.map(({ first: a, second: b }) => `${a.inci}|${b.inci}`));
   const ordered = entries.filter(({ typ }) => typ.now >= den || typ.end >= den);
   for (const a of ordered) {
     for (const b of ordered) {
-      if (a !== b && canTurn(a, b) && !today.has(`${a.listed.inci}|${b.listed.inci}`)) take(findTurn(a, b, ordered, way), 'order-proved');
+      // What is sure of both is never turned round.
+      if (a === b || (a.isFixed && b.isFixed) || !canTurn(a, b) || today.has(`${a.listed.inci}|${b.listed.inci}`)) continue;
+      const found = findTurn(a, b, ordered, way, first ?? WAY.to);
+      if (found) first = { ...found, rule: 'order-proved' };
     }
   }
   return first;
@@ -55,14 +60,16 @@ function coursesOf(listed: ListedEntry, { now, end }: Way): Entry {
   const { share, keys } = listed;
   const last = keys.some((key) => end.find(key)?.as.ingredient) ? end.ingredientShare(keys) : { lo: 0n, typ: 0n, hi: 0n };
   const course = (a: bigint | number, b: bigint | number): Course => ({ now: toBig(a) * end.den, end: toBig(b) * now.den });
-  return { listed, keys, lo: course(share.lo, last.lo), typ: course(share.typ, last.typ), hi: course(share.hi, last.hi) };
+  const isFixed = share.lo === share.hi && share.typ === share.hi && last.lo === last.hi && last.typ === last.hi;
+  const typ = course(share.typ, last.typ);
+  return isFixed ? { listed, keys, lo: typ, typ, hi: typ, isFixed } : { listed, keys, lo: course(share.lo, last.lo), typ, hi: course(share.hi, last.hi), isFixed };
 }
 
 /** On both sides of the 1 % line. */
 function findStraddle({ listed, lo, hi }: Entry, { market, one }: Way): Beginning | undefined {
   if (listed.straddles || (lo.now === hi.now && lo.end === hi.end)) return undefined;
   const { ordersOne } = LIST_LAW[market];
-  return firstHolding([{ course: minus(hi, one), orZero: ordersOne }, { course: minus(one, lo), orZero: !ordersOne }]);
+  return whereAllHold([{ course: minus(hi, one), orZero: ordersOne }, { course: minus(one, lo), orZero: !ordersOne }])?.from;
 }
 
 /** False where `a` is never below `b`: their ranges stay apart all the way. */
@@ -70,22 +77,23 @@ function canTurn(a: Entry, b: Entry): boolean {
   return a.lo.now < b.hi.now || a.lo.end < b.hi.end;
 }
 
-function findTurn(a: Entry, b: Entry, ordered: readonly Entry[], way: Way): Beginning | undefined {
-  const leads: Demand = { course: minus(a.typ, b.typ), orZero: a.listed.name < b.listed.name };
-  if (leads.course.now < 0n && leads.course.end < 0n) return undefined;
+/** Where `a` first stands right before `b` and some composition puts them the other way round; only what begins before `until`. */
+function findTurn(a: Entry, b: Entry, ordered: readonly Entry[], way: Way, until: Beginning): Beginning | undefined {
   const { ordersOne } = LIST_LAW[way.market];
-  const turns: Demand = { course: negative(leadOf(a, b, way)), orZero: false };
-  const demands = [leads, turns, { course: minus(b.typ, way.one), orZero: ordersOne }];
-  if (!firstHolding(demands)) return undefined;
-  const others = ordered.filter((one) => one !== a && one !== b);
-  const places = others.flatMap(({ typ }) => [minus(typ, a.typ), minus(typ, b.typ)]).flatMap((course) => rootOf(course) ?? []);
-  return firstHolding(demands, { places, holds: (s) => !others.some((one) => isAhead(a, one, s) && isAhead(one, b, s)) });
+  // The lead needs a proof of its own, which costs more than what it needs besides.
+  const leads = whereAllHold([leadsBy(a, b), { course: minus(b.typ, way.one), orZero: ordersOne }, { course: minus(b.hi, a.lo), orZero: false }], { from: WAY.from, to: until });
+  const turns = leads && whereAllHold([{ course: negative(leadOf(a, b, way)), orZero: false }], leads);
+  if (!turns) return undefined;
+  const between = (one: Entry): Stretch[] => {
+    const stretch = one === a || one === b ? undefined : whereAllHold([leadsBy(a, one), leadsBy(one, b)], turns);
+    return stretch ? [stretch] : [];
+  };
+  return firstUncovered(turns, ordered.flatMap(between));
 }
 
-function isAhead(a: Entry, b: Entry, s: Rational): boolean {
-  const { now, end } = minus(a.typ, b.typ);
-  const value = now * (s.d - s.n) + end * s.n;
-  return value > 0n || (value === 0n && a.listed.name < b.listed.name);
+/** `a` stands before `b`: more of it, or as much and an earlier name. */
+function leadsBy(a: Entry, b: Entry): Demand {
+  return { course: minus(a.typ, b.typ), orZero: a.listed.name < b.listed.name };
 }
 
 function negative({ now, end }: Course): Course {
