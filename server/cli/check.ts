@@ -1,5 +1,5 @@
 import { readFormulaDocument } from '#shared/contracts/read-formula-document.ts';
-import type { Fault, FormulaDocument } from '#shared/contracts/formula-document.ts';
+import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { ResultDocument } from '#shared/contracts/result-document.ts';
 import type { Dictionary } from '#shared/dictionary/types.ts';
 import { assess } from '#shared/engine/assess.ts';
@@ -7,7 +7,7 @@ import { presentResult } from '#shared/engine/present-result.ts';
 import type { PlainDate } from '#shared/kernel/plain-date.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { Arguments } from './arguments.ts';
-import { parseJson, readLines, readText, Unusable } from './input.ts';
+import { parseJson, readText, Unusable } from './input.ts';
 import type { Io } from './io.ts';
 
 /** The tables and the day that a check stands on. */
@@ -17,7 +17,8 @@ export interface Knowledge {
   readonly today: PlainDate;
 }
 
-type Flags = Pick<Arguments, 'markets' | 'placed' | 'available'>;
+/** What the command line sets for every document of a run. */
+export type Flags = Pick<Arguments, 'markets' | 'placed' | 'available'>;
 
 /** Reads one document. @throws Unusable with every fault */
 export function readDocument(text: string, flags: Flags, { law }: Knowledge): FormulaDocument {
@@ -38,7 +39,8 @@ export function checkDocument(document: FormulaDocument, flags: Flags, { law, di
   }));
 }
 
-function stopsSale(result: ResultDocument): boolean {
+/** Whether anything in any market stops sale. */
+export function stopsSale(result: ResultDocument): boolean {
   return result.results.some(({ findings }) => findings.some(({ severity }) => severity === 'stop'));
 }
 
@@ -53,24 +55,4 @@ export async function checkFile(given: Arguments, knows: Knowledge, io: Io): Pro
   for (const words of daysBeyond(result)) io.tell(words);
   await io.write(`${JSON.stringify(result, null, 1)}\n`);
   return stopsSale(result) ? 1 : 0;
-}
-
-/** `check` of a JSON Lines file: one result a line, in order; an unusable line is answered in its place. */
-export async function checkLines(given: Arguments, knows: Knowledge, io: Io): Promise<number> {
-  let status = 0;
-  for await (const { number, text } of readLines(given.file, io.stdin)) {
-    if (text !== null && text.trim() === '') continue;
-    try {
-      if (text === null) throw new Unusable([{ pointer: '', message: 'This line is longer than can be read.' }]);
-      const result = checkDocument(readDocument(text, given, knows), given, knows);
-      if (status === 0 && stopsSale(result)) status = 1;
-      await io.write(`${JSON.stringify(result)}\n`);
-    } catch (error) {
-      status = 2;
-      const faults: readonly Fault[] = error instanceof Unusable ? error.faults : [{ pointer: '', message: `This document could not be judged: ${error instanceof Error ? error.message : 'unknown reason'}` }];
-      for (const { pointer, message } of faults) io.tell(`line ${number}: ${pointer || '/'}: ${message}`);
-      await io.write(`${JSON.stringify({ document: 'error/1', line: number, faults })}\n`);
-    }
-  }
-  return status;
 }

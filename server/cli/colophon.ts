@@ -1,10 +1,10 @@
-import { join } from 'node:path';
 import { plainDate, type PlainDate } from '#shared/kernel/plain-date.ts';
 import { readArguments, USAGE, type Arguments } from './arguments.ts';
-import { checkFile, checkLines, type Knowledge } from './check.ts';
+import { checkFile } from './check.ts';
+import { checkLines } from './check-lines.ts';
 import { Unusable } from './input.ts';
 import { standardIo, type Io } from './io.ts';
-import { openDictionary, openLaw } from './tables.ts';
+import { openKnowledge } from './tables.ts';
 
 /** Status of an input that is not usable. */
 const UNUSABLE = 2;
@@ -35,10 +35,10 @@ async function runCommand(given: Arguments, root: string, io: Io): Promise<numbe
     const { writeSchema } = await import('./schema.ts');
     return writeSchema(given.file, io);
   }
-  const knows = openKnowledge(root);
+  const knows = openKnowledge(root, today());
   switch (given.command) {
     case 'check':
-      return given.file.endsWith('.jsonl') ? checkLines(given, knows, io) : checkFile(given, knows, io);
+      return given.file.endsWith('.jsonl') ? checkLines(given, knows, { io, root }) : checkFile(given, knows, io);
     case 'label': {
       const { writeLabel } = await import('./label.ts');
       return writeLabel({ ...given, out: given.out! }, knows, io);
@@ -48,11 +48,6 @@ async function runCommand(given: Arguments, root: string, io: Io): Promise<numbe
       return readList(given, knows, io);
     }
   }
-}
-
-function openKnowledge(root: string): Knowledge {
-  const law = openLaw();
-  return { law, dictionary: openDictionary(join(root, 'data/dictionary'), law.release), today: today() };
 }
 
 /** The machine's calendar day. */

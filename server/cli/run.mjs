@@ -38,7 +38,7 @@ async function bundle(stamp) {
   try {
     await build({
       absWorkingDir: ROOT,
-      entryPoints: { colophon: 'server/cli/colophon.ts' },
+      entryPoints: { colophon: 'server/cli/colophon.ts', 'line-worker': 'server/cli/line-worker.ts' },
       outdir: making,
       outExtension: { '.js': '.mjs' },
       bundle: true,
