@@ -21,6 +21,7 @@ import { houseRoutes } from '#server/modules/house/house.routes.ts';
 import { lawRoutes } from '#server/modules/law/law.routes.ts';
 import { materialsRoutes } from '#server/modules/materials/materials.routes.ts';
 import { productsRoutes } from '#server/modules/products/products.routes.ts';
+import { trailRoutes } from '#server/modules/trail/trail.routes.ts';
 import { sessionRoutes } from '#server/modules/session/session.routes.ts';
 import type { ObjectStore } from '#server/storage/object-store.ts';
 
@@ -49,6 +50,7 @@ export function apiRoutes(deps: AppDeps): Route[] {
     ...materialsRoutes(deps),
     ...productsRoutes(deps),
     ...evidenceRoutes(deps),
+    ...trailRoutes(deps),
   ];
 }
 
@@ -57,7 +59,7 @@ export function createApp(deps: AppDeps): Express {
   const { auth, orm } = deps;
   const routes = apiRoutes(deps);
   const api = Router({ caseSensitive: true });
-  mountRoutes(api, routes, orm.em);
+  mountRoutes(api, routes, orm.em, deps.now);
 
   const app = express();
   app.set('query parser', 'simple');

@@ -1,7 +1,7 @@
 import { openOrm } from './orm.ts';
 
 /** Tables to which the app adds rows but which it never changes. */
-const ONLY_ADDED = ['product_revision'];
+const ONLY_ADDED = ['product_revision', 'trail_entry'];
 /** Tables that only the owner writes. */
 const ONLY_READ = ['migration', 'dictionary_entry', 'dictionary_term'];
 

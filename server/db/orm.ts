@@ -1,5 +1,6 @@
 import { defineConfig, MikroORM, type Options } from '@mikro-orm/postgresql';
 import { Migrator } from '@mikro-orm/migrations';
+import { TrailSubscriber } from '#server/trail/trail-subscriber.ts';
 import { ENTITIES } from './entities.ts';
 import { MIGRATIONS } from './migrations.ts';
 
@@ -8,6 +9,7 @@ export function ormOptions(clientUrl: string, pool: { readonly max: number } = {
   return defineConfig({
     clientUrl,
     entities: ENTITIES,
+    subscribers: [new TrailSubscriber()],
     extensions: [Migrator],
     pool: { min: 0, max: pool.max, acquireTimeoutMillis: 5_000 },
     forceUtcTimezone: true,

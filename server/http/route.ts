@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import express, { type Request, type RequestHandler, type Response, type Router } from 'express';
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { z } from 'zod';
@@ -5,6 +6,7 @@ import type { Endpoint } from '#shared/contracts/endpoint.ts';
 import { DomainError } from '#shared/kernel/errors.ts';
 import { can, type Right } from '#shared/policies/can.ts';
 import { inHouse } from '#server/db/in-house.ts';
+import { noteAct, type TrailAct } from '#server/trail/trail-context.ts';
 import { AppError } from './app-error.ts';
 import { FileAnswer, sendFile } from './file-answer.ts';
 import { plainWords, toIssues } from './issues.ts';
@@ -61,7 +63,7 @@ export function route<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodT
  * Mounts routes below `/api`. @throws DomainError for a route without a declared right, and
  * for two routes on one address: neither may start.
  */
-export function mountRoutes(router: Router, routes: readonly Route[], em: EntityManager): void {
+export function mountRoutes(router: Router, routes: readonly Route[], em: EntityManager, now: () => Date = () => new Date()): void {
   const taken = new Set<string>();
   for (const one of routes) {
     const { method, path } = one.endpoint;
@@ -70,7 +72,7 @@ export function mountRoutes(router: Router, routes: readonly Route[], em: Entity
     if (taken.has(address)) throw new DomainError(`route ${address} is mounted twice`);
     taken.add(address);
     const verb = method.toLowerCase() as 'get' | 'post' | 'put' | 'patch' | 'delete';
-    router[verb](path, requireRight(one.rule.may), ...bodyReaders(one), answer(one, em));
+    router[verb](path, requireRight(one.rule.may), ...bodyReaders(one), answer(one, em, now));
   }
 }
 
@@ -91,7 +93,7 @@ function bodyReaders({ endpoint, rule }: Route): RequestHandler[] {
   return [express.json({ limit: rule.bodyLimit ?? BODY_LIMIT, inflate: false, strict: false, type: 'application/json' })];
 }
 
-function answer(one: Route, em: EntityManager): RequestHandler {
+function answer(one: Route, em: EntityManager, now: () => Date): RequestHandler {
   return async (req, res) => {
     const { endpoint } = one;
     const params = parseParams(endpoint, req);
@@ -99,6 +101,10 @@ function answer(one: Route, em: EntityManager): RequestHandler {
     const upload = endpoint.accepts === 'multipart' ? await readUpload(req) : undefined;
     const body = parsePart(endpoint.body, upload ? upload.fields : (req.body as unknown));
     const session = findSession(req);
+    const within = <T>(work: (em: EntityManager) => Promise<T>) => {
+      const { houseId, person } = session ?? refuse();
+      return inHouse(em, houseId, work, { actor: { personId: person.id, name: person.name }, now });
+    };
     const call = {
       params,
       query,
@@ -114,12 +120,22 @@ function answer(one: Route, em: EntityManager): RequestHandler {
       get upload() {
         return upload ?? refuse();
       },
-      inHouse: <T>(work: (em: EntityManager) => Promise<T>) => inHouse(em, (session ?? refuse()).houseId, work),
+      inHouse: <T>(work: (em: EntityManager) => Promise<T>) => within(work),
     };
     const result = await one.handle(call);
-    if (result instanceof FileAnswer) sendFile(res, result);
-    else if (!res.headersSent) res.json(endpoint.response.parse(result));
+    if (result instanceof FileAnswer) {
+      // Who took a file is noted before it leaves the house.
+      if (session) await within((own) => Promise.resolve(noteAct(own, takenAct(endpoint, params, result))));
+      sendFile(res, result);
+    } else if (!res.headersSent) res.json(endpoint.response.parse(result));
   };
+}
+
+/** A file that was taken, for the trail: the product it belongs to, where the address names one. */
+function takenAct(endpoint: Endpoint, params: unknown, file: FileAnswer): TrailAct {
+  const id = (params as { id?: unknown } | undefined)?.id;
+  const productId = endpoint.path.startsWith('/products/') && typeof id === 'string' ? id : null;
+  return { act: 'took away', subjectKind: 'file', subjectId: typeof id === 'string' ? id : null, subject: file.fileName, productId, changes: [], recordHash: createHash('sha256').update(file.bytes).digest('hex') };
 }
 
 function refuse(): never {

@@ -1,7 +1,7 @@
 import type { Role } from '#shared/contracts/session.contract.ts';
 
 /** What a right is about. `labels` is the label part of a product; `downloads` are files made from one. */
-export type Thing = 'house' | 'materials' | 'products' | 'labels' | 'downloads' | 'law';
+export type Thing = 'house' | 'materials' | 'products' | 'labels' | 'downloads' | 'law' | 'trail';
 export type Verb = 'read' | 'edit';
 /** One right, as a route declares it. */
 export type Right = readonly [verb: Verb, thing: Thing];
@@ -11,7 +11,7 @@ export interface Actor {
   readonly roles: readonly Role[];
 }
 
-export const THINGS: readonly Thing[] = ['house', 'materials', 'products', 'labels', 'downloads', 'law'];
+export const THINGS: readonly Thing[] = ['house', 'materials', 'products', 'labels', 'downloads', 'law', 'trail'];
 
 const READ_ALL: Readonly<Record<Thing, readonly Verb[]>> = {
   house: ['read'],
@@ -20,6 +20,7 @@ const READ_ALL: Readonly<Record<Thing, readonly Verb[]>> = {
   labels: ['read'],
   downloads: ['read'],
   law: ['read'],
+  trail: ['read'],
 };
 
 /**
@@ -27,7 +28,7 @@ const READ_ALL: Readonly<Record<Thing, readonly Verb[]>> = {
  * needs the label and the report, an assessor needs the whole formula.
  */
 const RIGHTS: Readonly<Record<Role, Readonly<Record<Thing, readonly Verb[]>>>> = {
-  owner: { house: ['read', 'edit'], materials: ['read', 'edit'], products: ['read', 'edit'], labels: ['read', 'edit'], downloads: ['read'], law: ['read'] },
+  owner: { house: ['read', 'edit'], materials: ['read', 'edit'], products: ['read', 'edit'], labels: ['read', 'edit'], downloads: ['read'], law: ['read'], trail: ['read'] },
   formulator: { ...READ_ALL, materials: ['read', 'edit'], products: ['read', 'edit'], labels: ['read', 'edit'] },
   assessor: READ_ALL,
   artworker: { ...READ_ALL, labels: ['read', 'edit'] },

@@ -21,7 +21,7 @@ afterAll(() => stage.close());
 
 const PRODUCT = demoId('product Juniper & Oat Body Wash');
 const MATERIAL = demoMaterialId('lavender');
-const HOUSE_TABLES = ['material', 'material_document', 'product', 'product_evidence', 'product_material', 'product_revision', 'membership', 'house'];
+const HOUSE_TABLES = ['material', 'material_document', 'product', 'product_evidence', 'product_material', 'product_revision', 'trail_entry', 'membership', 'house'];
 
 describe('D-03 another house', () => {
   test('its things answer exactly as things that do not exist, on every route that takes an id', async () => {

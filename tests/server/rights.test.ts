@@ -53,6 +53,9 @@ const MATRIX: Readonly<Record<string, readonly Role[]>> = {
   'POST /dictionary/resolve': ALL,
   'GET /dictionary/oils': ALL,
   'GET /dictionary/names': ALL,
+  'GET /trail': ALL,
+  'GET /trail/verify': ALL,
+  'GET /trail/export': ALL,
 };
 
 let stage: TestApp;
