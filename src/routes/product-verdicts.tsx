@@ -78,7 +78,7 @@ export function Component() {
           editLink={isReadOnly ? null : <Link to={`${paths.product(page.id)}${page.search}#particulars`}>Write one with the particulars</Link>}
         />
         <RoomLeft market={asOf.market} headroom={headroom} lines={lines.map((line) => nameOf(line.materialId))} nameRule={sayRule} />
-        <NotChecked memory={merged.filter((finding) => finding.lead.sourcing === 'memory').length} handling={handling} />
+        <NotChecked memory={merged.filter((finding) => finding.lead.sourcing === 'memory').length} handling={handling} results={results.filter(({ market }) => draft.markets.includes(market))} />
       </Sheet>
     </div>
   );

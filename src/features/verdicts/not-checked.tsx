@@ -1,4 +1,6 @@
+import type { MarketAssessment } from '#shared/engine/assessment.ts';
 import type { Finding } from '#shared/engine/types.ts';
+import { MARKET_NAMES } from '#shared/report/words.ts';
 
 const NOT_CHECKED = [
   'Stability, microbiology, preservation and the pack: no rule reads these from a formula.',
@@ -7,13 +9,19 @@ const NOT_CHECKED = [
   'Whether the evidence for a claim holds.',
 ];
 
-/** What these verdicts do not say, and points that rest on memory or on the bench. */
-export function NotChecked({ memory, handling }: { memory: number; handling: readonly Finding[] }) {
+/** What these verdicts do not say, in general and of each market, and points that rest on memory or on the bench. */
+export function NotChecked({ memory, handling, results }: { memory: number; handling: readonly Finding[]; results: readonly Pick<MarketAssessment, 'market' | 'notChecked'>[] }) {
   return (
     <section className="not-checked" aria-label="What was not checked">
       <div>
         <h3>What was not checked</h3>
         <ul>{NOT_CHECKED.map((each) => <li key={each}>{each}</li>)}</ul>
+        {results.filter(({ notChecked }) => notChecked.length > 0).map(({ market, notChecked }) => (
+          <details key={market}>
+            <summary>{MARKET_NAMES[market]}: {notChecked.length === 1 ? 'one point' : `${notChecked.length} points`} of law left open</summary>
+            <ul>{notChecked.map((each) => <li key={each}>{each}</li>)}</ul>
+          </details>
+        ))}
       </div>
       <div>
         {handling.length > 0 ? (
