@@ -51,7 +51,7 @@ export async function seedDemo(em: EntityManager, issuer: string, now = new Date
       for (const [index, draft] of DEMO_PRODUCTS.entries()) {
         await keepProduct(own, { house, by: INES, now: new Date(now.getTime() - index * 60_000) }, demoId(`product ${draft.name}`), draft);
       }
-    });
+    }, { actor: { personId: null, name: 'Set-up of the demo' }, now: () => now });
   }
 }
 
