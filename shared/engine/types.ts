@@ -81,6 +81,7 @@ export type FindingKind =
   | 'wording-required'
   | 'wording-missing'
   | 'particular-missing'
+  | 'particular-uncertain'
   | 'claim-medicinal'
   | 'claim-contradicted'
   | 'claim-evidence'

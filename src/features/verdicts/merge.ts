@@ -96,6 +96,8 @@ export function cellWords(finding: Finding): { readonly figure: string; readonly
       return { figure: finding.effective ? `from ${sayDay(finding.effective.from)}` : 'later', against: measured };
     case 'date-not-covered':
       return { figure: 'not covered', against: '' };
+    case 'particular-uncertain':
+      return { figure: measured || 'open', against: limit ? `against ${limit}` : 'cannot tell' };
     case 'prohibited':
       return { figure: measured || 'present', against: 'prohibited' };
     default:

@@ -1,7 +1,7 @@
 /** A fact that conditions of the law turn on, in the words of the bench. */
 export interface FactWords {
   readonly label: string;
-  readonly kind: 'figure' | 'yes-no' | 'form';
+  readonly kind: 'figure' | 'yes-no' | 'form' | 'place' | 'text';
   readonly hint?: string;
 }
 
@@ -35,6 +35,30 @@ export const FACT_WORDS: Readonly<Record<string, FactWords>> = {
   wheatPeptideKilodalton: { label: 'Average size of the wheat protein’s peptides', kind: 'figure', hint: 'in kilodalton, from its certificate' },
 };
 
+/** Answers that the particulars of a label turn on: asked of the product, whatever is in it. */
+export const LABEL_FACTS: Readonly<Record<string, FactWords>> = {
+  madeIn: { label: 'Made in', kind: 'place', hint: 'decides where it is imported' },
+  imported: { label: 'Imported', kind: 'yes-no', hint: 'where it was made is not said' },
+  madeByNamedFirm: { label: 'The firm on the label made it', kind: 'yes-no', hint: 'for the US' },
+  functionClearFromPresentation: { label: 'Its look makes plain what it is', kind: 'yes-no', hint: 'then its function need not be printed' },
+  minimumDurabilityMonths: { label: 'Keeps unopened', kind: 'figure', hint: 'in months; up to 30 it bears a date' },
+  durabilityNotRelevant: { label: 'Does not spoil once opened, or is never opened', kind: 'yes-no', hint: 'single use, aerosol' },
+  freeSample: { label: 'Free sample', kind: 'yes-no' },
+  singleApplication: { label: 'For one application', kind: 'yes-no' },
+  numberPlainToSee: { label: 'Sold by number', kind: 'yes-no', hint: 'singly, or the number is plain to see' },
+  netContent: { label: 'Content of a pack that does not print it', kind: 'figure', hint: 'in g or ml' },
+  usualMeasure: { label: 'The trade sells it in this measure', kind: 'yes-no', hint: 'g where the law says ml, or the other way round' },
+  panelAreaSqCm: { label: 'Principal display panel', kind: 'figure', hint: 'in cm²; without it the label is measured' },
+  netContentHeightMm: { label: 'Height of the content’s figures', kind: 'figure', hint: 'in mm, on a label set elsewhere' },
+  netContentInBottom30: { label: 'Content stands in the bottom 30 %', kind: 'yes-no', hint: 'of the panel, for the US' },
+  eMark: { label: 'The e stands beside the content', kind: 'yes-no' },
+  eMarkHeightMm: { label: 'Height of the e', kind: 'figure', hint: 'in mm' },
+  destinations: { label: 'Sold in these Member States', kind: 'text', hint: 'by code, such as DE, FR' },
+  enclosedInformation: { label: 'A leaflet, tag or card bears a part', kind: 'yes-no' },
+  notPrepacked: { label: 'Packed at the point of sale', kind: 'yes-no' },
+  storageMatters: { label: 'It keeps only in certain conditions', kind: 'yes-no' },
+};
+
 /** What is asked of the product; what a substance is for is said with its material. */
 export function isProductFact(key: string): boolean {
   return key !== 'purpose';
@@ -43,5 +67,5 @@ export function isProductFact(key: string): boolean {
 /** Words for a fact's key, also for one that no one has named yet: `bodyPart` as `body part`. */
 export function sayFact(key: string): string {
   if (key === 'purpose') return 'what the substance is for, with its material';
-  return FACT_WORDS[key]?.label ?? key.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
+  return (FACT_WORDS[key] ?? LABEL_FACTS[key])?.label ?? key.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
 }

@@ -8,7 +8,7 @@ import { plainDate } from '#shared/kernel/plain-date.ts';
 /** Every kind there is: a new one does not compile until it stands here. */
 const KINDS: Readonly<Record<FindingKind, true>> = {
   'sum-mismatch': true, 'composition-incomplete': true, 'unknown-ingredient': true, 'order-uncertain': true, 'zone-uncertain': true, 'name-ambiguous': true, 'name-superseded': true,
-  prohibited: true, 'limit-exceeded': true, 'limit-uncertain': true, 'not-for-this-use': true, 'use-not-listed': true, 'wording-required': true, 'wording-missing': true, 'particular-missing': true,
+  prohibited: true, 'limit-exceeded': true, 'limit-uncertain': true, 'not-for-this-use': true, 'use-not-listed': true, 'wording-required': true, 'wording-missing': true, 'particular-missing': true, 'particular-uncertain': true,
   'claim-medicinal': true, 'claim-contradicted': true, 'claim-evidence': true, 'may-contain-misplaced': true, 'handling-limit': true, 'date-not-covered': true, upcoming: true,
 };
 const plain = (kind: FindingKind): Finding => ({ kind, severity: 'note', rule: 'a-rule', subject: 'Aqua', citation: 'A text', message: 'A message.' });
