@@ -29,6 +29,7 @@ export function HouseMenu({ session }: { session: Session }) {
         <>
           <p>{session.person.name}, {session.person.email}</p>
           <Link to={paths.house} onClick={close}>Addresses and members</Link>
+          <Link to={paths.trail} onClick={close}>Trail</Link>
           {others.map((house) => <button key={house.id} type="button" onClick={() => go.mutate(house.id)}>Go to {house.name}</button>)}
           <hr />
           <button type="button" onClick={() => signOut.mutate()}>Sign out</button>

@@ -13,6 +13,7 @@ export const paths = {
   verdicts: (id: string) => `/products/${id}/verdicts`,
   label: (id: string) => `/products/${id}/label`,
   report: (id: string) => `/products/${id}/report`,
+  productTrail: (id: string) => `/products/${id}/trail`,
   /** Reading a pasted ingredient list. */
   read: '/read',
   /** Every dated rule, from one market if told. */
@@ -23,6 +24,8 @@ export const paths = {
   dictionary: '/dictionary',
   entry: (inci: string) => `/dictionary/${encodeURIComponent(inci)}`,
   house: '/house',
+  /** What was done in the house, entry by entry. */
+  trail: '/trail',
 } as const;
 
 /** Rooms as they stand in the bar. */

@@ -35,6 +35,7 @@ export function routesOf(client: QueryClient): RouteObject[] {
                 { path: 'verdicts', lazy: page(client, () => import('#src/routes/product-verdicts.tsx')) },
                 { path: 'label', lazy: page(client, () => import('#src/routes/product-label.tsx')) },
                 { path: 'report', lazy: page(client, () => import('#src/routes/product-report.tsx')) },
+                { path: 'trail', lazy: page(client, () => import('#src/routes/product-trail.tsx')) },
               ],
             },
             {
@@ -51,6 +52,7 @@ export function routesOf(client: QueryClient): RouteObject[] {
             { path: 'dictionary', lazy: page(client, () => import('#src/routes/dictionary.tsx')) },
             { path: 'dictionary/:inci', lazy: page(client, () => import('#src/routes/dictionary-entry.tsx')) },
             { path: 'house', lazy: page(client, () => import('#src/routes/house.tsx')) },
+            { path: 'trail', lazy: page(client, () => import('#src/routes/trail.tsx')) },
             { path: '*', Component: NotFoundScreen },
           ],
         },

@@ -124,6 +124,7 @@ function ProductTabs({ page }: { page: ProductPage }) {
     { to: paths.verdicts(id) + search, word: 'Verdicts', mark },
     { to: paths.label(id) + search, word: 'Label' },
     { to: paths.report(id) + search, word: 'Report' },
+    { to: paths.productTrail(id) + search, word: 'Trail' },
   ];
   return <TabLinks label="Parts of the product" tabs={tabs} />;
 }
