@@ -78,6 +78,8 @@ export interface DocumentMaterial {
   readonly declareAs: 'ingredients' | 'parfum' | 'aroma';
   readonly composition: readonly DocumentPart[];
   readonly constituents: readonly DocumentConstituent[];
+  /** What its certificates say, by the key of a condition. */
+  readonly facts?: Readonly<Record<string, string | boolean>>;
 }
 
 export interface DocumentLine {
@@ -141,6 +143,7 @@ const material = z.looseObject({
   declareAs: z.enum(['ingredients', 'parfum', 'aroma']).optional(),
   composition: z.array(part).optional(),
   constituents: z.array(constituent).optional(),
+  facts: z.record(z.string(), z.union([z.string(), z.boolean(), quantity])).optional(),
 });
 const line = z.looseObject({
   material: z.string(),

@@ -38,6 +38,9 @@ export const handlingLimits = z.strictObject({
   note: textField.optional(),
 });
 
+/** Answers about the material itself: decimals as text, or yes and no. */
+export const materialFacts = z.record(z.string().max(60), z.union([z.string().max(200), z.boolean()])).refine((facts) => Object.keys(facts).length <= 100, 'A material holds at most 100 answers.');
+
 export const materialFields = z.strictObject({
   tradeName: nameField,
   supplier: z.string().trim().max(255),
@@ -48,6 +51,8 @@ export const materialFields = z.strictObject({
   currency: z.string().regex(/^[A-Z]{3}$/),
   notes: textField,
   handling: handlingLimits,
+  /** What its certificates say, by the key of a condition: decimals as text. Absent: nothing answered. */
+  facts: materialFacts.optional(),
 });
 export type MaterialFields = z.infer<typeof materialFields>;
 export type HandlingLimits = z.infer<typeof handlingLimits>;

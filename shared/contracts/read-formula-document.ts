@@ -1,7 +1,7 @@
 import { MARKETS, type Market } from '#shared/law/types.ts';
 import { DocumentWalk, isAbsent, isOver, show } from './document-walk.ts';
 import { readLabel } from './read-label.ts';
-import { readProduct } from './read-product.ts';
+import { readFacts, readProduct } from './read-product.ts';
 import type { DocumentConstituent, DocumentLine, DocumentMaterial, DocumentPart, DocumentShare, Fault, FormulaDocument } from './formula-document.ts';
 
 const PURPOSES = ['preservative', 'fragrance', 'colourant', 'uv-filter', 'other'] as const;
@@ -50,6 +50,7 @@ function readMaterials(walk: DocumentWalk, value: unknown): DocumentMaterial[] {
     }
     const composition = walk.list(object['composition'], `${at}/composition`, 1000).flatMap((part, place) => readPart(walk, part, `${at}/composition/${place}`));
     const constituents = walk.list(object['constituents'], `${at}/constituents`, 1000).flatMap((part, place) => readConstituent(walk, part, `${at}/constituents/${place}`));
+    const facts = readFacts(walk, object['facts'], `${at}/facts`);
     const supplier = walk.text(object['supplier'], `${at}/supplier`, { most: 500 });
     return [{
       id: id ?? '',
@@ -58,6 +59,7 @@ function readMaterials(walk: DocumentWalk, value: unknown): DocumentMaterial[] {
       declareAs: walk.choice(object['declareAs'], `${at}/declareAs`, ['ingredients', 'parfum', 'aroma'] as const) ?? 'ingredients',
       composition,
       constituents,
+      ...(Object.keys(facts).length > 0 && { facts }),
     }];
   });
 }

@@ -30,7 +30,7 @@ export function readProduct(
     ...(placedOnMarket !== undefined && { placedOnMarket }),
     ...(availableOn !== undefined && { availableOn }),
     flags: readFlags(walk, product),
-    facts: readFacts(walk, product['facts']),
+    facts: readFacts(walk, product['facts'], '/product/facts'),
     ...(readyForUse && { readyForUse }),
     ...(netContent && { netContent }),
     ...(durability && { durability }),
@@ -63,15 +63,15 @@ function readFlags(walk: DocumentWalk, product: Record<string, unknown>): Docume
 }
 
 /** An open map: texts, yes or no, and figures (kept as plain decimals). */
-function readFacts(walk: DocumentWalk, value: unknown): DocumentProduct['facts'] {
-  const facts = walk.object(value, '/product/facts');
+export function readFacts(walk: DocumentWalk, value: unknown, pointer: string): DocumentProduct['facts'] {
+  const facts = walk.object(value, pointer);
   if (!facts) return {};
   const entries = Object.entries(facts);
-  if (entries.length > 500) walk.fault('/product/facts', 'These are too many facts: at most 500 are read.');
+  if (entries.length > 500) walk.fault(pointer, 'These are too many facts: at most 500 are read.');
   const read: [string, string | boolean][] = [];
   for (const [key, fact] of entries.slice(0, 500)) {
     if (isAbsent(fact) || key === '__proto__') continue;
-    const at = `/product/facts/${key.replaceAll('~', '~0').replaceAll('/', '~1')}`;
+    const at = `${pointer}/${key.replaceAll('~', '~0').replaceAll('/', '~1')}`;
     if (typeof fact === 'boolean') read.push([key, fact]);
     else if (typeof fact === 'number') {
       const text = decimalText(fact);

@@ -115,8 +115,14 @@ export function productFacts(
       intimateHygiene: flag('intimateHygiene'),
     },
     facts: { ...category.facts, ...product.facts },
+    ...materialFacts(document),
     readyForUse: readyForUse(product.readyForUse),
   };
+}
+
+function materialFacts({ materials }: FormulaDocument): Pick<ProductFacts, 'materialFacts'> {
+  const answered = materials.filter(({ facts }) => facts !== undefined);
+  return answered.length === 0 ? {} : { materialFacts: new Map(answered.map(({ id, facts }) => [id, facts!])) };
 }
 
 function readDay(text: string | undefined): PlainDate | undefined {

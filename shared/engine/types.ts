@@ -18,6 +18,8 @@ export interface ProductFacts {
   readonly flags: Readonly<Record<ProductFlag, boolean>>;
   /** Answers given by the maker; absent keys are "cannot tell". Decimals as text. */
   readonly facts: Readonly<Record<string, string | boolean>>;
+  /** Answers given for a material, by the material's id; absent where none has any. */
+  readonly materialFacts?: ReadonlyMap<string, Readonly<Record<string, string | boolean>>>;
   /** Share of the product in the ready-for-use mixture: 1 when it is not diluted. */
   readonly readyForUse: Rational;
 }

@@ -106,6 +106,7 @@ export function toMaterialFields(material: DocumentMaterial): MaterialFields {
     currency: 'EUR',
     notes: '',
     handling: {},
+    ...(material.facts && { facts: { ...material.facts } }),
   };
 }
 

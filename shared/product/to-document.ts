@@ -84,6 +84,7 @@ export function toDocumentMaterial(material: MaterialFields & { readonly id: str
       declareAs: material.declareAs,
       composition: material.composition.flatMap(toPart),
       constituents: material.constituents.flatMap(toConstituent),
+      ...(material.facts && Object.keys(material.facts).length > 0 && { facts: material.facts }),
     };
     documents.set(material, found);
   }

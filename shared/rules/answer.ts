@@ -1,3 +1,4 @@
+import { isMaterialFact } from '#shared/law/material-facts.ts';
 import { assertNever } from '#shared/kernel/errors.ts';
 import { compare, parseDecimal, type Rational } from '#shared/kernel/rational.ts';
 import type { ProductFacts, Substance } from '#shared/engine/types.ts';
@@ -75,7 +76,31 @@ function answerFact(condition: FactCondition, question: Question): Answer {
     const least = isWithin(condition, min);
     return least === isWithin(condition, max) ? least : undefined;
   }
-  const fact = readFact(condition.fact, question);
+  const asMaterial = answerMaterials(condition, question);
+  if (asMaterial !== 'not-asked') return asMaterial;
+  return judgeFact(condition, readFact(condition.fact, question), question);
+}
+
+/**
+ * A fact about the material is asked of every material that brings the substance: what the law
+ * bounds from above must hold in each, what it warns of is there where one has it. Materials
+ * without an answer take the product's.
+ */
+function answerMaterials(condition: FactCondition, question: Question): Answer | 'not-asked' {
+  const { materialFacts, facts } = question.facts;
+  if (!materialFacts || !question.substance || !isMaterialFact(condition.fact)) return 'not-asked';
+  const ids = new Set(question.substance.sources.map(({ materialId }) => materialId));
+  const answers = [...ids].map((id) => judgeFact(condition, materialFacts.get(id)?.[condition.fact] ?? facts[condition.fact], question));
+  if (isWarning(condition)) return answers.includes(true) ? true : answers.includes(undefined) ? undefined : false;
+  return answers.includes(false) ? false : answers.includes(undefined) ? undefined : true;
+}
+
+/** A condition that speaks of what is wrong with a material: too much of something, or a missing proof. */
+function isWarning({ above, least, is }: FactCondition): boolean {
+  return above !== undefined || least !== undefined || (is?.includes(false) ?? false);
+}
+
+function judgeFact(condition: FactCondition, fact: string | boolean | undefined, question: Question): Answer {
   if (fact === undefined) {
     question.needs.add(condition.fact);
     return undefined;

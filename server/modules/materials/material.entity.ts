@@ -20,6 +20,8 @@ export const Material = defineEntity({
     currency: p.text(),
     notes: p.text(),
     handling: p.json<MaterialFields['handling']>(),
+    /** What its certificates say: figures as text, or yes and no. */
+    facts: p.json<Record<string, string | boolean>>(),
     /** Lower-case trade name, supplier and INCI names, for the list's search. */
     searchText: p.text(),
     archived: p.boolean().default(false),

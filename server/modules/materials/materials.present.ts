@@ -21,6 +21,7 @@ export function presentMaterial({ material, documents, usedIn }: MaterialView): 
     currency: material.currency,
     notes: material.notes,
     handling: material.handling,
+    facts: material.facts,
     documents: documents.map(presentDocument),
     usedIn: usedIn.map((one) => ({ ...one })),
   };

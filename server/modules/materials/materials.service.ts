@@ -130,7 +130,7 @@ function requireSound(fields: MaterialFields): void {
 
 /** The columns of a material's fields, with the text that the list searches. */
 export function toMaterialColumns(fields: MaterialFields) {
-  const { tradeName, supplier, declareAs, composition, constituents, pricePerKg, currency, notes, handling } = fields;
+  const { tradeName, supplier, declareAs, composition, constituents, pricePerKg, currency, notes, handling, facts = {} } = fields;
   const searchText = toSearchText([tradeName, supplier, ...composition.map((line) => line.inci)]);
-  return { tradeName, supplier, declareAs, composition, constituents, pricePerKg, currency, notes, handling, searchText };
+  return { tradeName, supplier, declareAs, composition, constituents, pricePerKg, currency, notes, handling, facts, searchText };
 }

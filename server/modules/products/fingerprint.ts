@@ -2,7 +2,7 @@ import type { MaterialFields } from '#shared/contracts/materials.contract.ts';
 import { decimal, toDecimal } from '#shared/kernel/rational.ts';
 
 /** A text in which two materials are equal exactly when they say the same; figures count by value, `5.0` as `5`. */
-export function fingerprint(fields: Pick<MaterialFields, 'tradeName' | 'supplier' | 'declareAs' | 'composition' | 'constituents'>): string {
+export function fingerprint(fields: Pick<MaterialFields, 'tradeName' | 'supplier' | 'declareAs' | 'composition' | 'constituents' | 'facts'>): string {
   const line = (part: MaterialFields['composition'][number] | MaterialFields['constituents'][number]) => {
     const { percent, min, typical, max, ...rest } = part;
     const shares = [percent, min, typical, max].map((share) => (share === undefined ? null : toDecimal(decimal(share), 60)));
@@ -12,6 +12,7 @@ export function fingerprint(fields: Pick<MaterialFields, 'tradeName' | 'supplier
       .sort(([a], [b]) => (a < b ? -1 : 1));
     return [shares, words];
   };
-  const { tradeName, supplier, declareAs, composition, constituents } = fields;
-  return JSON.stringify([tradeName, supplier, declareAs, composition.map(line), constituents.map(line)]);
+  const { tradeName, supplier, declareAs, composition, constituents, facts = {} } = fields;
+  const answers = Object.entries(facts).sort(([a], [b]) => (a < b ? -1 : 1));
+  return JSON.stringify([tradeName, supplier, declareAs, composition.map(line), constituents.map(line), answers]);
 }
