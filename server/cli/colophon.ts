@@ -1,10 +1,7 @@
 import { plainDate, type PlainDate } from '#shared/kernel/plain-date.ts';
 import { readArguments, USAGE, type Arguments } from './arguments.ts';
-import { checkFile } from './check.ts';
-import { checkLines } from './check-lines.ts';
 import { Unusable } from './input.ts';
 import { standardIo, type Io } from './io.ts';
-import { openKnowledge } from './tables.ts';
 
 /** Status of an input that is not usable. */
 const UNUSABLE = 2;
@@ -35,10 +32,17 @@ async function runCommand(given: Arguments, root: string, io: Io): Promise<numbe
     const { writeSchema } = await import('./schema.ts');
     return writeSchema(given.file, io);
   }
+  const { openKnowledge } = await import('./tables.ts');
   const knows = openKnowledge(root, today());
   switch (given.command) {
-    case 'check':
-      return given.file.endsWith('.jsonl') ? checkLines(given, knows, { io, root }) : checkFile(given, knows, io);
+    case 'check': {
+      if (given.file.endsWith('.jsonl')) {
+        const { checkLines } = await import('./check-lines.ts');
+        return checkLines(given, knows, { io, root });
+      }
+      const { checkFile } = await import('./check.ts');
+      return checkFile(given, knows, io);
+    }
     case 'label': {
       const { writeLabel } = await import('./label.ts');
       return writeLabel({ ...given, out: given.out! }, knows, io);

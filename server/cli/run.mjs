@@ -1,20 +1,24 @@
 /**
- * `npm run colophon`: bundles the command line when its sources are newer than the last bundle
- * and runs it in this process. Needs the packages of `npm ci` and nothing else.
+ * `npm run colophon`: bundles the command line and its tables when any of their sources has changed
+ * since the last bundle, and runs it in this process. Needs the packages of `npm ci` and nothing else.
  */
-import { existsSync, mkdirSync, readdirSync, renameSync, rmSync, statSync } from 'node:fs';
+import { createHash } from 'node:crypto';
+import { existsSync, mkdirSync, readdirSync, readFileSync, renameSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 
 const ROOT = resolve(dirname(fileURLToPath(import.meta.url)), '../..');
-const SOURCES = ['server/cli', 'server/artwork', 'shared', 'data/law', 'data/parameters'];
+const SOURCES = ['server/cli', 'server/artwork', 'shared', 'data/law', 'data/parameters', 'data/dictionary'];
 const BUNDLES = join(ROOT, 'build/cli');
 
-/** The newest change below the folders, as text that names a bundle.
- * @param {readonly string[]} folders */
+/**
+ * What the files below the folders are, as text that names a bundle: each one's path, size and times.
+ * The time of the last change of state is the system's own: a file that is put back with an older
+ * date still counts as changed.
+ * @param {readonly string[]} folders
+ */
 function stampOf(folders) {
-  let newest = 0;
-  let count = 0;
+  const hash = createHash('sha1');
   const queue = folders.map((folder) => join(ROOT, folder));
   while (queue.length > 0) {
     const folder = /** @type {string} */ (queue.pop());
@@ -22,15 +26,26 @@ function stampOf(folders) {
       const path = join(folder, entry.name);
       if (entry.isDirectory()) queue.push(path);
       else {
-        count += 1;
-        newest = Math.max(newest, statSync(path).mtimeMs);
+        const { size, mtimeMs, ctimeMs } = statSync(path);
+        hash.update(`${path}|${size}|${mtimeMs}|${ctimeMs}\n`);
       }
     }
   }
-  return `${Math.round(newest * 1000)}-${count}`;
+  return hash.digest('hex');
 }
 
-/** @param {string} stamp */
+/**
+ * A table of law as text that is parsed at the start: as program text it would take longer.
+ * @type {import('esbuild').Plugin}
+ */
+const tablesAsText = {
+  name: 'tables-as-text',
+  setup({ onLoad }) {
+    onLoad({ filter: /\.json$/ }, ({ path }) => ({ contents: `export default JSON.parse(${JSON.stringify(JSON.stringify(JSON.parse(readFileSync(path, 'utf8'))))})`, loader: 'js' }));
+  },
+};
+
+/** @param {string} stamp @returns {Promise<string>} the name of the bundle made */
 async function bundle(stamp) {
   const { build } = await import('esbuild');
   const making = join(BUNDLES, `making-${process.pid}`);
@@ -38,7 +53,7 @@ async function bundle(stamp) {
   try {
     await build({
       absWorkingDir: ROOT,
-      entryPoints: { colophon: 'server/cli/colophon.ts', 'line-worker': 'server/cli/line-worker.ts' },
+      entryPoints: { colophon: 'server/cli/colophon.ts', 'line-worker': 'server/cli/line-worker.ts', pack: 'server/cli/pack.ts' },
       outdir: making,
       outExtension: { '.js': '.mjs' },
       bundle: true,
@@ -47,14 +62,20 @@ async function bundle(stamp) {
       platform: 'node',
       target: 'node20',
       packages: 'external',
+      plugins: [tablesAsText],
       logLevel: 'silent',
     });
+    const { packDictionary } = await import(pathToFileURL(join(making, 'pack.mjs')).href);
+    writeFileSync(join(making, 'dictionary.json'), packDictionary(ROOT));
+    // What changed while the bundle was made is not in its name: the next run makes it again.
+    if (stampOf(SOURCES) !== stamp) stamp = `of-${process.pid}`;
     // Another run may have made the same bundle in the meantime: either will do.
     if (!existsSync(join(BUNDLES, stamp))) renameSync(making, join(BUNDLES, stamp));
   } finally {
     rmSync(making, { recursive: true, force: true });
   }
   sweep(stamp);
+  return stamp;
 }
 
 /** Removes bundles of older sources, unless a run may still be using them. @param {string} keep */
@@ -73,9 +94,8 @@ process.stdout.on('error', (error) => {
 
 try {
   const stamp = stampOf(SOURCES);
-  const entry = join(BUNDLES, stamp, 'colophon.mjs');
-  if (!existsSync(entry)) await bundle(stamp);
-  const { runColophon } = await import(pathToFileURL(entry).href);
+  const made = existsSync(join(BUNDLES, stamp, 'colophon.mjs')) ? stamp : await bundle(stamp);
+  const { runColophon } = await import(pathToFileURL(join(BUNDLES, made, 'colophon.mjs')).href);
   process.exitCode = await runColophon(process.argv.slice(2), ROOT);
 } catch (error) {
   const isMissing = error instanceof Error && 'code' in error && error.code === 'ERR_MODULE_NOT_FOUND';

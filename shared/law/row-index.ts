@@ -37,8 +37,11 @@ export class RowIndex {
 
   #add(row: LawRow, member: Member): void {
     const hit = { row, member };
-    const keys = new Set([member.name, ...(member.otherNames ?? [])].map(foldName));
-    for (const key of keys) if (key) put(this.#byName, key, hit);
+    const name = foldName(member.name);
+    if (name) put(this.#byName, name, hit);
+    if (member.otherNames && member.otherNames.length > 0) {
+      for (const key of new Set(member.otherNames.map(foldName))) if (key && key !== name) put(this.#byName, key, hit);
+    }
     if (member.casDecides === false) return;
     for (const cas of member.cas ?? []) put(this.#byCas, cas, hit);
   }
