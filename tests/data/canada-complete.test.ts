@@ -253,6 +253,9 @@ describe('words for the label', () => {
   test('the caution on eucalyptus is due strictly above 0.022 %, and not in a bar', () => {
     const due = (percent: string, category: string): number => judge([{ name: 'Eucalyptus Globulus Leaf Oil', percent }], { ...CA, category }).requiredWording.filter(({ rule }) => rule === 'ca/hotlist/eucalyptus-oil').length;
     expect([due('0.022', 'body-lotion'), due('0.0220001', 'body-lotion'), due('1', 'soap-bar')].map((count) => count > 0)).toEqual([false, true, false]);
+    const balm = (facts: Asked['facts']): readonly (string | undefined)[] => judge([{ name: 'Eucalyptus Globulus Leaf Oil', percent: '1' }], { ...CA, category: 'body-balm', facts }).findings.filter(({ kind, rule }) => kind === 'wording-required' && rule === 'ca/hotlist/eucalyptus-oil').map(({ certainty }) => certainty);
+    // A balm is taken as solid until it is said to be otherwise.
+    expect([balm({}), balm({ physicalForm: 'cream' }), balm({ physicalForm: 'solid' })]).toEqual([[], ['certain'], []]);
   });
 
   test('the sunburn caution is due above 3 % of alpha hydroxy acids', () => {
