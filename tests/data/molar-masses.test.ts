@@ -1,5 +1,6 @@
+import { MF } from 'mf-parser';
 import { expect, test } from 'vitest';
-import { compare, decimal, multiply, add, ZERO, type Rational } from '#shared/kernel/rational.ts';
+import { add, compare, decimal, multiply, subtract, toDecimal, ZERO, type Rational } from '#shared/kernel/rational.ts';
 import { foldName } from '#shared/law/fold.ts';
 import { lawTables } from '#shared/law/tables.ts';
 import type { Member } from '#shared/law/types.ts';
@@ -53,4 +54,54 @@ test('hardly a factor of the tables is without a formula here', () => {
   expect(members.length - members.filter((member) => open.includes(member.name)).length).toBeGreaterThan(200);
   // Equal parts of dye and lignosulfate are a share by weight, not a ratio of molar masses.
   expect(open).toContain('Disperse Black 9');
+});
+
+/**
+ * How far the weight of an element in a natural material may lie from the abridged figure above: the ends of the
+ * intervals, or the uncertainties, of IUPAC's standard atomic weights 2021 (from memory), and the last digit cut off. Mercury alone is wider: IUPAC gives 200.592 ± 0.003, and the
+ * library adds its isotopes up to 200.599.
+ */
+const SPREAD: Readonly<Record<string, string>> = {
+  Ag: '0.003', Al: '0.0005', B: '0.011', Ba: '0.01', Br: '0.003', C: '0.0014', Ca: '0.004', Cl: '0.007', F: '0.0005', H: '0.0003', Hg: '0.0095', K: '0.0005',
+  Li: '0.057', Mg: '0.002', N: '0.0007', Na: '0.0005', O: '0.0008', P: '0.0005', S: '0.016', Se: '0.008', Si: '0.001', Sn: '0.007', Sr: '0.01', Zn: '0.02',
+};
+
+function spreadOf(formula: string): Rational {
+  return [...formula.matchAll(/([A-Z][a-z]?)(\d*)/g)].reduce((sum, [, element, count]) => add(sum, multiply(decimal(SPREAD[element!]!), decimal(count || '1'))), ZERO);
+}
+
+/** The average molecular mass as the chemistry library mf-parser 3.9.3 has it, from isotopes and their abundances. */
+function outsideMass(formula: string): Rational {
+  return decimal(new MF(formula).getInfo().mass.toFixed(9));
+}
+
+function isNear(a: Rational, b: Rational, most: Rational): boolean {
+  return compare(subtract(a, b), most) <= 0 && compare(subtract(b, a), most) <= 0;
+}
+
+/** The factor of the tables against the library's masses: `times` × mass and `over` × equivalents, apart by no more than the weights' own spread. */
+function agreesOutside({ factor }: Member, { formula, basis, times }: (typeof cases)[number]): boolean {
+  const [up, down, count] = [decimal(factor!.times), decimal(factor!.over), decimal(String(times))];
+  const most = add(multiply(up, spreadOf(formula)), multiply(multiply(down, count), spreadOf(basis)));
+  return isNear(multiply(up, outsideMass(formula)), multiply(multiply(down, count), outsideMass(basis)), most);
+}
+
+test('every mass agrees with a chemistry library within the spread of natural atomic weights', () => {
+  const formulas = [...new Set(cases.flatMap(({ formula, basis }) => [formula, basis]))];
+  const apart = formulas.filter((formula) => !isNear(massOf(formula), outsideMass(formula), spreadOf(formula)));
+  console.info(`Masses compared with mf-parser: ${String(formulas.length)}`);
+  expect(apart.map((formula) => `${formula}: ${toDecimal(massOf(formula), 4)}, mf-parser ${toDecimal(outsideMass(formula), 4)}`)).toEqual([]);
+  expect(isNear(massOf('C7H5KO2'), outsideMass('C7H5NaO2'), spreadOf('C7H5NaO2'))).toBe(false);
+  expect(isNear(massOf('C7H6NaO2'), outsideMass('C7H5NaO2'), spreadOf('C7H5NaO2'))).toBe(false);
+});
+
+test('every factor of the tables agrees with a chemistry library', () => {
+  const apart = members.filter((member) => {
+    const formulas = cases.filter(({ name }) => foldName(name) === foldName(member.name));
+    return formulas.length > 0 && !formulas.some((one) => agreesOutside(member, one));
+  });
+  expect(apart.map(({ name, factor }) => `${name} ${factor!.times}/${factor!.over}`)).toEqual([]);
+  const benzoate = cases.find(({ name }) => name === 'Sodium Benzoate')!;
+  // One hydrogen too few in the acid.
+  expect(agreesOutside({ name: 'Sodium Benzoate', factor: { times: '121.115', over: '144.105' } }, benzoate)).toBe(false);
 });
