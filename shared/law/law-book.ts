@@ -27,6 +27,8 @@ export interface WordingText {
   readonly place?: 'principal-panel' | 'label';
   /** False where the words point at the official text instead of being it. */
   readonly isOfficialText: boolean;
+  /** True where no text is held at all, so that a label cannot be compared with it. */
+  readonly isPointer?: true;
 }
 
 export type ProductWarning = Omit<ProductWarningJson, 'from' | 'until'> & { readonly from?: Dates; readonly until?: Dates };
@@ -211,7 +213,7 @@ function findWording(wordings: ReadonlyMap<string, WordingJson>, id: string, lan
   const place = wording.place ? { place: wording.place } : {};
   const text = wording.text[lang];
   if (text !== undefined) {
-    return { text, lang, citation: wording.citation, isOfficialText: !(wording.unchecked?.includes(lang) ?? false), ...place };
+    return { text, lang, citation: wording.citation, isOfficialText: !wording.pointer && !(wording.unchecked?.includes(lang) ?? false), ...(wording.pointer ? { isPointer: true as const } : {}), ...place };
   }
   const english = wording.text['en'];
   if (english === undefined) throw new DomainError(`wording "${id}" has no English text`);

@@ -90,6 +90,8 @@ export interface WordingJson {
   readonly text: Readonly<Record<string, string>>;
   /** Languages whose text is not read from the act in force and needs checking. */
   readonly unchecked?: readonly string[];
+  /** True where no text is held in any language: what stands here says where to take it. */
+  readonly pointer?: true;
   readonly citation: string;
   readonly place?: 'principal-panel' | 'label';
 }

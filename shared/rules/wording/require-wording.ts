@@ -76,7 +76,8 @@ export function presentWording(due: readonly DueWording[], context: Context): Re
 export function judgeWordings(due: readonly DueWording[], context: Context): Finding[] {
   const findings: Finding[] = [];
   for (const one of due) {
-    const english = context.law.wording(one.wordingId, 'en').text;
+    const { text: english, isPointer } = context.law.wording(one.wordingId, 'en');
+    const must = isPointer ? 'must carry words that are not held here' : 'must say';
     const common = { rule: one.rule, citation: one.citation, ...(one.sourcing && one.sourcing !== 'official' ? { sourcing: one.sourcing } : {}), ...(one.reading ? { reading: one.reading } : {}) };
     const isOpen = one.certainty === 'possible';
     findings.push({
@@ -85,11 +86,11 @@ export function judgeWordings(due: readonly DueWording[], context: Context): Fin
       severity: isOpen && one.needs.length > 0 ? 'decide' : 'note',
       subject: one.subject,
       certainty: one.certainty,
-      message: isOpen ? `It cannot be told yet whether the label must say: ${english}` : `The label must say: ${english}`,
+      message: isOpen ? `It cannot be told yet whether the label ${must}: ${english}` : `The label ${must}: ${english}`,
       remedy: isOpen && one.needs.length > 0 ? `Answer what is open: ${one.needs.join(', ')}.` : 'Print these words on container and packaging.',
       ...(isOpen && one.needs.length > 0 ? { needs: one.needs } : {}),
     });
-    if (!isOpen && isMissing(one.wordingId, context)) {
+    if (!isOpen && !isPointer && isMissing(one.wordingId, context)) {
       findings.push({ ...common, kind: 'wording-missing', severity: 'stop', subject: 'warnings', members: [one.subject], message: `The label's warnings do not say: ${english}`, remedy: 'Add these words to the warnings.' });
     }
   }

@@ -5,6 +5,13 @@ const retinol = [{ name: 'Retinol', percent: '0.1' }];
 const lotion: Asked = { category: 'face-cream' };
 
 describe('required wording', () => {
+  test('where no text is held, its place is told and no label is blamed for lacking it', () => {
+    const verdict = judge([{ name: 'Glycolic Acid', percent: '5' }], { market: 'CA', category: 'face-cream', particulars: { warnings: [] } });
+    expect(said(verdict, 'wording-missing')).toEqual([]);
+    expect(said(verdict, 'wording-required')).toEqual(['wording-required Glycolic Acid ca/hotlist/alpha-hydroxy-acids']);
+    expect(verdict.requiredWording.map(({ lang, isOfficialText }) => [lang, isOfficialText])).toEqual([['en', false], ['fr', false]]);
+  });
+
   test('the text is given in every language held, official or marked', () => {
     const texts = judge(retinol, lotion).requiredWording;
     expect(texts.map((one) => [one.lang, one.isOfficialText])).toEqual([['en', true], ['de', true]]);
