@@ -17,6 +17,8 @@ import { countFindings, mergeFindings, type Counts, type MergedFinding } from '#
 import type { LedgerNote } from '#src/features/verdicts/note-row.tsx';
 import { NotChecked } from '#src/features/verdicts/not-checked.tsx';
 import { RoomLeft } from '#src/features/verdicts/room-left.tsx';
+import { findMaterialQuestion } from '#src/features/workspace/material-question.ts';
+import { factAnchor } from '#src/features/materials/certificate-fields.tsx';
 import { sayFact } from '#src/features/workspace/fact-words.ts';
 import { useProductPage } from '#src/features/workspace/product-page.ts';
 import { useRemedies } from '#src/features/workspace/use-remedies.ts';
@@ -31,6 +33,7 @@ export function Component() {
   const results = useMemo(() => MARKETS.flatMap((market) => live.all.get(market) ?? []), [live.all]);
   const merged = useMemo(() => mergeFindings(results), [results]);
   const lines = draft.formula.phases.flatMap((phase) => phase.lines);
+  const used = useMemo(() => [...new Set(draft.formula.phases.flatMap((phase) => phase.lines.map(({ materialId }) => materialId)))].flatMap((id) => shelf.byId.get(id) ?? []), [draft.formula, shelf]);
   const remedies = useRemedies(draft, live, isReadOnly);
   const headroom = useHeadroom(live.view.result.headroom);
   const { law } = page.engine;
@@ -53,6 +56,8 @@ export function Component() {
     if (remedy) return <Button small weight="act" onClick={() => change(setGrams(remedy.lineId, remedy.grams))}>Set {remedy.grams} g of {nameOf(remedy.materialId)}</Button>;
     const asked = finding.lead.needs ?? [];
     if (finding.lead.kind === 'claim-evidence' && asked.length === 0) return <a className="btn small" href="#claims">{sayPapers(papersOf(finding.lead.subject))}</a>;
+    const question = asked.length > 0 ? findMaterialQuestion(finding.lead, used) : undefined;
+    if (question) return <Link className="btn small" to={`${paths.material(question.material.id)}#${factAnchor(question.fact)}`}>Answer with {question.material.tradeName}: {sayFact(question.fact)}</Link>;
     return asked.length > 0 ? <Link className="btn small" to={`${paths.product(page.id)}${page.search}#particulars`}>Answer: {asked.map(sayFact).join(', ')}</Link> : null;
   };
   const waysOf = (finding: MergedFinding) => {

@@ -154,10 +154,10 @@ function lookAtHeight(check: { readonly height: string; readonly fact: string },
   return compare(read, decimal(check.height)) >= 0 ? MET : { met: false, figures: { measured: text!, limit: check.height, unit: 'mm' } };
 }
 
-function lookAtZone(zone: { readonly over: string; readonly fact: string }, context: Context): Look {
+function lookAtZone(zone: { readonly over: string; readonly asks: string }, context: Context): Look {
   const figure = figureOf('sq-in', context);
   if (figure && compare(figure.value, decimal(zone.over)) <= 0) return MET;
-  const said = context.facts.facts[zone.fact];
+  const said = context.facts.facts[zone.asks];
   if (said === true) return MET;
   if (said === undefined || !figure) return { met: undefined, open: 'The label set here keeps it; where it stands on another is not entered.' };
   return { met: false, figures: { arithmetic: [{ step: figure.step, figure: `over ${zone.over} sq in` }] } };

@@ -30,7 +30,7 @@ export type ParticularCheck =
   /** Least height in mm of what a fact measures. */
   | { readonly height: string; readonly fact: string }
   /** Above this area in square inches the content stands in the bottom 30 %, as a fact says. */
-  | { readonly zone: { readonly over: string; readonly fact: string } }
+  | { readonly zone: { readonly over: string; readonly asks: string } }
   /** Languages of the label, or those of the countries it goes to. */
   | { readonly languages: readonly string[] | 'destinations' }
   | { readonly any: readonly ParticularCheck[] }

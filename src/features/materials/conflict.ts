@@ -1,3 +1,4 @@
+import { MATERIAL_FACTS } from '#shared/law/material-facts.ts';
 import type { Material, MaterialFields } from '#shared/contracts/materials.contract.ts';
 
 /** A part of a material that two people may have changed, as it is chosen in one piece. */
@@ -18,6 +19,7 @@ const PARTS = {
   price: ['Price per kg', ['pricePerKg', 'currency']],
   notes: ['Notes', ['notes']],
   handling: ['Handling limits', ['handling']],
+  facts: ['Certificates', ['facts']],
 } as const satisfies Record<string, readonly [string, readonly (keyof MaterialFields)[]]>;
 export type PartKey = keyof typeof PARTS;
 export type Side = 'mine' | 'theirs';
@@ -61,6 +63,8 @@ function sayPart(key: PartKey, fields: MaterialFields): string {
       const { heatLimitC, phFrom, phTo, hydrateHours, note } = fields.handling;
       return [heatLimitC && `not above ${heatLimitC} °C`, (phFrom || phTo) && `pH ${phFrom ?? ''} to ${phTo ?? ''}`, hydrateHours && `${hydrateHours} h to hydrate`, note].filter(Boolean).join('\n') || 'none';
     }
+    case 'facts':
+      return Object.entries(fields.facts ?? {}).map(([fact, value]) => `${MATERIAL_FACTS[fact]?.label ?? fact}: ${value === true ? 'yes' : value === false ? 'no' : value}`).join('\n') || 'none';
     case 'declareAs':
       return { ingredients: 'by its ingredients', parfum: 'as perfume', aroma: 'as flavour' }[fields.declareAs];
     default:

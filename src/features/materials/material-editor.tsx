@@ -9,6 +9,7 @@ import { Banner } from '#src/ui/banner.tsx';
 import { Button } from '#src/ui/button.tsx';
 import { ArchiveButton } from './archive-button.tsx';
 import { BuyingFields, NotesField } from './buying-fields.tsx';
+import { CertificateFields } from './certificate-fields.tsx';
 import { CompositionTable } from './composition-table.tsx';
 import { ConflictDialog } from './conflict-dialog.tsx';
 import { ConstituentTable } from './constituent-table.tsx';
@@ -64,6 +65,7 @@ export function MaterialEditor({ material, houseId, unit, mayEdit, tradeName = '
           <section className="ed" aria-label="Composition"><h3 className="top">Composition</h3><CompositionTable onPaste={() => setPasting(true)} /></section>
           <section className="ed" aria-label="Constituents"><h3 className="top">Constituents</h3><ConstituentTable /></section>
           <section className="ed" aria-label="Handling"><h3 className="top">What it does not bear</h3><HandlingFields unit={unit} /></section>
+          <section className="ed" aria-label="Certificates"><h3 className="top">What its certificates say</h3><CertificateFields /></section>
           <section className="ed" aria-label="Notes"><NotesField /></section>
         </fieldset>
       </form>

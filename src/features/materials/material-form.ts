@@ -1,4 +1,5 @@
 import type { CompositionLine, ConstituentLine, MaterialFields } from '#shared/contracts/materials.contract.ts';
+import { MATERIAL_FACTS } from '#shared/law/material-facts.ts';
 import { readDecimal } from '#src/lib/say.ts';
 
 /** A share as it is typed: one figure, or a least and a most. */
@@ -38,15 +39,21 @@ export interface MaterialForm {
     basis: '' | 'supplier' | 'common-practice';
     note: string;
   };
+  /** Answers about the material itself: text as typed, yes and no as `true` and `false`. */
+  facts: Record<string, string>;
 }
 
 export const emptyPart: PartFields = { inci: '', cas: '', usName: '', purpose: '', isNano: false, isIncidental: false, least: '', most: '', typical: '' };
 export const emptyConstituent: ConstituentFields = { name: '', cas: '', basis: '', least: '', most: '', typical: '' };
 
+/** Every question stands in the form, so that drawing one changes nothing. */
+const noFacts: Readonly<Record<string, string>> = Object.fromEntries(Object.keys(MATERIAL_FACTS).map((key) => [key, '']));
+
 export function emptyMaterial(tradeName = ''): MaterialForm {
   return {
     tradeName, supplier: '', declareAs: 'ingredients', composition: [{ ...emptyPart }], constituents: [], pricePerKg: '', currency: 'EUR', notes: '',
     handling: { heatLimitC: '', phFrom: '', phTo: '', hydrateHours: '', basis: '', note: '' },
+    facts: { ...noFacts },
   };
 }
 
@@ -65,6 +72,7 @@ export function formOf(material: MaterialFields): MaterialForm {
       heatLimitC: handling.heatLimitC ?? '', phFrom: handling.phFrom ?? '', phTo: handling.phTo ?? '',
       hydrateHours: handling.hydrateHours ?? '', basis: handling.basis ?? '', note: handling.note ?? '',
     },
+    facts: { ...noFacts, ...Object.fromEntries(Object.entries(material.facts ?? {}).map(([key, value]) => [key, String(value)])) },
   };
 }
 
@@ -102,7 +110,14 @@ export function bodyOf(form: MaterialForm): unknown {
       heatLimitC: readDecimal(handling.heatLimitC), phFrom: readDecimal(handling.phFrom), phTo: readDecimal(handling.phTo),
       hydrateHours: readDecimal(handling.hydrateHours), basis: handling.basis, note: handling.note,
     }),
+    facts: Object.fromEntries(Object.entries(form.facts ?? {}).filter(([, value]) => value.trim() !== '').map(([key, value]) => [key, factBody(key, value)])),
   };
+}
+
+/** A figure as a plain decimal; yes and no as what they are. */
+function factBody(key: string, value: string): string | boolean {
+  const isYesNo = MATERIAL_FACTS[key] ? MATERIAL_FACTS[key].kind === 'yes-no' : value === 'true' || value === 'false';
+  return isYesNo ? value === 'true' : readDecimal(value);
 }
 
 function shareBody(share: ShareFields): Record<string, string> {

@@ -1,3 +1,5 @@
+import { isMaterialFact, MATERIAL_FACTS } from '#shared/law/material-facts.ts';
+
 /** A fact that conditions of the law turn on, in the words of the bench. */
 export interface FactWords {
   readonly label: string;
@@ -20,19 +22,10 @@ export const FACT_WORDS: Readonly<Record<string, FactWords>> = {
   addedAsSuch: { label: 'The substance is added as such', kind: 'yes-no', hint: 'not only inside an oil or extract' },
   exfoliatingAcid: { label: 'The acid is there to exfoliate', kind: 'yes-no' },
   plasticParticlesAsExfoliant: { label: 'Plastic particles that scrub', kind: 'yes-no' },
-  laurelOilFromSeeds: { label: 'The laurel oil is pressed from the seeds', kind: 'yes-no' },
-  titaniumDioxideCoatedWithManganeseDioxide: { label: 'Titanium dioxide coated with manganese dioxide', kind: 'yes-no' },
-  fullRefiningHistory: { label: 'The full refining history of the mineral oil is known', kind: 'yes-no', hint: 'and its feedstock is no carcinogen' },
-  butadieneInMaterial: { label: 'Butadiene in the material', kind: 'figure', hint: 'in percent, from its certificate' },
-  benzeneInMaterial: { label: 'Benzene in the material', kind: 'figure', hint: 'in percent, from its certificate' },
-  benzoPyreneInMaterial: { label: 'Benzo[a]pyrene in the material', kind: 'figure', hint: 'in percent, from its certificate' },
-  dmsoExtractOfMaterial: { label: 'DMSO extract of the material, IP 346', kind: 'figure', hint: 'in percent, from its certificate' },
-  peanutProteinPpm: { label: 'Peanut protein in the oil', kind: 'figure', hint: 'in ppm, from its certificate' },
   flameProjectionCm: { label: 'Flame projection of the aerosol', kind: 'figure', hint: 'in centimetres, 0 where there is none' },
   flashback: { label: 'The flame runs back to the pack', kind: 'yes-no' },
   packHolds5MlMethylAlcohol: { label: 'One pack holds 5 mL or more of methyl alcohol', kind: 'yes-no' },
   packHoldsBromateLimit: { label: 'One pack holds 600 mg of sodium bromate or 50 mg of potassium bromate', kind: 'yes-no', hint: 'or more' },
-  wheatPeptideKilodalton: { label: 'Average size of the wheat protein’s peptides', kind: 'figure', hint: 'in kilodalton, from its certificate' },
 };
 
 /** Answers that the particulars of a label turn on: asked of the product, whatever is in it. */
@@ -59,13 +52,18 @@ export const LABEL_FACTS: Readonly<Record<string, FactWords>> = {
   storageMatters: { label: 'It keeps only in certain conditions', kind: 'yes-no' },
 };
 
-/** What is asked of the product; what a substance is for is said with its material. */
+/** What is asked of the product; what a substance is for, and what certificates say, is said with its material. */
 export function isProductFact(key: string): boolean {
-  return key !== 'purpose';
+  return key !== 'purpose' && !isMaterialFact(key);
+}
+
+/** The words of a fact, wherever it is asked. */
+export function wordsOf(key: string): FactWords | undefined {
+  return FACT_WORDS[key] ?? LABEL_FACTS[key] ?? MATERIAL_FACTS[key];
 }
 
 /** Words for a fact's key, also for one that no one has named yet: `bodyPart` as `body part`. */
 export function sayFact(key: string): string {
   if (key === 'purpose') return 'what the substance is for, with its material';
-  return (FACT_WORDS[key] ?? LABEL_FACTS[key])?.label ?? key.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
+  return wordsOf(key)?.label ?? key.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
 }

@@ -43,6 +43,14 @@ test('a material is kept as it was written, to the last digit', async () => {
   expect(body.composition[0]).toEqual({ inci: 'Kaolin', min: '99.0', typical: '99.50', max: '100' });
 });
 
+test('what its certificates say is kept with the material, and taken back when it is left out', async () => {
+  const { id, version } = await add({ tradeName: 'Pressed nut oil', facts: { peanutProteinPpm: '0.4', certificateSeen: true } });
+  expect((await ines.get(`/materials/${id}`)).body.facts).toEqual({ peanutProteinPpm: '0.4', certificateSeen: true });
+  const answer = await ines.put(`/materials/${id}`, { ...fields({ tradeName: 'Pressed nut oil' }), version });
+  expect([answer.status, answer.body.facts]).toEqual([200, {}]);
+  expect((await ines.post('/materials', { ...fields(), facts: { peanutProteinPpm: 0.4 } })).status).toBe(422);
+});
+
 test('the list finds by trade name, supplier and INCI name, accents and case aside', async () => {
   await add({ tradeName: 'Crème base', supplier: 'Thrussel and Vane', composition: [{ inci: 'Cetearyl Alcohol', percent: '100' }] });
   const found = async (find: string) => (await ines.get(`/materials?find=${encodeURIComponent(find)}`)).body.items.map((item: { tradeName: string }) => item.tradeName);

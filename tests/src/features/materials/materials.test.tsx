@@ -180,3 +180,22 @@ test('the list says when nothing is found', async () => {
   openRoom('/materials?find=zeolite');
   expect(await screen.findByText('No material has “zeolite” in its name or composition.')).toBeTruthy();
 });
+
+test('what a certificate says is asked for what the material holds, and kept with it', async () => {
+  server.on(getMaterial, () => ({ ...OAT, composition: [{ inci: 'Triticum Vulgare Germ Oil', percent: '100' }] }));
+  const kept = vi.fn();
+  server.on(updateMaterial, ({ body }) => { kept((body as MaterialFields).facts); return saved(body, 5); });
+  openRoom(`/materials/${OAT.id}`);
+  await screen.findByRole('form', { name: 'Oat extract' });
+  expect(screen.queryByLabelText('Peanut protein')).toBeNull();
+  await userEvent.type(cell('Average size of the wheat protein’s peptides'), '3,5');
+  await userEvent.selectOptions(cell('A certificate of its purity was seen'), 'yes');
+  await save();
+  await waitFor(() => expect(kept).toHaveBeenCalledWith({ certificateSeen: true, wheatPeptideKilodalton: '3.5' }));
+});
+
+test('a verdict’s question leads to its field', async () => {
+  openRoom(`/materials/${OAT.id}#fact-peanutProteinPpm`);
+  await screen.findByRole('form', { name: 'Oat extract' });
+  await waitFor(() => expect(document.activeElement).toBe(cell('Peanut protein')));
+});

@@ -5,7 +5,7 @@ import { cleanup, render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, expect, test, vi } from 'vitest';
 import { FactFields } from '#src/features/workspace/fact-fields.tsx';
-import { FACT_WORDS, sayFact } from '#src/features/workspace/fact-words.ts';
+import { LABEL_FACTS, isProductFact, sayFact, wordsOf } from '#src/features/workspace/fact-words.ts';
 import { checkout } from '#tests/support/cluster.ts';
 
 afterEach(cleanup);
@@ -32,7 +32,7 @@ test('every fact that a row of the law asks for has a field of the right kind', 
   const found = new Map<string, Set<string>>();
   for (const file of readdirSync(folder).filter((name) => name.endsWith('.json'))) factsOf(JSON.parse(readFileSync(join(folder, file), 'utf8')), found);
   expect(found.size).toBeGreaterThan(15);
-  const lacking = [...found].filter(([key, kinds]) => !WORKED_OUT.includes(key) && (FACT_WORDS[key] === undefined || (kinds.has('boolean') && FACT_WORDS[key].kind !== 'yes-no') || (kinds.has('figure') && FACT_WORDS[key].kind !== 'figure')));
+  const lacking = [...found].filter(([key, kinds]) => !WORKED_OUT.includes(key) && (wordsOf(key) === undefined || (kinds.has('boolean') && wordsOf(key)!.kind !== 'yes-no') || (kinds.has('figure') && wordsOf(key)!.kind !== 'figure')));
   expect(lacking.map(([key]) => key)).toEqual([]);
 });
 
@@ -48,4 +48,40 @@ test('a yes-or-no question is answered with yes or no, and taken back', async ()
   expect(onFacts).toHaveBeenLastCalledWith({}, 'fact:addedAsSuch');
   // What a substance is for stands with its material, not with the product.
   expect(screen.queryByLabelText(sayFact('purpose'))).toBeNull();
+});
+
+const draw = (facts: Record<string, string | boolean>, asked: readonly string[] = []) => {
+  const onFacts = vi.fn();
+  render(<FactFields facts={facts} known={{}} asked={asked} isReadOnly={false} onFacts={onFacts} onSettle={() => undefined} />);
+  return onFacts;
+};
+
+test('what a label may turn on can be answered before a verdict waits for it', async () => {
+  const onFacts = draw({});
+  for (const key of Object.keys(LABEL_FACTS)) expect(screen.getByLabelText(sayFact(key)).closest('details'), key).not.toBeNull();
+  await userEvent.click(screen.getByText('More that the label may turn on'));
+  await userEvent.selectOptions(screen.getByLabelText('Free sample'), 'yes');
+  expect(onFacts).toHaveBeenLastCalledWith({ freeSample: true }, 'fact:freeSample');
+});
+
+test('what a verdict waits for stands in front, and says so', async () => {
+  const onFacts = draw({}, ['madeIn', 'durabilityNotRelevant']);
+  for (const key of ['madeIn', 'durabilityNotRelevant']) expect(screen.getByLabelText(sayFact(key)).closest('details')).toBeNull();
+  expect(screen.getAllByText('A verdict waits for this answer.')).toHaveLength(2);
+  await userEvent.selectOptions(screen.getByLabelText('Made in'), 'Canada');
+  expect(onFacts).toHaveBeenLastCalledWith({ madeIn: 'CA' }, 'fact:madeIn');
+});
+
+test('a text is kept as typed, a figure with a point', async () => {
+  const onFacts = draw({ destinations: 'DE', minimumDurabilityMonths: '3' });
+  await userEvent.type(screen.getByLabelText('Sold in these Member States'), ',');
+  expect(onFacts).toHaveBeenLastCalledWith({ destinations: 'DE,', minimumDurabilityMonths: '3' }, 'fact:destinations');
+  await userEvent.type(screen.getByLabelText('Keeps unopened'), ',');
+  expect(onFacts).toHaveBeenLastCalledWith({ destinations: 'DE', minimumDurabilityMonths: '3.' }, 'fact:minimumDurabilityMonths');
+});
+
+test('what a certificate says is not asked of the product', () => {
+  draw({}, ['peanutProteinPpm']);
+  expect(isProductFact('peanutProteinPpm')).toBe(false);
+  expect(screen.queryByLabelText(sayFact('peanutProteinPpm'))).toBeNull();
 });
