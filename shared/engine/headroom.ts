@@ -1,7 +1,7 @@
 import { compare, reduce, type Rational } from '#shared/kernel/rational.ts';
 import type { HeadroomLine } from './assessment.ts';
 import { blendAlone, type Blend } from './blend.ts';
-import { isBefore, middle, rootOf, type Course } from './line-course.ts';
+import { isBefore, rootOf, type Course } from './line-course.ts';
 import type { NewFinding } from './list-headroom.ts';
 import type { PreparedMaterial } from './prepare-material.ts';
 import type { Finding, Interval } from './types.ts';
@@ -93,8 +93,12 @@ function findBound(input: HeadroomInput, today: readonly Interval[], { line, mat
   const shareAt = (s: Rational): Rational => reduce({ n: now.n * (s.d - s.n) + 100n * now.d * s.n, d: now.d * s.d });
   const end = blendAlone(material);
   const onList = input.blend.plan.hasRanges ? input.findListFinding(end) : undefined;
-  const freshAt = (s: Rational, isWide: boolean): Finding | undefined => fresh((isWide ? input.judgeAll : input.judge)(input.mixAt(line, shareAt(s))));
-  const ofLaw = findLawFinding(input, today, end, { until: onList?.s ?? WHOLE, freshAt });
+  const freshAt = (share: Rational, isWide: boolean): Finding | undefined => fresh((isWide ? input.judgeAll : input.judge)(input.mixAt(line, share)));
+  const ofLaw = findLawFinding(input, today, end, {
+    until: onList?.s ?? WHOLE,
+    freshAt: (s, isWide) => freshAt(shareAt(s), isWide),
+    freshBetween: (a, b, isWide) => freshAt(shortestBetween(shareAt(a), shareAt(b)), isWide),
+  });
   const first = ofLaw ?? onList;
   return first ? { max: largestBelow(shareAt(first.s), first.holds), limitedBy: first.rule } : UNBOUND;
 }
@@ -111,9 +115,10 @@ export function identity({ kind, rule, subject, members }: Finding): string {
 interface Asking {
   readonly until: Rational;
   freshAt(s: Rational, isWide: boolean): Finding | undefined;
+  freshBetween(a: Rational, b: Rational, isWide: boolean): Finding | undefined;
 }
 
-function findLawFinding({ thresholds }: HeadroomInput, today: readonly Interval[], end: Blend, { until, freshAt }: Asking): NewFinding | undefined {
+function findLawFinding({ thresholds }: HeadroomInput, today: readonly Interval[], end: Blend, { until, freshAt, freshBetween }: Asking): NewFinding | undefined {
   const places = new Map<string, { s: Rational; isWide: boolean }>();
   thresholds.forEach((threshold, index) => {
     const now = today[index]!;
@@ -131,7 +136,7 @@ function findLawFinding({ thresholds }: HeadroomInput, today: readonly Interval[
   const sorted = [...places.values()].sort((a, b) => (isBefore(a.s, b.s) ? -1 : 1));
   for (let index = 0; index < sorted.length; index += 1) {
     const { s, isWide } = sorted[index]!;
-    const beyond = freshAt(middle(s, sorted[index + 1]?.s ?? until), isWide);
+    const beyond = freshBetween(s, sorted[index + 1]?.s ?? until, isWide);
     if (!beyond) continue;
     const there = s.n > START.n ? freshAt(s, isWide) : undefined;
     return { s, holds: there !== undefined, rule: (there ?? beyond).rule };
@@ -150,6 +155,19 @@ function courseOf(now: Rational, last: Rational | undefined, limit: Rational): C
   const a = (now.n * limit.d - limit.n * now.d) * at.d;
   const b = (at.n * limit.d - limit.n * at.d) * now.d;
   return { now: a, end: b };
+}
+
+/**
+ * The decimal with the fewest places strictly between two shares, or the share where both are one. Between neighbouring thresholds
+ * every share is judged alike, and short figures are weighed much faster than long ones.
+ */
+function shortestBetween(a: Rational, b: Rational): Rational {
+  // Two thresholds may be crossed at one and the same share.
+  if (!isBefore(a, b)) return a;
+  for (let d = 1n; ; d *= 10n) {
+    const n = (a.n * d) / a.d + 1n;
+    if (n * b.d < b.n * d) return { n, d };
+  }
 }
 
 /** The share itself, cut to 12 places; the next lower figure where the finding is there at the share itself. */

@@ -36,10 +36,6 @@ export function isBefore(a: Rational, b: Rational): boolean {
   return a.n * b.d < b.n * a.d;
 }
 
-export function middle(a: Rational, b: Rational): Rational {
-  return { n: a.n * b.d + b.n * a.d, d: a.d * b.d * 2n };
-}
-
 /** A part of the way, from one place up to and without another; `holds` says whether a place is the point itself or just behind it. */
 export interface Stretch {
   readonly from: Beginning;

@@ -1,12 +1,11 @@
-import { spawnSync } from 'node:child_process';
-import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
-import { tmpdir } from 'node:os';
+import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
 import { parseEntries } from '#shared/dictionary/parse-entries.ts';
 import { assess } from '#shared/engine/assess.ts';
 import { presentResult } from '#shared/engine/present-result.ts';
 import { dictionary, formula, law, line, material, part, TODAY } from '#tests/support/engine.ts';
+import { runCliBench } from './cli.bench.ts';
 import { median, ms, timeInTurns, times, type Row } from './report.ts';
 
 const ROOT = join(import.meta.dirname, '../..');
@@ -37,7 +36,7 @@ function floatLoop(rows: readonly { readonly grams: number; readonly parts: read
   return [...shares].sort((a, b) => b[1] - a[1]);
 }
 
-/** The engine's promises: one check against a float loop over the same figures, and JSON Lines by the thousand. */
+/** The engine's promises: one check against a float loop over the same figures, and the command line. */
 export async function runEngineBench(): Promise<Row[]> {
   const document = largeFormula();
   const rows = document.formula.lines.map(({ amount }, index) => ({
@@ -46,31 +45,10 @@ export async function runEngineBench(): Promise<Row[]> {
   }));
   const options = { law, dictionary, today: TODAY };
   const [loop, check, live] = timeInTurns([() => floatLoop(rows), () => presentResult(assess(document, options)), () => assess(document, options)]).map(median) as [number, number, number];
-  const perSecond = throughput();
   return [
     { name: 'check, 40 materials of 8 substances', measured: ms(check), ratio: times(check / loop), promise: `under 1.5 ms and at most 8 × a float loop (${ms(loop)})`, isKept: check < 1.5 && check <= 8 * loop },
     { name: 'the same beside a spreadsheet', measured: ms(check), ratio: times(SPREADSHEET / check), promise: `30 × faster than one edited cell of a desktop spreadsheet (${SPREADSHEET} ms, given)`, isKept: SPREADSHEET / check >= 30 },
     { name: 'assess for the screen, same formula', measured: ms(live), ratio: times(live / loop), promise: 'under 16 ms', isKept: live < 16 },
-    { name: 'check of JSON Lines', measured: `${Math.round(perSecond)} formulas/s`, promise: 'at least 1,000 formulas/s', isKept: perSecond >= 1000 },
+...runCliBench(),
   ];
-}
-
-/** Formulas a second, from the second half of a run: start-up is measured elsewhere. */
-function throughput(): number {
-  const folder = mkdtempSync(join(tmpdir(), 'colophon-bench-'));
-  try {
-    const one = JSON.stringify(JSON.parse(readFileSync(join(ROOT, 'tests/reference/fixtures/body-wash.json'), 'utf8')));
-    const run = (count: number): number => {
-      const file = join(folder, `${count}.jsonl`);
-      writeFileSync(file, `${one}\n`.repeat(count));
-      const start = performance.now();
-      spawnSync(process.execPath, [join(ROOT, 'server/cli/run.mjs'), 'check', file, '--market', 'EU'], { maxBuffer: 1024 * 1024 * 1024 });
-      return performance.now() - start;
-    };
-    run(10);
-    const [small, large] = [run(200), run(2200)];
-    return 2000 / ((large - small) / 1000);
-  } finally {
-    rmSync(folder, { recursive: true, force: true });
-  }
 }
