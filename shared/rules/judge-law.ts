@@ -7,6 +7,7 @@ import type { LawRow } from '#shared/law/types.ts';
 import { judgeClaims } from './claims/judge-claims.ts';
 import { judgeUsColours } from './colours/us-colours.ts';
 import type { Context } from './context.ts';
+import { withCertificates } from './certificates/seen.ts';
 import { judgeParticulars, listOpenParticulars } from './particulars/judge-particulars.ts';
 import { judgePositiveLists } from './positive-lists/use-not-listed.ts';
 import { judgeFormaldehyde, theoreticalFormaldehyde } from './preservatives/formaldehyde.ts';
@@ -61,7 +62,7 @@ export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: Formul
     ...judgeUpcoming(rows, outcomes, context),
     ...presentUpcomingWordings(formaldehydeNow, judgeFormaldehyde(later), context),
   ];
-  return { findings, requiredWording: presentWording(due, context), notChecked: [...notChecked, ...listNotRead(context), ...listDuties(context), ...listOpenParticulars(context)] };
+  return { findings, requiredWording: presentWording(due, context), notChecked: [...withCertificates(notChecked, context), ...listNotRead(context), ...listDuties(context), ...listOpenParticulars(context)] };
 }
 
 /** Colourants of other shades: their uses are judged, their amounts are not known. */
