@@ -14,6 +14,7 @@ import annexII1 from '#data/parameters/eu-annex-ii-0001-0600.json' with { type: 
 import annexII2 from '#data/parameters/eu-annex-ii-0601-1200.json' with { type: 'json' };
 import annexII3 from '#data/parameters/eu-annex-ii-1201-1767.json' with { type: 'json' };
 import annexIII1 from '#data/parameters/eu-annex-iii-001-100.json' with { type: 'json' };
+import annexIIIA from '#data/parameters/eu-annex-iii-101-130.json' with { type: 'json' };
 import annexIII2 from '#data/parameters/eu-annex-iii-101-200.json' with { type: 'json' };
 import annexIII3 from '#data/parameters/eu-annex-iii-201-300.json' with { type: 'json' };
 import annexIIIC from '#data/parameters/eu-annex-iii-251-300.json' with { type: 'json' };
@@ -34,6 +35,7 @@ import ukMethylSalicylate from '#data/parameters/uk-restricted-methyl-salicylate
 import usColours from '#data/parameters/us-colours.json' with { type: 'json' };
 import usProhibited from '#data/parameters/us-prohibited.json' with { type: 'json' };
 import usRestricted from '#data/parameters/us-restricted.json' with { type: 'json' };
+import wordingAnnexIIIA from '#data/parameters/wording-annex-iii-a.json' with { type: 'json' };
 import wordingAnnexIIIB from '#data/parameters/wording-annex-iii-b.json' with { type: 'json' };
 import wordingAnnexIIIC from '#data/parameters/wording-annex-iii-c.json' with { type: 'json' };
 import wordingAnnexIII from '#data/parameters/wording-annex-iii.json' with { type: 'json' };
@@ -51,11 +53,11 @@ export const lawTables = {
   categories: categories.categories,
   allergens,
   rows: [
-    ...[annexII1, annexII2, annexII3, annexIIICommon, annexIII1, annexIII2, annexIII3, annexIIIC, annexIII4, annexIV, annexV, annexVI],
+    ...[annexII1, annexII2, annexII3, annexIIICommon, annexIII1, annexIIIA, annexIII2, annexIII3, annexIIIC, annexIII4, annexIV, annexV, annexVI],
     ...[usProhibited, usRestricted, caProhibited, caHotlist, caHotlistProhibited, caHotlistRestricted],
     ...[ukProhibited2022, ukProhibited2024, ukBht, ukKojicAcid, ukMethylSalicylate],
   ],
-  wording: [...wording, ...wordingAnnexIII, ...wordingAnnexIIIB, ...wordingAnnexIIIC, ...wordingCanada],
+  wording: [...wording, ...wordingAnnexIII, ...wordingAnnexIIIA, ...wordingAnnexIIIB, ...wordingAnnexIIIC, ...wordingCanada],
   warnings: [...warnings, ...caWarnings],
   changes,
   usColours,

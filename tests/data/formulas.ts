@@ -125,6 +125,8 @@ export const FORMULAS: Readonly<Record<string, readonly Formula[]>> = {
     ['Stannous Fluoride', 'F2Sn', 2],
     ['Cetylamine Hydrofluoride', 'C16H36FN', 1],
     ['Olaflur', 'C27H60F2N2O3', 2],
+    // Its shortest chains: one oxyethylene each.
+    ["N,N',N'-Tris(Polyoxyethylene)-N-Hexadecylpropylenediamine Dihydrofluoride", 'C27H60F2N2O3', 2],
     ['Octadecenyl-Ammonium Fluoride', 'C18H38FN', 1],
     ['Sodium Fluorosilicate', 'F6Na2Si', 6],
     ['Potassium Fluorosilicate', 'F6K2Si', 6],
@@ -273,7 +275,34 @@ export const FORMULAS: Readonly<Record<string, readonly Formula[]>> = {
   Ag: [
     ['Silver Citrate', 'C6H5O7Ag3', 3],
   ],
+  C6H8N2: [
+    ['p-Phenylenediamine HCl', 'C6H10Cl2N2', 1],
+    ['p-Phenylenediamine Sulfate', 'C6H10N2O4S', 1],
+  ],
+  C7H10N2: [
+    ['Toluene-2,5-Diamine Sulfate', 'C7H12N2O4S', 1],
+  ],
+  C12H12N2: [
+    ['N-Phenyl-p-Phenylenediamine HCl', 'C12H13ClN2', 1],
+    ['N-Phenyl-p-Phenylenediamine Sulfate', 'C24H26N4O4S', 2],
+  ],
+  C9H7NO: [
+    ['Oxyquinoline Sulfate', 'C18H16N2O6S', 2],
+  ],
+  S: [
+    ['Sodium Sulfide', 'Na2S', 1],
+    ['Potassium Sulfide', 'K2S', 1],
+    ['Lithium Sulfide', 'Li2S', 1],
+    ['Barium Sulfide', 'BaS', 1],
+    ['Calcium Sulfide', 'CaS', 1],
+    ['Strontium Sulfide', 'SSr', 1],
+    ['Magnesium Sulfide', 'MgS', 1],
+  ],
   Sr: [
     ['Strontium Peroxide', 'O2Sr', 1],
+    ['Strontium Chloride', 'Cl2Sr', 1],
+    ['Strontium Chloride Hexahydrate', 'Cl2H12O6Sr', 1],
+    ['Strontium Acetate', 'C4H6O4Sr', 1],
+    ['Strontium Hydroxide', 'H2O2Sr', 1],
   ],
 };
