@@ -20,6 +20,7 @@ import { evidenceRoutes } from '#server/modules/evidence/evidence.routes.ts';
 import { houseRoutes } from '#server/modules/house/house.routes.ts';
 import { lawRoutes } from '#server/modules/law/law.routes.ts';
 import { materialsRoutes } from '#server/modules/materials/materials.routes.ts';
+import { picturesRoutes } from '#server/modules/pictures/pictures.routes.ts';
 import { productsRoutes } from '#server/modules/products/products.routes.ts';
 import { trailRoutes } from '#server/modules/trail/trail.routes.ts';
 import { sessionRoutes } from '#server/modules/session/session.routes.ts';
@@ -50,6 +51,7 @@ export function apiRoutes(deps: AppDeps): Route[] {
     ...materialsRoutes(deps),
     ...productsRoutes(deps),
     ...evidenceRoutes(deps),
+    ...picturesRoutes(deps),
     ...trailRoutes(deps),
   ];
 }

@@ -1,4 +1,4 @@
-import type { Cmyk, Micrometres, PathStep, Place, Text } from '#shared/artwork/scene.ts';
+import type { Cmyk, Micrometres, PathStep, PictureItem, Place, Text } from '#shared/artwork/scene.ts';
 
 /** Points per micrometre: 72 to the inch of 25 400. */
 const POINTS = 72 / 25_400;
@@ -72,6 +72,18 @@ function placedTextOf(item: Text, places: readonly Place[], glyphs: readonly { r
     return `${cos} ${-sin} ${sin} ${cos} ${short(sheet.x(x))} ${short(sheet.y(y))} Tm<${code}>Tj`;
   });
   return `BT /${font} ${sheet.length(item.size)} Tf ${shown.join('\n')} ET`;
+}
+
+/** A photo in its box, turned about its middle where the sheet is bent. */
+export function pictureOf({ box, degrees = 0 }: PictureItem, name: string, sheet: Sheet): string {
+  const turn = (degrees * Math.PI) / 180;
+  const [cos, sin] = [Math.cos(turn), Math.sin(turn)];
+  const [w, h] = [box.width, box.height];
+  // The lower left corner, turned about the middle.
+  const x = box.x + w / 2 - (w / 2) * cos - (h / 2) * sin;
+  const y = box.y + h / 2 - (w / 2) * sin + (h / 2) * cos;
+  const matrix = [w * cos, -w * sin, h * sin, h * cos].map((figure) => points(Math.round(figure * 1000) / 1000));
+  return `q ${matrix.join(' ')} ${sheet.x(x)} ${sheet.y(y)} cm /${name} Do Q`;
 }
 
 /** Tells readers the words of what follows, up to `EMC`: no straight line joins letters set on arcs. */

@@ -4,7 +4,7 @@ import { PDFArray, PDFDocument, PDFHexString, PDFName, PDFNumber, PDFRawStream, 
 import type { Item, Micrometres, Scene, Text, Weight } from '#shared/artwork/scene.ts';
 import { embedFont, type EmbeddedFont } from './embed-font.ts';
 import { WEIGHTS } from './fonts.ts';
-import { beginWords, boxOf, fill, pathOf, points, sheetOf, stroke, textOf, type Sheet } from './operators.ts';
+import { beginWords, boxOf, fill, pathOf, pictureOf, points, sheetOf, stroke, textOf, type Sheet } from './operators.ts';
 import { outputIntent, standardKeys, type Press } from './press.ts';
 import { cropMarks, SLUG, slugOf, type Slug } from './slug.ts';
 
@@ -14,6 +14,14 @@ export interface PaintOptions {
   readonly creator: string;
   /** Day that the file carries as its date, `YYYY-MM-DD`: the same label then makes the same bytes. */
   readonly date: string;
+  /** Rows of C, M, Y, K bytes of the photos that the scene shows, deflated, by their id. */
+  readonly photos?: ReadonlyMap<string, PressPhoto>;
+}
+
+export interface PressPhoto {
+  readonly width: number;
+  readonly height: number;
+  readonly plates: Uint8Array;
 }
 
 const HAIRLINE: Micrometres = 88;
@@ -21,12 +29,13 @@ const HAIRLINE: Micrometres = 88;
 /** Black alone prints over what is under it; every other colour knocks out. */
 function overprints(item: Item, scene: Scene): boolean {
   const ink = scene.inks[item.ink]!;
-  return item.element !== 'ground' && ink.cmyk.every((part, i) => (i === 3 ? part === 100 : part === 0));
+  return item.element !== 'ground' && item.kind !== 'picture' && ink.cmyk.every((part, i) => (i === 3 ? part === 100 : part === 0));
 }
 
 interface Painter {
   readonly sheet: Sheet;
   readonly fonts: ReadonlyMap<Weight, EmbeddedFont>;
+  readonly photos: ReadonlyMap<string, PressPhoto>;
 }
 
 function paintText(item: Text, { sheet, fonts }: Painter): string {
@@ -34,11 +43,12 @@ function paintText(item: Text, { sheet, fonts }: Painter): string {
 }
 
 function paintItem(item: Item, scene: Scene, painter: Painter): string {
-  const { sheet } = painter;
+  const { sheet, photos } = painter;
   const ink = scene.inks[item.ink]!;
+  if (item.kind === 'picture') return pictureOf(item, `P${[...photos.keys()].indexOf(item.picture)}`, sheet);
   if (item.kind === 'text') return `${fill(ink.cmyk)}\n${paintText(item, painter)}`;
   if (item.kind === 'boxes') return `${fill(ink.cmyk)}\n${item.boxes.map((box) => boxOf(box, sheet)).join('\n')}\nf`;
-  if (item.stroke === undefined) return `${fill(ink.cmyk)}\n${pathOf(item.steps, sheet)}\nf`;
+  if (item.stroke === undefined) return `${fill(ink.cmyk)}\n${pathOf(item.steps, sheet)}\n${item.evenOdd ? 'f*' : 'f'}`;
   return `${stroke(ink.cmyk)}\n${sheet.length(item.stroke)} w\n${pathOf(item.steps, sheet)}\nS`;
 }
 
@@ -113,16 +123,24 @@ function box(context: PDFContext, figures: readonly Micrometres[]): PDFObject {
   return array;
 }
 
-function resources(context: PDFContext, scene: Scene, fonts: ReadonlyMap<Weight, EmbeddedFont>): PDFDict {
+function resources(context: PDFContext, scene: Scene, fonts: ReadonlyMap<Weight, EmbeddedFont>, photos: ReadonlyMap<string, PressPhoto>): PDFDict {
   return context.obj({
+    ...(photos.size > 0 && { XObject: Object.fromEntries([...photos.values()].map((photo, i) => [`P${i}`, embedPhoto(context, photo)])) }),
     Font: Object.fromEntries([...fonts].map(([weight, font]) => [`F${weight}`, font.ref])),
     ColorSpace: { Die: separation(context, scene.dieLine.ink.spot ?? 'Dieline', scene.dieLine.ink.cmyk), All: separation(context, 'All', [100, 100, 100, 100]) },
     ExtGState: { Over: { Type: 'ExtGState', OP: true, op: true, OPM: 1 }, Knock: { Type: 'ExtGState', OP: false, op: false, OPM: 0 } },
   });
 }
 
-function contentHash(scene: Scene, options: PaintOptions): string {
-  return createHash('sha256').update(JSON.stringify([scene, options])).digest('hex');
+/** A photo in process inks: one stream however often it is shown. */
+function embedPhoto(context: PDFContext, { width, height, plates }: PressPhoto): PDFRef {
+  return context.register(PDFRawStream.of(context.obj({ Type: 'XObject', Subtype: 'Image', Width: width, Height: height, ColorSpace: 'DeviceCMYK', BitsPerComponent: 8, Filter: 'FlateDecode', Length: plates.length }) as PDFDict, plates));
+}
+
+function contentHash(scene: Scene, { photos = new Map(), ...options }: PaintOptions): string {
+  const hash = createHash('sha256').update(JSON.stringify([scene, options]));
+  for (const [id, { plates }] of photos) hash.update(id).update(plates);
+  return hash.digest('hex');
 }
 
 function pdfDate(day: string): Date {
@@ -150,7 +168,8 @@ export async function paintLabel(scene: Scene, options: PaintOptions): Promise<U
   const weights = WEIGHTS.filter((weight) => weight === 400 || scene.items.some((item) => item.kind === 'text' && item.weight === weight));
   const fonts = new Map<Weight, EmbeddedFont>();
   for (const weight of weights) fonts.set(weight, await embedFont(context, weight));
-  const painter: Painter = { sheet, fonts };
+  const photos = options.photos ?? new Map<string, PressPhoto>();
+  const painter: Painter = { sheet, fonts, photos };
   const content = [paintArtwork(scene, painter), paintSlug(scene, slug, painter), paintDieLine(scene, sheet)].join('\n');
   for (const font of fonts.values()) await font.embed();
   const deflated = deflateSync(content, { level: 9 });
@@ -160,7 +179,7 @@ export async function paintLabel(scene: Scene, options: PaintOptions): Promise<U
   page.node.set(PDFName.of('MediaBox'), box(context, [0, 0, width, height]));
   page.node.set(PDFName.of('BleedBox'), box(context, [SLUG, SLUG, width - SLUG, SLUG + scene.trim.height + 2 * scene.bleed]));
   page.node.set(PDFName.of('TrimBox'), box(context, [low, low, low + scene.trim.width, low + scene.trim.height]));
-  page.node.set(PDFName.of('Resources'), resources(context, scene, fonts));
+  page.node.set(PDFName.of('Resources'), resources(context, scene, fonts, photos));
   page.node.set(PDFName.of('Contents'), context.register(stream));
   doc.setTitle(options.title);
   doc.setCreator(options.creator);

@@ -2,13 +2,13 @@ import type { FormulaDocument } from '#shared/contracts/formula-document.ts';
 import type { ResultDocument } from '#shared/contracts/result-document.ts';
 import type { Market } from '#shared/law/types.ts';
 import type { Check } from '#shared/artwork/checks.ts';
-import type { LabelInput } from '#shared/artwork/label-input.ts';
+import type { LabelInput, LabelPicture } from '#shared/artwork/label-input.ts';
 import { labelMarket, labelOfDocument } from '#shared/artwork/label-of-document.ts';
 import { layOutLabel } from '#shared/artwork/layout.ts';
 import type { Misfit } from '#shared/artwork/misfits.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import type { Scene } from '#shared/artwork/scene.ts';
-import { paintLabel } from './paint-label.ts';
+import { paintLabel, type PressPhoto } from './paint-label.ts';
 import { USUAL_PRESS } from './press.ts';
 
 export type RenderedLabel =
@@ -20,15 +20,18 @@ export interface RenderOptions {
   readonly market?: Market;
   /** Day the file is dated with, `YYYY-MM-DD`; the day of placing on the market otherwise. */
   readonly date?: string;
+  /** The house's pictures that the label shows, and the plates of those that are photos. */
+  readonly pictures?: readonly LabelPicture[];
+  readonly photos?: ReadonlyMap<string, PressPhoto>;
 }
 
 /** The press file of one label input, or what does not fit. */
-export async function renderLabelInput(input: LabelInput, date: string): Promise<RenderedLabel> {
+export async function renderLabelInput(input: LabelInput, date: string, photos?: ReadonlyMap<string, PressPhoto>): Promise<RenderedLabel> {
   const { scene, misfits, checks } = layOutLabel(input, plexMetrics);
   if (!scene || misfits.length > 0) return { misfits, checks };
   const press = { standard: input.press?.standard ?? USUAL_PRESS.standard, condition: input.press?.condition?.trim() || USUAL_PRESS.condition };
   const title = [input.brand, input.name].filter(Boolean).join(' · ') || 'Label';
-  const pdf = await paintLabel(scene, { press, title, creator: 'Colophon', date });
+  const pdf = await paintLabel(scene, { press, title, creator: 'Colophon', date, ...(photos && { photos }) });
   return { pdf, scene, checks };
 }
 
@@ -41,5 +44,5 @@ export async function renderLabelPdf(document: FormulaDocument, result: ResultDo
   const market = options.market ?? labelMarket(document);
   const marketResult = result.results.find((candidate) => candidate.market === market);
   const date = options.date ?? marketResult?.placedOnMarket ?? document.product.placedOnMarket ?? '2000-01-01';
-  return renderLabelInput(labelOfDocument(document, marketResult, market), date);
+  return renderLabelInput({ ...labelOfDocument(document, marketResult, market), pictures: options.pictures }, date, options.photos);
 }

@@ -6,11 +6,14 @@ export class FileAnswer {
   readonly mediaType: string;
   /** As a person would name the file; encoded on the way out. */
   readonly fileName: string;
+  /** Shown on a screen of ours; it is not taken away. */
+  readonly isPreview: boolean;
 
-  constructor(file: { readonly bytes: Uint8Array; readonly mediaType: string; readonly fileName: string }) {
+  constructor(file: { readonly bytes: Uint8Array; readonly mediaType: string; readonly fileName: string; readonly isPreview?: boolean }) {
     this.bytes = file.bytes;
     this.mediaType = file.mediaType;
     this.fileName = file.fileName;
+    this.isPreview = file.isPreview ?? false;
   }
 }
 

@@ -125,7 +125,7 @@ function answer(one: Route, em: EntityManager, now: () => Date): RequestHandler 
     const result = await one.handle(call);
     if (result instanceof FileAnswer) {
       // Who took a file is noted before it leaves the house.
-      if (session) await within((own) => Promise.resolve(noteAct(own, takenAct(endpoint, params, result))));
+      if (session && !result.isPreview) await within((own) => Promise.resolve(noteAct(own, takenAct(endpoint, params, result))));
       sendFile(res, result);
     } else if (!res.headersSent) res.json(endpoint.response.parse(result));
   };

@@ -9,7 +9,7 @@ import type { ObjectStore } from './object-store.ts';
 export type PaperStore = Pick<ObjectStore, 'putObject' | 'getObject' | 'deleteObject'>;
 
 /** Our own key: nothing of the user's naming reaches the store. */
-export function newPaperKey(actor: Actor, shelf: 'materials' | 'evidence'): string {
+export function newPaperKey(actor: Actor, shelf: 'materials' | 'evidence' | 'pictures'): string {
   return `houses/${actor.houseId}/${shelf}/${randomUUID()}`;
 }
 

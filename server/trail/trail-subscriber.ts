@@ -21,6 +21,7 @@ const KINDS: Readonly<Record<string, Kind>> = {
   Material: { kind: 'material', name: (row) => text(row['tradeName']) },
   MaterialDocument: { kind: 'paper of a material', name: (row) => text(row['fileName']) },
   ProductEvidence: { kind: 'evidence paper', name: (row) => text(row['fileName']), product: (row) => text(row['productId']) },
+  HousePicture: { kind: 'picture', name: (row) => text(row['name']) },
   House: { kind: 'house', name: (row) => text(row['name']) },
   Membership: { kind: 'membership', name: (row) => text(row['personId']) },
 };

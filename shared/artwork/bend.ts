@@ -101,8 +101,13 @@ function turned({ from, to, turn }: Rigid, x: number, y: number): Point {
   return { x: to.x + a * Math.cos(turn) - b * Math.sin(turn), y: to.y + a * Math.sin(turn) + b * Math.cos(turn) };
 }
 
-function moveRigid(item: Item, rigid: Rigid): Text | Path {
+function moveRigid(item: Item, rigid: Rigid): Item {
   if (item.kind === 'text') return turnText(item, rigid);
+  if (item.kind === 'picture') {
+    const { x, y, width, height } = item.box;
+    const middle = turned(rigid, x + width / 2, y + height / 2);
+    return { ...withoutClip(item), box: { x: Math.round(middle.x - width / 2), y: Math.round(middle.y - height / 2), width, height }, degrees: Math.round((rigid.turn * 180e4) / Math.PI) / 1e4 };
+  }
   const corner = (x: number, y: number): [Micrometres, Micrometres] => {
     const point = turned(rigid, x, y);
     return [Math.round(point.x), Math.round(point.y)];

@@ -1,4 +1,5 @@
 import { barcodeFault } from './barcode.ts';
+import { pixelsPerInch } from './hand/draw-picture.ts';
 import { heightAt } from './heights.ts';
 import type { LabelInput } from './label-input.ts';
 import { exactMillimetres, inMillimetres } from './lengths.ts';
@@ -119,10 +120,24 @@ function pressChecks({ scene, input }: Subject): Check[] {
   ];
 }
 
+/** Least pixels to the inch of a photo: under the first it is coarse, under the second blocks are seen. Common practice, no source. */
+const FINE = 300;
+const COARSE = 150;
+
+function pictureChecks({ input, scene }: Subject): Check[] {
+  return scene.items.flatMap((item): Check[] => {
+    if (item.kind !== 'picture') return [];
+    const picture = input.pictures?.find(({ id }) => id === item.picture);
+    const dots = picture ? pixelsPerInch(picture.width, item.box.width) : 0;
+    const state = dots < COARSE ? 'stop' : dots < FINE ? 'decide' : 'passed';
+    return [{ id: `picture-${item.own ?? item.picture}`, state, what: state === 'passed' ? 'Picture' : 'Send the picture larger or print it smaller', detail: `${picture?.name ?? 'a picture'}, turned into process inks, at most 300 %`, figure: `${dots} / ${FINE} ppi` }];
+  });
+}
+
 /** The list before the press: what must be done first, then what passed, each with its figure. */
 export function checkLabel(subject: Subject): Check[] {
   const misfits = subject.misfits.map((misfit, i): Check => ({ id: `room-${i}`, state: 'stop', what: 'Give it more room', detail: misfit.message, figure: misfit.missing > 0 ? `${inMillimetres(misfit.missing)} mm` : '' }));
   const rank = { stop: 0, decide: 1, note: 2, passed: 3 } as const;
-  return [...misfits, netCheck(subject), textCheck(subject), ...eMarkCheck(subject), ...placeChecks(subject), ...barcodeChecks(subject), ...pressChecks(subject)]
+  return [...misfits, netCheck(subject), textCheck(subject), ...eMarkCheck(subject), ...placeChecks(subject), ...barcodeChecks(subject), ...pictureChecks(subject), ...pressChecks(subject)]
     .sort((a, b) => rank[a.state] - rank[b.state]);
 }

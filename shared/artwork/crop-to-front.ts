@@ -38,6 +38,7 @@ function middleOf({ x, y, width, height }: Box): Box {
 
 function reachOf(item: Exclude<Item, { kind: 'text' }>): readonly Box[] {
   if (item.kind === 'boxes') return item.boxes;
+  if (item.kind === 'picture') return [item.box];
   const points = item.steps.flatMap(([, ...figures]) => (figures.length >= 2 ? [figures.slice(-2) as unknown as [number, number]] : []));
   if (points.length === 0) return [];
   const xs = points.map(([x]) => x);

@@ -1,5 +1,6 @@
 import type { ByHand } from '#shared/contracts/by-hand.ts';
 import type { Market } from '#shared/law/types.ts';
+import type { Cmyk, PathStep } from './scene.ts';
 
 /** Decimal millimetres as text, as the formula document writes them. */
 export type ContainerSettings =
@@ -10,6 +11,17 @@ export type ContainerSettings =
 export interface BarcodeSettings {
   readonly symbology: 'EAN-13' | 'UPC-A';
   readonly digits: string;
+}
+
+/** A picture of the house's, as far as the layout needs it. */
+export interface LabelPicture {
+  readonly id: string;
+  readonly kind: 'photo' | 'drawing';
+  readonly name: string;
+  /** Pixels of a photo; proportions of a drawing. */
+  readonly width: number;
+  readonly height: number;
+  readonly shapes: readonly { readonly steps: readonly PathStep[]; readonly cmyk: Cmyk; readonly screen: string; readonly evenOdd?: boolean | undefined; readonly stroke?: number | undefined }[];
 }
 
 /** All that a label says and stands on: what the layout reads, and nothing else. */
@@ -40,5 +52,7 @@ export interface LabelInput {
   readonly ink?: string | undefined;
   /** What a person changed on the template's setting. */
   readonly byHand?: ByHand | undefined;
+  /** The pictures that it shows; one that is named and not here is told as missing. */
+  readonly pictures?: readonly LabelPicture[] | undefined;
   readonly press?: { readonly standard?: 'PDF/X-1a:2003' | 'PDF/X-4' | undefined; readonly condition?: string | undefined } | undefined;
 }

@@ -142,7 +142,7 @@ export function layOutLabel(input: LabelInput, metrics: FontMetrics): Layout {
   const byHand = isByHand(input.byHand) ? input.byHand : null;
   // What was set free no longer needs its place in the template, where that helps.
   if (byHand && fitted.overflows.length > 0) fitted = fitLabel(leanFor(job, byHand));
-  const set = byHand ? applyHand(job, fitted.setting, fitted, byHand) : { items: fitted.items, misfits: fitted.overflows.map(misfitOf) };
+  const set = byHand ? applyHand(job, fitted.setting, fitted, byHand, input.pictures) : { items: fitted.items, inks: {}, misfits: fitted.overflows.map(misfitOf) };
   const palette = paletteOf(input.ink);
   const full: Box = { x: -bleed, y: -bleed, width: sheet.width + 2 * bleed, height: sheet.height + 2 * bleed };
   const edge = sheet.shape === 'cylinder' ? Math.max(2000, sheet.overlap + 3000) : 2000;
@@ -150,7 +150,7 @@ export function layOutLabel(input: LabelInput, metrics: FontMetrics): Layout {
     trim: { width: sheet.width, height: sheet.height }, bleed, shape: sheet.shape, overlap: sheet.overlap,
     safe: { x: edge, y: 2000, width: sheet.width - 2 * edge, height: sheet.height - 4000 },
     panels: fitted.panels,
-    inks: { black: BLACK, ink: palette.ink, tint: palette.tint, light: palette.light },
+    inks: { black: BLACK, ink: palette.ink, tint: palette.tint, light: palette.light, ...set.inks },
     items: inReadingOrder(set.items).map((item) => cutToBleed(item, full)),
     dieLine: { ink: DIE_LINE, stroke: 250, steps: [['M', 0, 0], ['L', sheet.width, 0], ['L', sheet.width, sheet.height], ['L', 0, sheet.height], ['Z']] },
     legend: legendOf(input, sheet, bleed), template: job.template,

@@ -56,6 +56,16 @@ export interface Path extends Common {
   readonly steps: readonly PathStep[];
   /** Stroke width; filled when absent. */
   readonly stroke?: Micrometres;
+  /** Holes where the path winds an even number of times. */
+  readonly evenOdd?: boolean;
+}
+/** A photo of the house's, whole in its box. */
+export interface PictureItem extends Common {
+  readonly kind: 'picture';
+  readonly picture: string;
+  readonly box: Box;
+  /** Turned clockwise about its middle. */
+  readonly degrees?: number;
 }
 /** Where one character starts on its base line, and how it stands turned, clockwise. */
 export interface Place {
@@ -85,7 +95,7 @@ export interface Text extends Common {
   /** Set where the run leaves the straight line: a place for each character, instead of `turn` and `offsets`. */
   readonly places?: readonly Place[];
 }
-export type Item = Boxes | Path | Text;
+export type Item = Boxes | Path | Text | PictureItem;
 
 export interface Panel extends Box {
   readonly name: string;

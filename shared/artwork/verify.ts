@@ -23,6 +23,7 @@ export function shapeBox(item: Item, job: Pick<Job, 'metrics'>): Box {
     const trail = item.text.endsWith(' ') ? Math.floor((face.advance(' ') * item.size) / 1000) : 0;
     return item.turn === 0 && !item.places ? { ...box, x: box.x + bearing, width: Math.max(0, box.width - bearing - trail) } : box;
   }
+  if (item.kind === 'picture') return item.box;
   const points: [number, number][] = item.kind === 'boxes'
     ? item.boxes.flatMap((box): [number, number][] => [[box.x, box.y], [box.x + box.width, box.y + box.height]])
     : item.steps.flatMap(([, ...figures]) => Array.from({ length: figures.length / 2 }, (_, i): [number, number] => [figures[2 * i]!, figures[2 * i + 1]!]));

@@ -1,4 +1,5 @@
 import { z } from './zod.ts';
+import { idField } from './fields.ts';
 import { FREE_ELEMENTS } from './free-elements.ts';
 
 export type { FreeElement } from './free-elements.ts';
@@ -40,6 +41,8 @@ export const addedElement = z.discriminatedUnion('kind', [
   /** `stroke` in micrometres; filled when absent. */
   z.strictObject({ id, kind: z.literal('box'), stroke: z.int().min(80).max(20_000).optional(), ...common }),
   z.strictObject({ id, kind: z.literal('oval'), stroke: z.int().min(80).max(20_000).optional(), ...common }),
+  /** A picture of the house's, whole inside the frame. */
+  z.strictObject({ id, kind: z.literal('picture'), picture: idField, ...common }),
   z.strictObject({ id, kind: z.literal('code'), text: z.string().trim().min(1, 'Write the address the code leads to.').max(300), ...common }),
 ]);
 export type AddedElement = z.infer<typeof addedElement>;

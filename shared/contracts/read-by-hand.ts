@@ -3,7 +3,7 @@ import { isAbsent, type DocumentWalk } from './document-walk.ts';
 import { FREE_ELEMENTS } from './free-elements.ts';
 
 const FAR = 2_000_000;
-const KINDS = ['text', 'rule', 'box', 'oval', 'code'] as const;
+const KINDS = ['text', 'rule', 'box', 'oval', 'code', 'picture'] as const;
 const MOST_ADDED = 80;
 
 /** Reads `/label/byHand` of a document: the same shape as the contract `byHand`, with its faults at their places. */
@@ -70,6 +70,10 @@ function readAdded(walk: DocumentWalk, value: unknown, at: string): AddedElement
   const common = object && readCommon(walk, object, at);
   if (!object || !kind || !id || !common) return undefined;
   if (kind === 'rule') return { kind, id, ...common };
+  if (kind === 'picture') {
+    const picture = walk.text(object['picture'], `${at}/picture`, { most: 40, isNeeded: true });
+    return picture === undefined ? undefined : { kind, id, picture, ...common };
+  }
   if (kind === 'text' || kind === 'code') {
     const text = walk.text(object['text'], `${at}/text`, { most: kind === 'text' ? 500 : 300, isNeeded: true });
     return text === undefined ? undefined : { kind, id, text: text.trim(), ...common };

@@ -1,4 +1,6 @@
+import { useQuery } from '@tanstack/react-query';
 import { getLabelPdf } from '#shared/contracts/products.contract.ts';
+import { picturesQuery } from '#src/features/labels/hand/pictures.ts';
 import { LabelStudio } from '#src/features/labels/label-studio.tsx';
 import { useProductPage } from '#src/features/workspace/product-page.ts';
 import { download } from '#src/lib/api/download.ts';
@@ -8,6 +10,7 @@ import { sayError } from '#src/lib/api/error.ts';
 export function Component() {
   const { id, desk, live, house, asOf, isLabelLocked } = useProductPage();
   const { market } = desk.draft.label;
+  const { data: pictures } = useQuery(picturesQuery);
   const result = live.all.get(market) ?? (live.view.result.market === market ? live.view.result : undefined);
 
   const fetchPressFile = async (): Promise<void> => {
@@ -26,7 +29,7 @@ export function Component() {
   return (
     <div className="wrap full">
       <LabelStudio
-        draft={desk.draft} result={result} house={house} isLocked={isLabelLocked}
+        draft={desk.draft} result={result} house={house} pictures={pictures} isLocked={isLabelLocked}
         onChange={(label, join = 'label') => desk.change((draft) => ({ ...draft, label }), join)}
         onPressFile={fetchPressFile}
       />

@@ -16,6 +16,8 @@ import { invalid } from '#server/http/app-error.ts';
 import type { Actor } from '#server/http/session.ts';
 import { getHouse } from '#server/modules/house/house.service.ts';
 import { getMaterials } from '#server/modules/materials/materials.service.ts';
+import type { HousePicture } from '#server/modules/pictures/picture.entity.ts';
+import { getPictures } from '#server/modules/pictures/pictures.service.ts';
 import { presentMaterial } from '#server/modules/materials/materials.present.ts';
 import { usedMaterialIds } from './keep-save.ts';
 import type { Product } from './product.entity.ts';
@@ -34,13 +36,20 @@ export interface Dossier {
   readonly house: HouseDefaults & { readonly name: string };
   readonly product: ProductShape;
   readonly materials: readonly MaterialShape[];
+  /** Pictures that the label shows. */
+  readonly pictures?: readonly HousePicture[];
 }
 
 /** Reads a product with everything it stands on. @throws AppError `not-found` */
 export async function getDossier(em: EntityManager, actor: Actor, id: string): Promise<Dossier> {
   const product = await getProduct(em, actor, id);
   const house = await getHouse(em, actor);
-  return { house: { name: house.name, ...house.particulars }, product: presentProduct(product), materials: await materialsOf(em, actor, [product]) };
+  return { house: { name: house.name, ...house.particulars }, product: presentProduct(product), materials: await materialsOf(em, actor, [product]), pictures: await getPictures(em, actor, picturesOn(product.draft)) };
+}
+
+/** The pictures that a draft's label shows, each once. */
+function picturesOn({ label }: Product['draft']): string[] {
+  return [...new Set((label.byHand?.added ?? []).flatMap((one) => (one.kind === 'picture' ? [one.picture] : [])))];
 }
 
 /** The materials that these products use, each once. */

@@ -26,6 +26,6 @@ function frontOf(dossier: Dossier, knows: Knowledge): ProductFront {
   if (!hasLines(dossier.product)) return { front: null };
   const { market } = dossier.product.draft.label;
   const { document, result } = judge(dossier, knows, { markets: [market] });
-  const { scene, misfits } = layOutLabel(labelOfDocument(document, result.results[0], market), plexMetrics);
+  const { scene, misfits } = layOutLabel({ ...labelOfDocument(document, result.results[0], market), pictures: dossier.pictures }, plexMetrics);
   return { front: scene && misfits.length === 0 ? cropToFront(scene) : null };
 }

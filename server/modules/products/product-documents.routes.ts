@@ -16,15 +16,18 @@ import { importFormulaDocument } from './import-document.ts';
 import { createFronts } from './fronts.ts';
 import { presentProduct } from './products.present.ts';
 import type { SaveContext } from './products.service.ts';
+import { photosFrom } from '#server/modules/pictures/photos-from.ts';
+import type { ObjectStore } from '#server/storage/object-store.ts';
 import { makeLabelPdf, makeReportPdf, makeWeighOutPdf } from './sheets.ts';
 
 interface Deps {
+  readonly storage: Pick<ObjectStore, 'getObject'>;
   readonly knows: () => Knowledge;
   readonly context: () => SaveContext;
 }
 
 /** Documents in and out of a product, and what is printed from it. The database is let go before anything is painted. */
-export function documentRoutes({ knows, context }: Deps): Route[] {
+export function documentRoutes({ storage, knows, context }: Deps): Route[] {
   const drawFront = createFronts();
   return [
     route(importContract, { may: ['edit', 'products'], bodyLimit: DOCUMENT_LIMIT }, ({ inHouse, actor, body }) =>
@@ -40,7 +43,7 @@ export function documentRoutes({ knows, context }: Deps): Route[] {
       return judge(dossier, knows(), { ...asOf(query), ...(query.market ? { markets: [query.market] } : {}) }).result;
     }),
     route(getLabelPdf, { may: ['read', 'downloads'] }, async ({ inHouse, actor, params, query }) =>
-      makeLabelPdf(await inHouse((em) => getDossier(em, actor, params.id)), knows(), { ...asOf(query), ...(query.market ? { market: query.market } : {}) }),
+      makeLabelPdf(await inHouse((em) => getDossier(em, actor, params.id)), knows(), { ...asOf(query), ...(query.market ? { market: query.market } : {}) }, photosFrom(storage)),
     ),
     route(getProductFront, { may: ['read', 'products'] }, async ({ inHouse, actor, params }) => drawFront(await inHouse((em) => getDossier(em, actor, params.id)), knows())),
     route(getReportPdf, { may: ['read', 'downloads'] }, async ({ inHouse, actor, params, query }) =>

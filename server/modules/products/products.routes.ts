@@ -10,6 +10,7 @@ import type { Dictionary } from '#shared/dictionary/types.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import { route, type Route } from '#server/http/route.ts';
 import { getHouse } from '#server/modules/house/house.service.ts';
+import type { ObjectStore } from '#server/storage/object-store.ts';
 import { dayOf, getDossier, materialsOf, type Knowledge } from './dossier.ts';
 import { documentRoutes } from './product-documents.routes.ts';
 import { presentProduct } from './products.present.ts';
@@ -20,10 +21,11 @@ import { presentWorkspace } from './workspace.ts';
 interface Deps {
   readonly law: { readonly book: LawBook };
   readonly dictionary: Dictionary;
+  readonly storage: Pick<ObjectStore, 'getObject'>;
   readonly now: () => Date;
 }
 
-export function productsRoutes({ law, dictionary, now }: Deps): Route[] {
+export function productsRoutes({ law, dictionary, storage, now }: Deps): Route[] {
   const summarize = createSummaries();
   const knows = (): Knowledge => ({ law: law.book, dictionary, today: dayOf(now()) });
   const context = (): SaveContext => ({ now: now(), categories: law.book.categories });
@@ -53,6 +55,6 @@ export function productsRoutes({ law, dictionary, now }: Deps): Route[] {
     route(archiveProductContract, { may: ['edit', 'products'] }, ({ inHouse, actor, params, body }) =>
       inHouse(async (em) => presentProduct(await archiveProduct(em, actor, { ...params, ...body }, context()))),
     ),
-    ...documentRoutes({ knows, context }),
+    ...documentRoutes({ storage, knows, context }),
   ];
 }

@@ -2,6 +2,7 @@ import { parseDecimal, type Rational } from '#shared/kernel/rational.ts';
 import type { Market } from '#shared/law/types.ts';
 import { buildReport } from '#shared/report/build-report.ts';
 import { buildWeighOut, type WeighOutInput } from '#shared/report/build-weigh-out.ts';
+import type { PressPhoto } from '#server/artwork/paint-label.ts';
 import { renderLabelPdf } from '#server/artwork/render-label.ts';
 import { AppError, invalid } from '#server/http/app-error.ts';
 import { FileAnswer } from '#server/http/file-answer.ts';
@@ -9,11 +10,15 @@ import { renderReportPdf } from '#server/paper/report-pdf.ts';
 import { renderWeighOutPdf } from '#server/paper/weigh-out-pdf.ts';
 import { contentHash, judge, type AsOf, type Dossier, type Knowledge } from './dossier.ts';
 
+/** Fetches the plates of the photos among pictures. */
+export type PhotosOf = (pictures: NonNullable<Dossier['pictures']>) => Promise<ReadonlyMap<string, PressPhoto>>;
+
 /** The label of one market as a press file. @throws AppError `does-not-fit` with each element and the room it lacks */
-export async function makeLabelPdf(dossier: Dossier, knows: Knowledge, asked: AsOf & { readonly market?: Market }): Promise<FileAnswer> {
+export async function makeLabelPdf(dossier: Dossier, knows: Knowledge, asked: AsOf & { readonly market?: Market }, photosOf: PhotosOf): Promise<FileAnswer> {
   const { market = dossier.product.draft.label.market, ...asOf } = asked;
   const { document, result } = judge(dossier, knows, { ...asOf, markets: [market] });
-  const label = await renderLabelPdf(document, result, { market });
+  const pictures = dossier.pictures ?? [];
+  const label = await renderLabelPdf(document, result, { market, pictures, photos: await photosOf(pictures) });
   if ('misfits' in label) {
     throw new AppError('does-not-fit', { issues: label.misfits.map(({ element, message }) => ({ pointer: `/label/${element.replaceAll(' ', '-')}`, message })) });
   }

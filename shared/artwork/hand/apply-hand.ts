@@ -3,9 +3,11 @@ import { plainWords } from '../breaking.ts';
 import type { BlockName } from '../content.ts';
 import { inMillimetres } from '../lengths.ts';
 import { misfitOf, type Misfit } from '../misfits.ts';
-import type { ElementName, Micrometres } from '../scene.ts';
+import type { LabelPicture } from '../label-input.ts';
+import type { ElementName, Ink, Micrometres } from '../scene.ts';
 import { leastText, type Attempt, type Job, type Setting } from '../setting.ts';
 import { drawCode, drawShape } from './draw-added.ts';
+import { drawPicture } from './draw-picture.ts';
 import { keyOf, type HandKey } from './elements.ts';
 import { lacking, setFreed, type HandPlaced } from './set-freed.ts';
 import { setText } from './set-text.ts';
@@ -16,7 +18,11 @@ const LEAST_MODULE: Micrometres = 300;
 const MOST_OWN: Micrometres = 40_000;
 const OWN_LEADING = 1200;
 
-function setAdded(job: Job, added: AddedElement): HandPlaced {
+function setAdded(job: Job, added: AddedElement, pictures: readonly LabelPicture[] | undefined): HandPlaced {
+  if (added.kind === 'picture') {
+    const picture = pictures?.find(({ id }) => id === added.picture);
+    return picture ? { ...drawPicture(added, picture), misfits: [] } : { items: [], misfits: [{ element: 'drawing', direction: 'measure', missing: 0, message: 'A picture of this label is not in the house. Choose another or take it off.' }] };
+  }
   if (added.kind === 'code') {
     const { items, module } = drawCode(added);
     const small = module < LEAST_MODULE;
@@ -66,15 +72,16 @@ export function leanFor(job: Job, { freed }: ByHand): Job {
  * A template's setting with what a person changed: freed elements leave their place and are set
  * in their frames, the house's own things join. Everything else stays where it was.
  */
-export function applyHand(job: Job, setting: Setting, attempt: Attempt, byHand: ByHand): HandPlaced {
+export function applyHand(job: Job, setting: Setting, attempt: Attempt, byHand: ByHand, pictures: readonly LabelPicture[] | undefined = undefined): HandPlaced & { readonly inks: Readonly<Record<string, Ink>> } {
   const freed = new Set<HandKey>(byHand.freed.map(({ element }) => element));
   const isFreed = (element: ElementName): boolean => freed.has(element === 'batch' ? 'durability' : (element as HandKey));
   const kept = attempt.items.filter((item) => !freed.has(keyOf(item) ?? 'own:'));
-  const placed = [...byHand.freed.map((one) => setFreed(job, setting, one)), ...byHand.added.map((one) => setAdded(job, one))];
+  const placed = [...byHand.freed.map((one) => setFreed(job, setting, one)), ...byHand.added.map((one) => setAdded(job, one, pictures))];
   const items = [...kept, ...placed.flatMap((one) => one.items)];
   const moved = new Set<HandKey>([...freed, ...byHand.added.map(({ id }): HandKey => `own:${id}`)]);
   return {
     items,
+    inks: Object.assign({}, ...placed.map((one) => one.inks ?? {})) as Readonly<Record<string, Ink>>,
     misfits: [
       ...lackingLetters(job, byHand.added), ...attempt.overflows.filter(({ element }) => !isFreed(element)).map(misfitOf),
       ...placed.flatMap((one) => one.misfits), ...verifyHand(job, items, moved),

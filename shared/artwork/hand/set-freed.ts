@@ -3,13 +3,15 @@ import { plainWords, type Word } from '../breaking.ts';
 import { barsFoot, markFoot, netFoot, type Foot } from '../feet.ts';
 import { inMillimetres } from '../lengths.ts';
 import { ELEMENT_NAMES, type Misfit } from '../misfits.ts';
-import type { Item, Micrometres, Weight } from '../scene.ts';
+import type { Ink, Item, Micrometres, Weight } from '../scene.ts';
 import { leastText, strongWeight, type Job, type Setting } from '../setting.ts';
 import { setText, type HandText } from './set-text.ts';
 
 export interface HandPlaced {
   readonly items: readonly Item[];
   readonly misfits: readonly Misfit[];
+  /** Inks beside the label's own. */
+  readonly inks?: Readonly<Record<string, Ink>>;
 }
 
 const NOTHING: HandPlaced = { items: [], misfits: [] };

@@ -1,7 +1,7 @@
 import { memo, useId } from 'react';
 import './artwork-fonts.css';
 import type { FrontView } from '#shared/artwork/crop-to-front.ts';
-import type { Box, Item, PathStep, Scene, Text } from '#shared/artwork/scene.ts';
+import type { Box, Item, PathStep, PictureItem, Scene, Text } from '#shared/artwork/scene.ts';
 
 const mm = (micrometres: number): number => micrometres / 1000;
 
@@ -26,13 +26,19 @@ function ArtText({ item, fill }: { item: Text; fill: string }) {
   return <text {...font} x={along} y={0} transform={`translate(${mm(item.x)} ${mm(item.y)}) rotate(${item.turn})`}>{item.text}</text>;
 }
 
+function ArtPicture({ item: { box, picture, degrees = 0 } }: { item: PictureItem }) {
+  const turn = degrees === 0 ? undefined : `rotate(${degrees} ${mm(box.x + box.width / 2)} ${mm(box.y + box.height / 2)})`;
+  return <image href={`/api/pictures/${picture}/preview`} x={mm(box.x)} y={mm(box.y)} width={mm(box.width)} height={mm(box.height)} preserveAspectRatio="none" transform={turn} />;
+}
+
 function ArtItem({ item, scene, clipOf }: { item: Item; scene: Scene; clipOf: (box: Box) => string }) {
   const fill = scene.inks[item.ink]!.screen;
   const clipPath = item.clip ? `url(#${clipOf(item.clip)})` : undefined;
+  if (item.kind === 'picture') return <ArtPicture item={item} />;
   if (item.kind === 'text') return <ArtText item={item} fill={fill} />;
   if (item.kind === 'boxes') return <path d={item.boxes.map(boxData).join('')} fill={fill} clipPath={clipPath} shapeRendering={item.element === 'barcode' ? 'crispEdges' : undefined} />;
   return item.stroke === undefined
-    ? <path d={pathData(item.steps)} fill={fill} clipPath={clipPath} />
+    ? <path d={pathData(item.steps)} fill={fill} fillRule={item.evenOdd ? 'evenodd' : undefined} clipPath={clipPath} />
     : <path d={pathData(item.steps)} fill="none" stroke={fill} strokeWidth={mm(item.stroke)} strokeLinecap="round" strokeLinejoin="round" clipPath={clipPath} />;
 }
 

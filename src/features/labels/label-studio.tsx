@@ -6,6 +6,7 @@ import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import type { Misfit } from '#shared/artwork/misfits.ts';
 import type { Scene } from '#shared/artwork/scene.ts';
 import type { LabelSettings, ProductDraft } from '#shared/contracts/product-draft.ts';
+import type { Picture } from '#shared/contracts/pictures.contract.ts';
 import type { LabelResult } from '#shared/artwork/label-of-document.ts';
 import type { HouseDefaults } from '#shared/product/to-document.ts';
 import { Banner } from '#src/ui/banner.tsx';
@@ -30,6 +31,8 @@ export interface LabelStudioProps {
   readonly draft: ProductDraft;
   /** The result of the label's market; absent while nothing is computed. */
   readonly result: LabelResult | undefined;
+  /** The house's pictures; absent until they are known. */
+  readonly pictures?: readonly Picture[] | undefined;
   /** What the house prints where the product says nothing. */
   readonly house?: HouseDefaults | undefined;
   /** `join` names changes that are one step of the history. */
@@ -43,9 +46,9 @@ const ZOOMS: readonly (readonly [number, string])[] = [[1, 'True size'], [1.5, '
 const LAYERS: readonly (readonly [keyof Shown, string])[] = [['die', 'Die line'], ['bleed', 'Bleed'], ['panels', 'Panels'], ['rings', 'Rings']];
 
 /** The label at true size, what stands before the press, and all that the label is set from. */
-export function LabelStudio({ draft, result, house, onChange, onPressFile, isLocked = false }: LabelStudioProps) {
+export function LabelStudio({ draft, result, house, pictures, onChange, onPressFile, isLocked = false }: LabelStudioProps) {
   const deferred = useDeferredValue(draft);
-  const layout = useMemo(() => layOutLabel(labelOfDraft(deferred, result, house), plexMetrics), [deferred, result, house]);
+  const layout = useMemo(() => layOutLabel({ ...labelOfDraft(deferred, result, house), pictures }, plexMetrics), [deferred, result, house, pictures]);
   const [zoom, setZoom] = useState(1);
   const [shown, setShown] = useState<Shown>({ die: true, bleed: true, panels: true, rings: true });
   const [isMeasuring, setIsMeasuring] = useState(false);

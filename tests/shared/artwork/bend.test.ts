@@ -60,7 +60,7 @@ function polarOf(taper: Taper, x: number, y: number): { radius: number; directio
 function pointsOf(scene: Scene): { element: string; x: number; y: number }[] {
   return scene.items.filter((item) => item.element !== 'rule' && item.element !== 'ground').flatMap((item) => {
     if (item.kind === 'text') return item.places!.map(({ x, y }) => ({ element: item.element, x, y }));
-    if (item.kind === 'boxes') throw new Error('no straight box is left on a cone');
+    if (item.kind === 'boxes' || item.kind === 'picture') throw new Error('no straight box is left on a cone');
     return item.steps.flatMap(([, ...figures]) => Array.from({ length: figures.length / 2 }, (_, i) => ({ element: item.element, x: figures[2 * i] as number, y: figures[2 * i + 1] as number })));
   });
 }

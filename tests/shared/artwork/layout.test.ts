@@ -39,7 +39,7 @@ test.each((['EU', 'UK', 'US', 'CA'] as const).flatMap((market) => CONTAINERS.map
 test('every figure of a scene is a whole micrometre', () => {
   const { scene } = lay(bodyWash);
   for (const item of scene!.items) {
-    const figures = item.kind === 'text' ? [item.x, item.y, item.size] : item.kind === 'boxes' ? item.boxes.flatMap((box) => [box.x, box.y, box.width, box.height]) : item.steps.flatMap(([, ...rest]) => rest as number[]);
+    const figures = item.kind === 'text' ? [item.x, item.y, item.size] : item.kind === 'boxes' ? item.boxes.flatMap((box) => [box.x, box.y, box.width, box.height]) : item.kind === 'picture' ? Object.values(item.box) : item.steps.flatMap(([, ...rest]) => rest as number[]);
     for (const figure of figures) expect(Number.isInteger(figure)).toBe(true);
   }
 });

@@ -2,12 +2,14 @@ import type { AddedElement, HandStyle } from '#shared/contracts/by-hand.ts';
 import type { HandKey } from '#shared/artwork/hand/elements.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import type { Scene, Text, Weight } from '#shared/artwork/scene.ts';
+import { fitInto } from '#shared/artwork/hand/draw-picture.ts';
 import { keyOf } from '#shared/artwork/hand/elements.ts';
 import { Button, TextButton } from '#src/ui/button.tsx';
 import { AreaField, CheckField, SelectField } from '#src/ui/field.tsx';
 import { Icon } from '#src/ui/icon.tsx';
 import { Panel } from '#src/ui/sheet.tsx';
 import { thingOf, type Alignment } from './edit-hand.ts';
+import { PictureShelf } from './picture-shelf.tsx';
 import { FigureField } from './figure-field.tsx';
 import { holdsType, nameOfThing } from './things.ts';
 import type { Chosen, Hand } from './use-hand.ts';
@@ -24,6 +26,7 @@ export function HandPanel({ hand, scene, isLocked }: HandPanelProps) {
   return (
     <Panel title="By hand" className="hand-panel" end={count > 0 && !isLocked ? <TextButton mini onClick={hand.reset}>All back to the template</TextButton> : null}>
       <AddRow hand={hand} scene={scene} isLocked={isLocked} />
+      <PictureShelf isLocked={isLocked} onPlace={(picture) => hand.add((id) => ({ id, kind: 'picture', picture: picture.id, frame: pictureFrame(scene, picture), style: {} }))} />
       <ul className="hand-list" aria-label="On the label">
         {hand.things.map((thing) => <ThingRow key={thing.key} thing={thing} hand={hand} />)}
       </ul>
@@ -45,6 +48,12 @@ function ThingRow({ thing, hand }: { thing: Chosen; hand: Hand }) {
       </button>
     </li>
   );
+}
+
+/** A picture begins with its longer side at 30 mm, or what the label has, in the middle of the safe room. */
+function pictureFrame({ safe }: Scene, { width, height }: { readonly width: number; readonly height: number }) {
+  const box = fitInto({ x: safe.x, y: safe.y, width: Math.min(30_000, safe.width), height: Math.min(30_000, safe.height) }, width, height);
+  return { ...box, x: safe.x + Math.round((safe.width - box.width) / 2), y: safe.y + Math.round((safe.height - box.height) / 2), width: Math.max(100, box.width), height: Math.max(100, box.height) };
 }
 
 /** New things stand in the middle of the safe room, where they are seen at once. */
@@ -108,7 +117,7 @@ function OwnFields({ thing, hand, isHeld }: { thing: Chosen; hand: Hand; isHeld:
   if (own.kind === 'text' || own.kind === 'code') {
     return <AreaField label={own.kind === 'text' ? 'Words' : 'Address the code leads to'} rows={2} value={own.text} disabled={isHeld} error={own.text.trim() === '' ? 'Write something, or remove it.' : undefined} onChange={(event) => hand.text(event.target.value)} />;
   }
-  if (own.kind === 'rule') return null;
+  if (own.kind === 'rule' || own.kind === 'picture') return null;
   return <CheckField label="Outline only" checked={own.stroke !== undefined} disabled={isHeld} onChange={(event) => hand.stroke(event.target.checked ? 300 : undefined)} />;
 }
 

@@ -6,7 +6,7 @@ const NAMES: Readonly<Record<string, string>> = {
   brand: 'Brand', name: 'Product name', function: 'Function', claim: 'Claim', 'net content': 'Net content', directions: 'Directions', warnings: 'Precautions',
   ingredients: 'Ingredients', 'responsible person': 'Name and address', durability: 'Durability and batch', barcode: 'Barcode',
 };
-const OWN: Readonly<Record<string, string>> = { rule: 'Line', box: 'Box', oval: 'Oval', code: 'QR code' };
+const OWN: Readonly<Record<string, string>> = { rule: 'Line', box: 'Box', oval: 'Oval', code: 'QR code', picture: 'Picture' };
 
 /** What a thing on the label is called in lists. */
 export function nameOfThing(byHand: ByHand, key: HandKey): string {

@@ -176,7 +176,7 @@ test('on a cone things moved by hand are bent with the rest', () => {
 test('every figure of a scene changed by hand is a whole micrometre', () => {
   const { scene } = lay({ freed: FREE_ELEMENTS.map((element) => free(element, { style: { align: 'centre', tracking: 7 } })), added: [own({ id: 'o', kind: 'oval', frame: { x: 11, y: 13, width: 977, height: 1313 }, style: {}, stroke: 200 })] });
   for (const item of scene!.items) {
-    const figures = item.kind === 'text' ? [item.x, item.y, item.size] : item.kind === 'boxes' ? item.boxes.flatMap((box) => [box.x, box.y, box.width, box.height]) : item.steps.flatMap(([, ...rest]) => rest as number[]);
+    const figures = item.kind === 'text' ? [item.x, item.y, item.size] : item.kind === 'boxes' ? item.boxes.flatMap((box) => [box.x, box.y, box.width, box.height]) : item.kind === 'picture' ? Object.values(item.box) : item.steps.flatMap(([, ...rest]) => rest as number[]);
     for (const figure of figures) expect(Number.isInteger(figure)).toBe(true);
   }
 });

@@ -1,13 +1,20 @@
 // @vitest-environment jsdom
 import { cleanup, render, screen, within } from '@testing-library/react';
+import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
 import { afterEach, beforeEach, expect, test, vi } from 'vitest';
+import { listPictures, type Picture } from '#shared/contracts/pictures.contract.ts';
 import type { LabelSettings, ProductDraft } from '#shared/contracts/product-draft.ts';
 import { LabelStudio } from '#src/features/labels/label-studio.tsx';
+import { FakeServer } from '#tests/support/fake-server.ts';
+import { uuid } from '../../fixtures.ts';
 import { bodyWash, listOf } from '#tests/shared/artwork/samples.ts';
 
-beforeEach(() => vi.stubGlobal('CSS', { escape: (text: string) => text }));
+beforeEach(() => {
+  vi.stubGlobal('CSS', { escape: (text: string) => text });
+  new FakeServer().on(listPictures, () => ({ items: [SPRIG] }));
+});
 afterEach(() => {
   cleanup();
   vi.unstubAllGlobals();
@@ -25,6 +32,8 @@ const draft: ProductDraft = {
   mayContain: [], formula: { batchSize: null, phases: [] }, declaration: { freeOrder: {}, joinedNames: false }, label,
 };
 
+const SPRIG: Picture = { id: uuid(7), name: 'Sprig', kind: 'drawing', width: 1000, height: 500, shapes: [{ steps: [['M', 0, 0], ['L', 1000, 0], ['L', 500, 500], ['Z']], cmyk: [90, 45, 70, 45], screen: '#084438' }], bytes: 900, addedAt: '2026-11-30T10:00:00.000Z', addedBy: 'Piet Lund' };
+
 let now: LabelSettings;
 const joins: (string | undefined)[] = [];
 function Desk({ isLocked = false }: { isLocked?: boolean }) {
@@ -37,7 +46,7 @@ function Desk({ isLocked = false }: { isLocked?: boolean }) {
 async function compose(isLocked = false) {
   joins.length = 0;
   const person = userEvent.setup();
-  render(<Desk isLocked={isLocked} />);
+  render(<QueryClientProvider client={new QueryClient()}><Desk isLocked={isLocked} /></QueryClientProvider>);
   await person.click(screen.getByRole('button', { name: 'Compose by hand' }));
   const list = within(screen.getByRole('list', { name: 'On the label' }));
   return { person, list, choose: (name: RegExp) => person.click(list.getByRole('button', { name })), board: screen.getByRole('region', { name: /Label, unrolled/ }) };
@@ -140,4 +149,12 @@ test('on a label that may not be changed nothing moves', async () => {
   await person.keyboard('{ArrowRight}{Delete}');
   expect(now.byHand).toBeUndefined();
   expect(screen.getByLabelText('From left, mm')).toHaveProperty('disabled', true);
+});
+
+test('a picture of the house is put on the label at a press, whole and in its proportions', async () => {
+  const { person } = await compose();
+  await person.click(await screen.findByRole('button', { name: 'Sprig' }));
+  const [added] = now.byHand!.added;
+  expect(added).toMatchObject({ kind: 'picture', picture: SPRIG.id });
+  expect(added!.frame.width).toBe(2 * added!.frame.height);
 });
