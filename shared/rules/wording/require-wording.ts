@@ -1,9 +1,9 @@
 import type { Finding, RequiredWording } from '#shared/engine/types.ts';
-import { essence } from '#shared/law/essence.ts';
-import type { Market, Sourcing } from '#shared/law/types.ts';
+import type { Sourcing } from '#shared/law/types.ts';
 import type { Context } from '../context.ts';
 import { ruleId, subjectOf } from '../substances/present.ts';
 import type { Outcome } from '../outcome.ts';
+import { labelLanguages, languageName, missingLanguages } from './label-languages.ts';
 
 /** A text that is due, from whatever rule. */
 export interface DueWording {
@@ -47,15 +47,12 @@ function isOnlyPurposeOpen(one: Pick<DueWording, 'certainty' | 'needs'>): boolea
   return one.certainty === 'possible' && one.needs.length === 1 && one.needs[0] === 'purpose';
 }
 
-/** Languages in which a market wants its texts. */
-const LANGUAGES: Readonly<Record<Market, readonly string[]>> = { EU: [], UK: ['en'], US: ['en'], CA: ['en', 'fr'] };
-
 /** Each due text in the languages of the market and of the label. */
 export function presentWording(due: readonly DueWording[], context: Context): RequiredWording[] {
   const { market } = context.facts;
-  const asked = market === 'EU' ? (context.document.label?.languages ?? []) : [];
+  const asked = labelLanguages(market, context.document);
   return due.flatMap((one) => {
-    const languages = market === 'EU' ? new Set([...context.law.wordingLanguages(one.wordingId), ...asked]) : new Set(LANGUAGES[market]);
+    const languages = new Set([...(market === 'EU' ? context.law.wordingLanguages(one.wordingId) : []), ...asked]);
     return [...languages].map((lang) => {
       const wording = context.law.wording(one.wordingId, lang);
       return {
@@ -90,25 +87,37 @@ export function judgeWordings(due: readonly DueWording[], context: Context): Fin
       remedy: isOpen && one.needs.length > 0 ? `Answer what is open: ${one.needs.join(', ')}.` : 'Print these words on container and packaging.',
       ...(isOpen && one.needs.length > 0 ? { needs: one.needs } : {}),
     });
-    if (!isOpen && !isPointer && isMissing(one.wordingId, context)) {
-      findings.push({ ...common, kind: 'wording-missing', severity: 'stop', subject: 'warnings', members: [one.subject], message: `The label's warnings do not say: ${english}`, remedy: 'Add these words to the warnings.' });
-    }
+    if (isOpen || isPointer) continue;
+    const missing = missingLanguages(one.wordingId, context.facts.market, context.document, context.law);
+    if (missing.length > 0) findings.push({ ...common, kind: 'wording-missing', severity: 'stop', subject: 'warnings', members: [one.subject], ...sayMissing(one.wordingId, missing, context) });
   }
   return findings;
 }
 
-/** True where the document gives particulars, and no text of theirs holds the words in any language held. */
-export function isMissing(wordingId: string, context: Context): boolean {
-  const particulars = context.document.product.particulars;
-  if (!particulars) return false;
-  const printed = [...particulars.warnings.map((one) => one.text), particulars.directions ?? '', particulars.function ?? ''];
-  const whole = essence(printed.join(' '));
-  const languages = context.law.wordingLanguages(wordingId);
-  if (languages.some((lang) => isSaid(context.law.wording(wordingId, lang).text, whole))) return false;
-  // A text in a language whose official wording is not held cannot be compared here.
-  return !particulars.warnings.some((one) => one.lang !== undefined && !languages.includes(one.lang));
+/** What the label does not say, language by language, and what to do about each. */
+function sayMissing(wordingId: string, missing: readonly string[], context: Context): { readonly message: string; readonly remedy: string } {
+  const { market } = context.facts;
+  const held = context.law.wordingLanguages(wordingId);
+  const isHeldHere = missing.filter((lang) => held.includes(lang));
+  const isElsewhere = missing.filter((lang) => !held.includes(lang));
+  const onlyEnglish = missing.length === 1 && missing[0] === 'en' && labelLanguages(market, context.document).length <= 1;
+  const texts = isHeldHere.map((lang) => {
+    const { text, isOfficialText } = context.law.wording(wordingId, lang);
+    return `${onlyEnglish ? '' : `in ${languageName(lang)}: `}${text}${isOfficialText ? '' : ' (check these words against the official text before you print them)'}`;
+  });
+  const { text: english, citation } = context.law.wording(wordingId, 'en');
+  const edition = market === 'EU' ? 'of the Official Journal' : 'of the official text';
+  const places = isElsewhere.map((lang) => `in ${languageName(lang)}: the words of ${citation}, as the ${languageName(lang)} edition ${edition} prints them. In English: ${english}`);
+  return {
+    message: `The label's warnings do not say${onlyEnglish ? ':' : ','} ${[...texts, ...places].join('; ')}`,
+    remedy: [
+      ...(isHeldHere.length > 0 ? ['Add these words to the warnings.'] : []),
+      ...(isElsewhere.length > 0 ? [`Take the official words in ${isElsewhere.map(languageName).join(' and ')} from ${citation} and add them to the warnings, marked with their language.`] : []),
+    ].join(' '),
+  };
 }
 
-function isSaid(text: string, whole: string): boolean {
-  return whole.includes(essence(text)) || text.split(/[.:;—]\s+/).every((sentence) => whole.includes(essence(sentence)));
+/** True where the label lacks the words in a language that it must carry. */
+export function isMissing(wordingId: string, context: Context): boolean {
+  return missingLanguages(wordingId, context.facts.market, context.document, context.law).length > 0;
 }
