@@ -47,6 +47,16 @@ function unique(texts: readonly string[]): string[] {
   });
 }
 
+/** Words in a row, so that a text is found within another from word to word, never inside a word. */
+function inWords(text: string): string {
+  return ` ${text.split(/[^\p{L}\p{N}]+/u).map(essence).filter((word) => word !== '').join(' ')} `;
+}
+
+/** True where one of the maker's texts says the words and more: they are then not printed beside it. */
+function isWithin(words: string, texts: readonly string[]): boolean {
+  return texts.some((text) => essence(text) !== essence(words) && inWords(text).includes(inWords(words)));
+}
+
 /** The label of a formula document in one market, from its own particulars and the market's result. */
 export function labelOfDocument(document: FormulaDocument, result: LabelResult | undefined, market: Market = labelMarket(document)): LabelInput {
   const { product, label } = document;
@@ -70,7 +80,7 @@ export function labelOfDocument(document: FormulaDocument, result: LabelResult |
     netContent: product.netContent ?? null,
     durability: product.durability?.kind === 'pao' ? { kind: 'pao', months: Number(product.durability.months) } : (product.durability ?? null),
     directions: particulars?.directions ?? '',
-    warnings: unique([...onLabel, ...own]).filter((text) => !onFront.includes(text)),
+    warnings: unique([...onLabel.filter((text) => !isWithin(text, own)), ...own]).filter((text) => !onFront.includes(text)),
     frontWarnings: unique(onFront),
     ingredients: splitDeclaration(result?.declaration),
     responsiblePerson: party ?? null,

@@ -23,3 +23,11 @@ it('does not double a warning typed with other spaces, case or punctuation', () 
 it('keeps a warning of the maker that says something else', () => {
   expect(printed([{ text: 'Keep away from pets.', lang: 'en' }])).toEqual(['Avoid contact with eyes.', 'Keep away from pets.']);
 });
+
+it('does not print a wording beside a text of the maker that already holds it', () => {
+  expect(printed([{ text: 'Shake well. Avoid contact with eyes. Keep cool.', lang: 'en' }])).toEqual(['Shake well. Avoid contact with eyes. Keep cool.']);
+});
+
+it('prints a wording that the text of the maker holds only up to the middle of a word', () => {
+  expect(printed([{ text: 'Avoid contact with eyesight tests.', lang: 'en' }])).toEqual(['Avoid contact with eyes.', 'Avoid contact with eyesight tests.']);
+});
