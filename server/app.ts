@@ -16,6 +16,7 @@ import { requestId } from '#server/http/request-id.ts';
 import { mountRoutes, type Route } from '#server/http/route.ts';
 import { securityHeaders } from '#server/http/security.ts';
 import { dictionaryRoutes } from '#server/modules/dictionary/dictionary.routes.ts';
+import { inventoryRoutes } from '#server/modules/dictionary/inventory.routes.ts';
 import { evidenceRoutes } from '#server/modules/evidence/evidence.routes.ts';
 import { houseRoutes } from '#server/modules/house/house.routes.ts';
 import { lawRoutes } from '#server/modules/law/law.routes.ts';
@@ -47,6 +48,7 @@ export function apiRoutes(deps: AppDeps): Route[] {
     ...sessionRoutes({ auth: deps.auth, dataRelease: deps.law.book.release }),
     ...houseRoutes(),
     ...lawRoutes(deps.law),
+    ...inventoryRoutes(deps),
     ...dictionaryRoutes({ query: deps.auth.query, dictionary: deps.dictionary, oils: deps.oils }),
     ...materialsRoutes(deps),
     ...productsRoutes(deps),

@@ -18,6 +18,8 @@ export const dictionaryEntry = z.object({
   supersededBy: z.string().optional(),
   properties: z.array(z.string()),
   source: z.string(),
+  /** Set where a name was taken over from the official inventory and nobody curated it. */
+  origin: z.literal('inventory').optional(),
 });
 
 /** Ranked look-up as someone types: misspellings, synonyms, common names, CAS numbers. */
@@ -52,6 +54,8 @@ export const listDictionary = endpoint({
   query: z.strictObject({
     find: z.string().max(255).optional(),
     function: z.string().max(80).optional(),
+    /** `inventory` for the names taken over from the inventory alone; else the curated ones. */
+    from: z.literal('inventory').optional(),
     page: z.coerce.number().int().min(1).optional(),
   }),
   response: z.object({ items: z.array(dictionaryEntry), total: z.int(), page: z.int(), pageSize: z.int(), functions: z.array(z.string()) }),

@@ -3,6 +3,7 @@ import type { OilProfile } from '#shared/dictionary/oil-profiles.ts';
 import type { Dictionary, DictionaryEntry } from '#shared/dictionary/types.ts';
 import type { RunQuery } from '#server/auth/auth-deps.ts';
 import { route, type Route } from '#server/http/route.ts';
+import { createInventorySearch, listInventory, mergeFound } from './inventory-search.ts';
 import { listNames } from './names.ts';
 import { listDictionary, resolveNames, searchDictionary } from './dictionary.service.ts';
 
@@ -14,12 +15,17 @@ export interface DictionaryDeps {
 
 /** Looking names up; everyone in a house may. */
 export function dictionaryRoutes({ query, dictionary, oils }: DictionaryDeps): Route[] {
+  const inventory = createInventorySearch();
   return [
-    route(contract.searchDictionary, { may: ['read', 'materials'] }, async ({ query: asked }) => ({
-      items: (await searchDictionary(query, asked.limit === undefined ? { q: asked.q } : { q: asked.q, limit: asked.limit })).map(
-        ({ entry, matched, by }) => ({ entry: presentEntry(entry), matched, by }),
-      ),
-    })),
+    route(contract.searchDictionary, { may: ['read', 'materials'] }, async ({ query: asked, actor, inHouse }) => {
+      const limit = asked.limit ?? 10;
+      const [curated, own] = await Promise.all([searchDictionary(query, { q: asked.q, limit }), inHouse((em) => inventory.search(em, actor, { q: asked.q, limit }))]);
+      return {
+        items: mergeFound(curated, own, asked.q)
+          .slice(0, limit)
+          .map(({ entry, matched, by }) => ({ entry: { ...presentEntry(entry), ...(own.some((one) => one.entry === entry) ? { origin: 'inventory' as const } : {}) }, matched, by })),
+      };
+    }),
     route(contract.resolveNames, { may: ['read', 'materials'], bodyLimit: 1024 * 1024 }, ({ body }) => {
       const { release, items } = resolveNames(dictionary, body.names);
       return Promise.resolve({
@@ -32,7 +38,11 @@ export function dictionaryRoutes({ query, dictionary, oils }: DictionaryDeps): R
         })),
       });
     }),
-    route(contract.listDictionary, { may: ['read', 'materials'] }, async ({ query: asked }) => {
+    route(contract.listDictionary, { may: ['read', 'materials'] }, async ({ query: asked, actor, inHouse }) => {
+      if (asked.from === 'inventory') {
+        const own = await inHouse((em) => listInventory(em, actor, asked));
+        return { ...own, items: own.items.map((entry) => ({ ...presentEntry(entry), origin: 'inventory' as const })), functions: [...own.functions] };
+      }
       const page = await listDictionary(query, asked);
       return { ...page, items: page.items.map(presentEntry), functions: [...page.functions] };
     }),
