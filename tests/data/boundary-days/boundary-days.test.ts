@@ -7,11 +7,12 @@ import { judge, law } from '#tests/shared/rules/judging.ts';
 import type { Market } from '#shared/law/types.ts';
 import { dayAfter, speaks, type Boundary } from './boundary.ts';
 import { PROHIBITED_GB, RESTRICTED_GB } from './great-britain.ts';
+import { HAIR_DYES } from './hair-dyes.ts';
 import { LISTED } from './positive-lists.ts';
 import { PROHIBITED } from './prohibited.ts';
 import { RESTRICTED } from './restricted.ts';
 
-const ALL = [...PROHIBITED, ...RESTRICTED, ...LISTED, ...PROHIBITED_GB, ...RESTRICTED_GB];
+const ALL = [...HAIR_DYES, ...PROHIBITED, ...RESTRICTED, ...LISTED, ...PROHIBITED_GB, ...RESTRICTED_GB];
 const NEAR = [-1, 0, 1];
 const EARLY = '2013-07-11';
 
@@ -27,7 +28,7 @@ function course({ placed, available }: Pick<Boundary, 'placed' | 'available'>): 
 const title = ({ market, rule, given, asked, available, ends }: Boundary): string => `${market} ${rule} ${ends ? 'ends' : 'begins'} ${available}: ${given[0]!.cas?.[0] ?? given[0]!.name}${asked.category ? ` in ${asked.category}` : ''}`;
 const cases = (list: readonly Boundary[]): [string, Boundary][] => list.map((one) => [title(one), one]);
 
-describe.each([['Annex II', PROHIBITED], ['Annex III', RESTRICTED], ['Annexes IV to VI', LISTED], ['Great Britain, Annex II', PROHIBITED_GB], ['Great Britain, Annex III', RESTRICTED_GB]] as const)('%s', (_, list) => {
+describe.each([['Annex II', PROHIBITED], ['Annex III', RESTRICTED], ['Annex III, hair dyes', HAIR_DYES], ['Annexes IV to VI', LISTED], ['Great Britain, Annex II', PROHIBITED_GB], ['Great Britain, Annex III', RESTRICTED_GB]] as const)('%s', (_, list) => {
   test.each(cases(list))('%s', (_title, one) => {
     const days = course(one);
     expect(days.map(([placed, available]) => [placed, available, speaks(one, placed, available)])).toEqual(days.map(([placed, available, begun]) => [placed, available, begun !== (one.ends ?? false)]));
