@@ -129,9 +129,11 @@ test("a supplier's line fills the composition", async () => {
 
 test('what was typed survives a reload, and can be set aside', async () => {
   openRoom(`/materials/${OAT.id}`);
-  await screen.findByRole('form', { name: 'Oat extract' });
+  await screen.findByRole('form', { name: 'Oat extract' }, { timeout: 10_000 });
   await type('Supplier', 'Fell Supplies');
   await waitFor(() => expect(screen.getByText('Not saved; kept on this computer')).toBeTruthy());
+  // Slow typing keeps a part first; the reload comes once the whole is kept.
+  await waitFor(() => expect(JSON.stringify({ ...localStorage })).toContain('Fell Supplies'));
   cleanup();
   openRoom(`/materials/${OAT.id}`);
   expect(await screen.findByText(/is back\.$/)).toBeTruthy();
@@ -186,7 +188,7 @@ test('what a certificate says is asked for what the material holds, and kept wit
   const kept = vi.fn();
   server.on(updateMaterial, ({ body }) => { kept((body as MaterialFields).facts); return saved(body, 5); });
   openRoom(`/materials/${OAT.id}`);
-  await screen.findByRole('form', { name: 'Oat extract' });
+  await screen.findByRole('form', { name: 'Oat extract' }, { timeout: 10_000 });
   expect(screen.queryByLabelText('Peanut protein')).toBeNull();
   await userEvent.type(cell('Average size of the wheat protein’s peptides'), '3,5');
   await userEvent.selectOptions(cell('A certificate of its purity was seen'), 'yes');
@@ -196,6 +198,6 @@ test('what a certificate says is asked for what the material holds, and kept wit
 
 test('a verdict’s question leads to its field', async () => {
   openRoom(`/materials/${OAT.id}#fact-peanutProteinPpm`);
-  await screen.findByRole('form', { name: 'Oat extract' });
+  await screen.findByRole('form', { name: 'Oat extract' }, { timeout: 10_000 });
   await waitFor(() => expect(document.activeElement).toBe(cell('Peanut protein')));
 });
