@@ -57,7 +57,7 @@ export function LabelStudio({ draft, result, house, pictures, onChange, onPressF
   const [byHand, setByHand] = useState(false);
   // Things are moved on the straight sheet; a cone bends them afterwards.
   const scene = byHand ? layout.straight : layout.scene;
-  const hand = useHand({ label: draft.label, scene: layout.straight, onChange });
+  const hand = useHand({ label: draft.label, scene: layout.straight, pictures, onChange });
   const container = draft.label.container;
   // Under the board while composing: a sentence that comes and goes must not push the label from under the hand.
   const told = misfits.length > 0 ? <Misfits misfits={misfits} /> : null;

@@ -4,7 +4,6 @@ import type { HandKey } from '#shared/artwork/hand/elements.ts';
 import type { Scene } from '#shared/artwork/scene.ts';
 import { around, moveThings, pullFrame, setFrame, thingOf, withGroups, type Handle } from './edit-hand.ts';
 import { snapFrame, snapLines, snapSides, type SnapLine } from './snap.ts';
-import { nameOfThing } from './things.ts';
 import type { Hand } from './use-hand.ts';
 
 export interface HandLayerProps {
@@ -82,7 +81,7 @@ export function HandLayer({ hand, scene, px, isLocked }: HandLayerProps) {
             }}
             {...events}
           >
-            <title>{nameOfThing(hand.byHand, key)}</title>
+            <title>{hand.nameOf(key)}</title>
           </rect>
         );
       })}

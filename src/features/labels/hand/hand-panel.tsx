@@ -11,7 +11,7 @@ import { Panel } from '#src/ui/sheet.tsx';
 import { thingOf, type Alignment } from './edit-hand.ts';
 import { PictureShelf } from './picture-shelf.tsx';
 import { FigureField } from './figure-field.tsx';
-import { holdsType, nameOfThing } from './things.ts';
+import { holdsType } from './things.ts';
 import type { Chosen, Hand } from './use-hand.ts';
 
 export interface HandPanelProps {
@@ -42,7 +42,7 @@ function ThingRow({ thing, hand }: { thing: Chosen; hand: Hand }) {
   return (
     <li>
       <button type="button" aria-pressed={isOn} onClick={(event) => (isOn && hand.chosen.length === 1 ? hand.choose(null) : hand.choose(thing.key, event.shiftKey || event.ctrlKey || event.metaKey))}>
-        <span>{nameOfThing(hand.byHand, thing.key)}</span>
+        <span>{hand.nameOf(thing.key)}</span>
         {thing.isLocked ? <Icon name="lock" /> : null}
         <span className="quiet">{thing.isFree ? (thing.isLocked ? 'locked' : 'by hand') : 'template'}</span>
       </button>
@@ -85,7 +85,7 @@ function ChosenFields({ hand, scene, isLocked }: HandPanelProps) {
   const single = things.length === 1 ? things[0] : undefined;
   return (
     <section className="hand-chosen" aria-label="Chosen">
-      <h3>{single ? nameOfThing(byHand, single.key) : `${chosen.length} things`}</h3>
+      <h3>{single ? hand.nameOf(single.key) : `${chosen.length} things`}</h3>
       {single ? <FrameFields thing={single} hand={hand} isHeld={isHeld} /> : null}
       {single ? <OwnFields thing={single} hand={hand} isHeld={isHeld} /> : null}
       <TypeFields keys={chosen} hand={hand} scene={scene} isHeld={isHeld} />

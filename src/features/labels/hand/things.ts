@@ -1,4 +1,5 @@
 import type { ByHand } from '#shared/contracts/by-hand.ts';
+import type { Picture } from '#shared/contracts/pictures.contract.ts';
 import type { HandKey } from '#shared/artwork/hand/elements.ts';
 import { thingOf } from './edit-hand.ts';
 
@@ -9,8 +10,9 @@ const NAMES: Readonly<Record<string, string>> = {
 const OWN: Readonly<Record<string, string>> = { rule: 'Line', box: 'Box', oval: 'Oval', code: 'QR code', picture: 'Picture' };
 
 /** What a thing on the label is called in lists. */
-export function nameOfThing(byHand: ByHand, key: HandKey): string {
+export function nameOfThing(byHand: ByHand, key: HandKey, pictures: readonly Pick<Picture, 'id' | 'name'>[] = []): string {
   const thing = thingOf(byHand, key);
+  if (thing && 'kind' in thing && thing.kind === 'picture') return pictures.find(({ id }) => id === thing.picture)?.name ?? 'Picture';
   if (thing && 'kind' in thing) return thing.kind === 'text' ? `“${thing.text.length > 24 ? `${thing.text.slice(0, 23)}…` : thing.text}”` : OWN[thing.kind]!;
   return NAMES[key] ?? key;
 }

@@ -1,14 +1,18 @@
 import { useCallback, useMemo, useState } from 'react';
 import { NOTHING_BY_HAND, type AddedElement, type ByHand, type HandFrame, type HandStyle } from '#shared/contracts/by-hand.ts';
+import type { Picture } from '#shared/contracts/pictures.contract.ts';
 import type { LabelSettings } from '#shared/contracts/product-draft.ts';
 import type { FreeElement } from '#shared/contracts/free-elements.ts';
 import { freeElement, handBoxes, type HandKey } from '#shared/artwork/hand/elements.ts';
 import { plexMetrics } from '#shared/artwork/plex-metrics.ts';
 import type { Scene } from '#shared/artwork/scene.ts';
 import { addThing, alignThings, copyThings, freeAll, groupThings, keyOfThing, lockThings, moveThings, orderThings, removeThings, setFrame, setStyle, spreadThings, thingOf, withGroups, type Alignment } from './edit-hand.ts';
+import { nameOfThing } from './things.ts';
 
 export interface HandOptions {
   readonly label: LabelSettings;
+  /** The house's pictures, whose names stand in lists. */
+  readonly pictures?: readonly Pick<Picture, 'id' | 'name'>[] | undefined;
   /** The straight scene on which things are moved. */
   readonly scene: Scene | null;
   readonly onChange: (label: LabelSettings, join?: string) => void;
@@ -31,7 +35,7 @@ function newName(byHand: ByHand): string {
 }
 
 /** The choice and every act of composing by hand, as steps of the product's own history. */
-export function useHand({ label, scene, onChange }: HandOptions) {
+export function useHand({ label, scene, pictures, onChange }: HandOptions) {
   const byHand = label.byHand ?? NOTHING_BY_HAND;
   const [chosen, setChosen] = useState<readonly HandKey[]>([]);
   const boxes = useMemo(() => (scene ? handBoxes(scene, plexMetrics) : new Map<HandKey, HandFrame>()), [scene]);
@@ -54,6 +58,7 @@ export function useHand({ label, scene, onChange }: HandOptions) {
 
   return {
     byHand, things, chosen: keys,
+    nameOf: (key: HandKey) => nameOfThing(byHand, key, pictures),
     choose: (key: HandKey | null, isMore = false) => setChosen((before) => (key === null ? [] : isMore ? (before.includes(key) ? before.filter((one) => one !== key) : [...before, key]) : withGroups(byHand, [key]))),
     chooseAll: () => setChosen(things.map(({ key }) => key)),
     /** Sets the chosen free and gives the label on which a drag begins. */
