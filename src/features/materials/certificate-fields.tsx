@@ -22,7 +22,7 @@ export function CertificateFields() {
   return (
     <>
       <p className="quiet">Kept with the material: every product that uses it is answered at once.</p>
-      <div className="handling">
+      <div className="certificates">
         {Object.keys(MATERIAL_FACTS).filter(isShown).map((key) => {
           const { label, kind, hint } = MATERIAL_FACTS[key]!;
           const common = { label, hint, autoFocus: hash === `#${factAnchor(key)}`, error: errors.facts?.[key]?.message, ...register(`facts.${key}`) };
