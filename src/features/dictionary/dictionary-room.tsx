@@ -18,10 +18,18 @@ import './dictionary.css';
 
 export type Entry = z.infer<typeof dictionaryEntry>;
 
+/** What the inventory says of a name; nobody curated it, so it has no page of its own. */
+const IMPORTED: Column<Entry>[] = [
+  { id: 'inci', head: 'INCI name', by: (one) => one.inci.toLowerCase(), cell: (one) => <span className="[overflow-wrap:anywhere]">{one.inci}</span> },
+  { id: 'functions', head: 'Functions', by: (one) => one.functions.join(' '), cell: (one) => one.functions.join(', '), className: 'wide' },
+  { id: 'cas', head: 'CAS', cell: (one) => one.cas.join(', ') },
+  { id: 'origin', head: 'Standing', cell: () => 'from the inventory, not curated', className: 'wide quiet' },
+];
+
 /** What the address says of the list. */
 export function filterOf(search: URLSearchParams): DictionaryFilter {
   const page = Number(search.get('page'));
-  return { ...(search.get('find') ? { find: search.get('find')! } : {}), ...(search.get('function') ? { function: search.get('function')! } : {}), ...(page > 1 ? { page } : {}) };
+  return { ...(search.get('find') ? { find: search.get('find')! } : {}), ...(search.get('function') ? { function: search.get('function')! } : {}), ...(search.get('from') === 'inventory' ? { from: 'inventory' as const } : {}), ...(page > 1 ? { page } : {}) };
 }
 
 /** Every ingredient known here: found by any of its names or its CAS number, narrowed by what it does. */
@@ -30,13 +38,14 @@ export function DictionaryRoom() {
   const filter = filterOf(search);
   const { data, error } = useQuery(dictionaryQueries.list(filter));
   const findId = useId();
-  const columns = useMemo<Column<Entry>[]>(() => [
+  const isImported = filter.from === 'inventory';
+  const columns = useMemo<Column<Entry>[]>(() => isImported ? IMPORTED : [
     { id: 'inci', head: 'INCI name', by: (one) => one.inci.toLowerCase(), cell: (one) => one.inci, link: (one) => paths.entry(one.inci) },
     { id: 'common', head: 'Also known as', cell: (one) => [...one.commonNames, ...one.synonyms].slice(0, 3).join(', '), className: 'wide quiet' },
     { id: 'functions', head: 'Functions', by: (one) => one.functions.join(' '), cell: (one) => one.functions.join(', '), className: 'wide' },
     { id: 'cas', head: 'CAS', cell: (one) => one.cas.join(', '), className: 'nowrap' },
     { id: 'ec', head: 'EC', cell: (one) => one.ec.join(', '), className: 'wide nowrap' },
-  ], []);
+  ], [isImported]);
   const turn = (key: string, value: string) => setSearch((before) => {
     if (value) before.set(key, value);
     else before.delete(key);
@@ -55,6 +64,10 @@ export function DictionaryRoom() {
         <SelectField label="Function" value={filter.function ?? ''} onChange={(event) => turn('function', event.target.value)}>
           <option value="">any</option>
           {(data?.functions ?? []).map((one) => <option key={one} value={one}>{one}</option>)}
+        </SelectField>
+        <SelectField label="Names" value={filter.from ?? ''} onChange={(event) => turn('from', event.target.value)}>
+          <option value="">curated</option>
+          <option value="inventory">from the inventory, not curated</option>
         </SelectField>
         <span className="quiet self-end pb-1.5" role="status">{data ? `${data.total} found` : ''}</span>
       </div>
