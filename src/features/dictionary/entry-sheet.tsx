@@ -1,4 +1,6 @@
 import type { ReactNode } from 'react';
+import { Link } from 'react-router-dom';
+import { paths } from '#src/app/paths.ts';
 import { Panel } from '#src/ui/sheet.tsx';
 import type { Entry } from './dictionary-room.tsx';
 import './dictionary.css';
@@ -23,7 +25,7 @@ export function EntrySheet({ entry }: { entry: Entry }) {
           <Row word="EC">{entry.ec.join(', ')}</Row>
           <Row word="Synonyms">{entry.synonyms.length > 0 ? <List items={entry.synonyms} /> : null}</Row>
           <Row word="Common names">{entry.commonNames.length > 0 ? <List items={entry.commonNames} /> : null}</Row>
-          <Row word="Superseded by">{entry.supersededBy}</Row>
+          <Row word="Superseded by">{entry.supersededBy ? <Link to={paths.entry(entry.supersededBy)}>{entry.supersededBy}</Link> : null}</Row>
           <Row word="Kind">{entry.properties.map((one) => one.replaceAll('-', ' ')).join(', ')}</Row>
           <Row word="Read from">{entry.source}</Row>
         </dl>
