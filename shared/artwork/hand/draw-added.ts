@@ -29,6 +29,11 @@ function plainAddress(text: string): string {
   return /^[a-z][a-z0-9+.-]*:/i.test(text) ? text.replace(/[^\x21-\x7e]/gu, encodeURIComponent) : text;
 }
 
+/** The bytes of a text in UTF-8, by the escapes that every engine of the language knows. */
+function toUtf8(text: string): number[] {
+  return Array.from(encodeURIComponent(text).matchAll(/%([0-9A-F]{2})|(.)/g), ([, hex, letter]) => (hex === undefined ? letter!.charCodeAt(0) : parseInt(hex, 16)));
+}
+
 export interface DrawnCode {
   readonly items: readonly Item[];
   /** Edge of one module. */
@@ -40,7 +45,7 @@ export interface DrawnCode {
  * modules of one row joined to bars. UTF-8, error correction M (ISO/IEC 18004).
  */
 export function drawCode(added: Extract<AddedElement, { kind: 'code' }>): DrawnCode {
-  qrcode.stringToBytes = (text) => [...new TextEncoder().encode(text)];
+  qrcode.stringToBytes = toUtf8;
   const code = qrcode(0, 'M');
   code.addData(plainAddress(added.text), 'Byte');
   code.make();
