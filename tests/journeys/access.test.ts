@@ -23,6 +23,8 @@ const SCREENS: readonly (readonly [name: string, address: (product: string, mate
   ['verdicts', (product) => `${product}/verdicts`, /What was not checked/],
   ['label', (product) => `${product}/label`, /Before the press/],
   ['report', (product) => `${product}/report`, /Cautions/],
+  ['trail of a product', (product) => `${product}/trail`, /beginning of the trail/],
+  ['trail', () => '/trail', /Verify the chain/],
   ['nothing', () => '/nothing-here', /Nothing stands here/],
 ];
 const REFUSALS = new WeakMap<Visit, string[]>();

@@ -134,8 +134,7 @@ function letterWords(scene: Scene, key: HandKey): string | undefined {
 
 function TypeFields({ keys, hand, scene, isHeld }: { keys: readonly HandKey[]; hand: Hand; scene: Scene; isHeld: boolean }) {
   const { byHand } = hand;
-  const own = keys.map((key) => thingOf(byHand, key));
-  const style: HandStyle = own[0]?.style ?? {};
+  const style: HandStyle = keys[0] ? hand.styleOf(keys[0]) : {};
   const isType = keys.every((key) => holdsType(byHand, key));
   const isText = isType && keys.every((key) => key !== 'net content' && key !== 'durability');
   const ink = (

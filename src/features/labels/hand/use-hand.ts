@@ -58,6 +58,8 @@ export function useHand({ label, scene, pictures, onChange }: HandOptions) {
 
   return {
     byHand, things, chosen: keys,
+    /** How it is set now, by hand or by the template. */
+    styleOf: (key: HandKey): HandStyle => thingOf(byHand, key)?.style ?? (key.startsWith('own:') ? {} : (free(key as FreeElement)?.style ?? {})),
     nameOf: (key: HandKey) => nameOfThing(byHand, key, pictures),
     choose: (key: HandKey | null, isMore = false) => setChosen((before) => (key === null ? [] : isMore ? (before.includes(key) ? before.filter((one) => one !== key) : [...before, key]) : withGroups(byHand, [key]))),
     chooseAll: () => setChosen(things.map(({ key }) => key)),

@@ -158,3 +158,14 @@ test('a picture of the house is put on the label at a press, whole and in its pr
   expect(added).toMatchObject({ kind: 'picture', picture: SPRIG.id });
   expect(added!.frame.width).toBe(2 * added!.frame.height);
 });
+
+test('the figures of what stands in the template are shown, and an emptied size fills the frame', async () => {
+  const { person, choose } = await compose();
+  await choose(/^Product name/);
+  const size = screen.getByLabelText<HTMLInputElement>('Size, pt');
+  expect(Number(size.value)).toBeGreaterThan(8);
+  await person.clear(size);
+  await person.type(size, '{Enter}');
+  expect(now.byHand!.freed[0]).toMatchObject({ element: 'name' });
+  expect(now.byHand!.freed[0]!.style.size).toBeUndefined();
+});
