@@ -45,6 +45,8 @@ const MATRIX: Readonly<Record<string, readonly Role[]>> = {
   'GET /products/:id/evidence/:documentId': ALL,
   'DELETE /products/:id/evidence/:documentId': MAKERS,
   'GET /products/:id/front': ALL,
+  'GET /products/:id/revisions': ALL,
+  'GET /products/:id/revisions/:version': ALL,
   'GET /products/:id/label.pdf': ALL,
   'GET /products/:id/report.pdf': ALL,
   'GET /products/:id/weigh-out.pdf': ALL,

@@ -15,6 +15,7 @@ import { dayOf, getDossier, materialsOf, type Knowledge } from './dossier.ts';
 import { documentRoutes } from './product-documents.routes.ts';
 import { presentProduct } from './products.present.ts';
 import { archiveProduct, copyProduct, createProduct, listProducts, updateProduct, type SaveContext } from './products.service.ts';
+import { revisionRoutes } from './revisions.routes.ts';
 import { createSummaries } from './summaries.ts';
 import { presentWorkspace } from './workspace.ts';
 
@@ -55,6 +56,7 @@ export function productsRoutes({ law, dictionary, storage, now }: Deps): Route[]
     route(archiveProductContract, { may: ['edit', 'products'] }, ({ inHouse, actor, params, body }) =>
       inHouse(async (em) => presentProduct(await archiveProduct(em, actor, { ...params, ...body }, context()))),
     ),
+    ...revisionRoutes(),
     ...documentRoutes({ storage, knows, context }),
   ];
 }
