@@ -57,7 +57,7 @@ export function VersionsPanel({ id, draft, version, nameOf, judge, onTakeUp }: V
           </section>
           <section aria-label="What the law says to it">
             <h3>{effects.length === 0 ? 'No verdict and no list changes' : 'What the law says to it'}</h3>
-            {effects.map(({ market, change }) => <EffectOf key={market} market={market} change={change} />)}
+            {togetherWhereAlike(effects).map(({ markets, change }) => <EffectOf key={markets.join()} markets={markets} change={change} />)}
             {effects.length > 0 ? <p className="hint">Both are judged for the days chosen above, with the materials as they are today.</p> : null}
           </section>
         </div>
@@ -76,12 +76,24 @@ function DifferenceTable({ differences, from }: { differences: readonly Differen
   );
 }
 
-function EffectOf({ market, change }: { market: Market; change: ResultChange }) {
+/** Markets in which a change says the same are told once. */
+function togetherWhereAlike(effects: readonly { readonly market: Market; readonly change: ResultChange }[]): { markets: Market[]; change: ResultChange }[] {
+  const groups = new Map<string, { markets: Market[]; change: ResultChange }>();
+  for (const { market, change } of effects) {
+    const key = JSON.stringify([[change.added, change.removed].map((findings) => findings.map(({ kind, message }) => [kind, message])), change.list, change.wording]);
+    const group = groups.get(key);
+    if (group) group.markets.push(market);
+    else groups.set(key, { markets: [market], change });
+  }
+  return [...groups.values()];
+}
+
+function EffectOf({ markets, change }: { markets: readonly Market[]; change: ResultChange }) {
   const { list } = change;
   const said = [list.added.length > 0 ? `now names ${sayList(list.added)}` : '', list.removed.length > 0 ? `no longer names ${sayList(list.removed)}` : ''].filter(Boolean).join('; ');
   return (
     <div className="versions-effect">
-      <h4>{market}</h4>
+      <h4>{sayList(markets)}</h4>
       <ul>
         {change.added.map((finding) => <Point key={`+${finding.message}`} finding={finding} word="New" />)}
         {change.removed.map((finding) => <Point key={`-${finding.message}`} finding={finding} word="Gone" />)}
