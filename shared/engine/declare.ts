@@ -130,8 +130,8 @@ function namesFor(plan: MixingPlan, law: LawBook, { market, joined, areHairColou
 function naming(substance: PlannedSubstance, law: LawBook): Parameters<typeof printedName>[0] {
   const { inci, written, entry } = substance.first;
   const usName = usNameOf(substance);
-  const canada = entry?.names.ca === undefined ? undefined : law.canadianName(written);
-  return { inci, written, isNano: substance.nano, ...(entry && { entry }), ...(usName !== undefined && { usName }), ...(canada && { canada }) };
+  const schedule = entry?.names.ca === undefined ? undefined : law.canadianName(written);
+  return { inci, written, isNano: substance.nano, ...(entry && { entry }), ...(usName !== undefined && { usName }), ...(schedule && { schedule }) };
 }
 
 /** A US colour name given with any of the materials. */

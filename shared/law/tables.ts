@@ -26,6 +26,7 @@ import annexVI from '#data/parameters/eu-annex-vi.json' with { type: 'json' };
 import formaldehyde from '#data/parameters/formaldehyde-releasers.json' with { type: 'json' };
 import allergens from '#data/parameters/fragrance-allergens.json' with { type: 'json' };
 import warnings from '#data/parameters/product-warnings.json' with { type: 'json' };
+import usDuties from '#data/parameters/us-duties.json' with { type: 'json' };
 import ukDuties from '#data/parameters/uk-duties.json' with { type: 'json' };
 import ukProhibited2022 from '#data/parameters/uk-prohibited-2022.json' with { type: 'json' };
 import ukProhibited2024 from '#data/parameters/uk-prohibited-2024.json' with { type: 'json' };
@@ -62,7 +63,7 @@ export const lawTables = {
   changes,
   usColours,
   formaldehyde,
-  duties: [...ukDuties, ...caDuties],
+  duties: [...ukDuties, ...usDuties, ...caDuties],
   productConditions: caConditions,
   canadianNames,
 } as unknown as LawTables;
