@@ -16,7 +16,9 @@ export interface HeadroomInput {
   mixAt(line: number, share: Rational): Blend;
   /** Findings that rest on amounts and are not on the list's order: law and allergens to come. */
   judge(blend: Blend): readonly Finding[];
-  /** Every finding: for the few lines that the short way does not cover. */
+  /** As `judge`, with the findings on the list and its order. */
+  judgeWide(blend: Blend): readonly Finding[];
+  /** Every finding: for the few lines whose materials take no part today. */
   judgeAll(blend: Blend): readonly Finding[];
   /** Weighted sums and what they are compared with, in percent. */
   readonly thresholds: readonly Comparison[];
@@ -93,7 +95,7 @@ function findBound(input: HeadroomInput, today: readonly Interval[], { line, mat
   const shareAt = (s: Rational): Rational => reduce({ n: now.n * (s.d - s.n) + 100n * now.d * s.n, d: now.d * s.d });
   const end = blendAlone(material);
   const onList = input.blend.plan.hasRanges ? input.findListFinding(end) : undefined;
-  const freshAt = (share: Rational, isWide: boolean): Finding | undefined => fresh((isWide ? input.judgeAll : input.judge)(input.mixAt(line, share)));
+  const freshAt = (share: Rational, isWide: boolean): Finding | undefined => fresh((isWide ? input.judgeWide : input.judge)(input.mixAt(line, share)));
   const ofLaw = findLawFinding(input, today, end, {
     until: onList?.s ?? WHOLE,
     freshAt: (s, isWide) => freshAt(shareAt(s), isWide),

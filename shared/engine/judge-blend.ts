@@ -5,7 +5,7 @@ import { hasBegun } from '#shared/law/as-at.ts';
 import type { LawBook } from '#shared/law/law-book.ts';
 import type { AllergenGroup } from '#shared/law/types.ts';
 import { claimedShares } from '#shared/rules/claims/claimed-shares.ts';
-import { judgeLaw, type LawVerdict } from '#shared/rules/judge-law.ts';
+import { judgeAmounts, judgeLaw, type LawVerdict } from '#shared/rules/judge-law.ts';
 import { findThresholds } from '#shared/rules/thresholds.ts';
 import { groupAllergens, judgeAllergens, type AllergenVerdict } from './allergens.ts';
 import type { Declaration } from './assessment.ts';
@@ -57,11 +57,21 @@ export function judgeBlend({ document, facts, law, dictionary }: JudgedProduct, 
   return { declaration, verdicts, judged, findings };
 }
 
+/** As {@link judgeBlend}, of the same materials in other amounts: only findings that amounts can change. */
+function judgeTrial(product: JudgedProduct, blend: Blend, claims: boolean): Finding[] {
+  const { document, facts, law, dictionary } = product;
+  const { market, category } = facts;
+  const grouped = groupAllergens(blend, law);
+  const { verdicts, upcoming } = judgeAllergens(blend, grouped, { ...facts, exposure: category.exposure });
+  const { declaration, ambiguities } = declare({ document, blend, dictionary, lawBook: law, market, category, allergens: verdicts, grouped });
+  return [...judgeAmbiguities(ambiguities, market), ...judgeOrder(declaration, market), ...judgeAmounts(product, blend, claims), ...upcoming];
+}
+
 /** What headroom asks of a product that has been judged. */
 export function headroomOf(product: JudgedProduct, blend: Blend, today: Pick<JudgedBlend, 'declaration' | 'findings'>): HeadroomInput {
   const { document, facts, law, dictionary } = product;
   const byId = materialsById(document.materials);
-  const inputFor = (mixed: Blend, declaration: () => Declaration): HeadroomInput => ({
+  const inputFor = (mixed: Blend, declaration: () => Declaration, promised = claimedShares(document, mixed)): HeadroomInput => ({
     blend: mixed,
     today: today.findings,
     materialOf(line) {
@@ -71,11 +81,12 @@ export function headroomOf(product: JudgedProduct, blend: Blend, today: Pick<Jud
     mixAt: (line, share) => blendFormula(document, dictionary, withShare(blend.weighed, line, share)),
     judge(other) {
       const { upcoming } = judgeAllergens(other, groupAllergens(other, law), { ...facts, exposure: facts.category.exposure });
-      return [...judgeLaw(facts, other, document, law).findings, ...upcoming];
+      return [...judgeAmounts(product, other, promised.length > 0), ...upcoming];
     },
     // Whether the batch adds up is asked of the amounts as they are written, not of a trial.
     judgeAll: (other) => judgeBlend(product, other).findings.filter(({ kind }) => kind !== 'sum-mismatch'),
-    thresholds: [...comparisonsFor(product, mixed), ...claimedShares(document, mixed).map((one): Comparison => ({ ...one, changesList: false, isLeast: true }))],
+    judgeWide: (other) => judgeTrial(product, other, promised.length > 0),
+    thresholds: [...comparisonsFor(product, mixed), ...promised.map((one): Comparison => ({ ...one, changesList: false, isLeast: true }))],
     findListFinding: (end) => findListFinding(mixed, end, declaration(), facts.market),
     withBlend: (other) => inputFor(other, () => judgeBlend(product, other).declaration),
   });

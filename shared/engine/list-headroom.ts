@@ -48,7 +48,7 @@ export function findListFinding(now: Blend, end: Blend, declaration: Declaration
   for (const a of ordered) {
     for (const b of ordered) {
       // What is sure of both is never turned round.
-      if (a === b || (a.isFixed && b.isFixed) || !canTurn(a, b) || today.has(`${a.listed.inci}|${b.listed.inci}`)) continue;
+      if (a === b || (a.isFixed && b.isFixed) || isLess(a.typ, b.typ) || !canTurn(a, b) || today.has(`${a.listed.inci}|${b.listed.inci}`)) continue;
       const found = findTurn(a, b, ordered, way, first ?? WAY.to);
       if (found) first = { ...found, rule: 'order-proved' };
     }
@@ -72,6 +72,11 @@ function findStraddle({ listed, lo, hi }: Entry, { market, one }: Way): Beginnin
   return whereAllHold([{ course: minus(hi, one), orZero: ordersOne }, { course: minus(one, lo), orZero: !ordersOne }])?.from;
 }
 
+/** Less all the way. */
+function isLess(a: Course, b: Course): boolean {
+  return a.now < b.now && a.end < b.end;
+}
+
 /** False where `a` is never below `b`: their ranges stay apart all the way. */
 function canTurn(a: Entry, b: Entry): boolean {
   return a.lo.now < b.hi.now || a.lo.end < b.hi.end;
@@ -85,7 +90,7 @@ function findTurn(a: Entry, b: Entry, ordered: readonly Entry[], way: Way, until
   const turns = leads && whereAllHold([{ course: negative(leadOf(a, b, way)), orZero: false }], leads);
   if (!turns) return undefined;
   const between = (one: Entry): Stretch[] => {
-    const stretch = one === a || one === b ? undefined : whereAllHold([leadsBy(a, one), leadsBy(one, b)], turns);
+    const stretch = one === a || one === b || isLess(a.typ, one.typ) || isLess(one.typ, b.typ) ? undefined : whereAllHold([leadsBy(a, one), leadsBy(one, b)], turns);
     return stretch ? [stretch] : [];
   };
   return firstUncovered(turns, ordered.flatMap(between));

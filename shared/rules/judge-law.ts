@@ -38,6 +38,31 @@ export interface LawVerdict {
  * answer, findings in the order of the law.
  */
 export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: FormulaDocument, law: LawBook): LawVerdict {
+  const { context, notChecked, due, ofSubstances, toCome } = judgeMixture(facts, mixture, document, law);
+  const findings = [
+    ...ofSubstances,
+    ...judgeProductConditions(context),
+    ...judgeMayContain(context),
+    ...judgeWordings(due, context),
+    ...judgeParticulars(context),
+    ...judgeClaims(context),
+    ...toCome,
+  ];
+  return { findings, requiredWording: presentWording(due, context), notChecked: [...withCertificates(notChecked, context), ...listNotRead(context), ...listDuties(context), ...listOpenParticulars(context)] };
+}
+
+/**
+ * The findings of {@link judgeLaw} that can change with the amounts while the same materials take
+ * part, in the same order: what hangs on the label, on answers or on which substances are there
+ * is left out. `claims` says whether a claim names a share, so that claims hang on amounts too.
+ */
+export function judgeAmounts(product: { readonly facts: ProductFacts; readonly document: FormulaDocument; readonly law: LawBook }, mixture: Mixture, claims: boolean): Finding[] {
+  const { context, due, ofSubstances, toCome } = judgeMixture(product.facts, mixture, product.document, product.law);
+  return [...ofSubstances, ...judgeWordings(due, context), ...(claims ? judgeClaims(context) : []), ...toCome];
+}
+
+/** What the law says of the substances and their amounts: the part that both ways of asking share. */
+function judgeMixture(facts: ProductFacts, mixture: Mixture, document: FormulaDocument, law: LawBook) {
   const formaldehyde = theoreticalFormaldehyde(mixture, law, facts);
   const context: Context = { facts, mixture, document, law, days: facts, ...(formaldehyde ? { theoreticalFormaldehyde: formaldehyde } : {}) };
   const notChecked: NotChecked[] = [];
@@ -48,21 +73,15 @@ export function judgeLaw(facts: ProductFacts, mixture: Mixture, document: Formul
   const formaldehydeNow = judgeFormaldehyde(context);
   const due = [...wordingOf(outcomes, context), ...formaldehydeNow, ...judgeProductWarnings(context)];
   const prohibited = new Set(outcomes.filter((one) => one.type === 'prohibited' && one.certainty === 'certain').flatMap((one) => one.parts.map((part) => part.substance.name)));
-  const findings = [
+  const ofSubstances = [
     ...presentSubstances(outcomes, context),
     ...presentSubstances(judgeShades(context), context),
     ...judgePositiveLists(context).filter((one) => !prohibited.has(one.subject)),
     ...judgeIsothiazolinones(context),
     ...judgeUsColours(context),
-    ...judgeProductConditions(context),
-    ...judgeMayContain(context),
-    ...judgeWordings(due, context),
-    ...judgeParticulars(context),
-    ...judgeClaims(context),
-    ...judgeUpcoming(rows, outcomes, context),
-    ...presentUpcomingWordings(formaldehydeNow, judgeFormaldehyde(later), context),
   ];
-  return { findings, requiredWording: presentWording(due, context), notChecked: [...withCertificates(notChecked, context), ...listNotRead(context), ...listDuties(context), ...listOpenParticulars(context)] };
+  const toCome = [...judgeUpcoming(rows, outcomes, context), ...presentUpcomingWordings(formaldehydeNow, judgeFormaldehyde(later), context)];
+  return { context, notChecked, due, ofSubstances, toCome };
 }
 
 /** Colourants of other shades: their uses are judged, their amounts are not known. */
