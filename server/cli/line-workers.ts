@@ -16,6 +16,13 @@ export interface WorkerStart {
 /** Batches that each worker has before it or in hand: one to work on, one to go on with. */
 export const BATCHES_EACH = 2;
 
+/**
+ * What a thread's memory may grow to, in megabytes: the tables and a batch need a fraction of it.
+ * Left alone a thread takes what the machine has before it clears up. One that needs more ends,
+ * and its batches are judged without it.
+ */
+const LIMITS = { maxOldGenerationSizeMb: 384, maxYoungGenerationSizeMb: 48 } as const;
+
 interface Waiting {
   readonly batch: readonly InputLine[];
   readonly settle: (judged: readonly JudgedLine[]) => void;
@@ -41,7 +48,7 @@ export class LineWorkers {
   }
 
   #open(file: URL, workerData: WorkerStart): Thread {
-    const worker = new Worker(file, { workerData });
+    const worker = new Worker(file, { workerData, resourceLimits: LIMITS });
     const one: Thread = { worker, waiting: [] };
     worker.on('message', (judged: readonly JudgedLine[]) => one.waiting.shift()!.settle(judged));
     worker.on('error', () => this.#lose(one));

@@ -9,6 +9,8 @@ const ROOT = join(import.meta.dirname, '../..');
 const CLI = join(ROOT, 'server/cli/run.mjs');
 /** GNU time, which tells a process's largest resident memory, its threads included. */
 const TIME = '/usr/bin/time';
+/** A longer file may take this much more memory than a shorter one and still be called flat. */
+const FLAT = 1.15;
 const LARGEST_ANSWER = 2 * 1024 * 1024 * 1024;
 
 /** The command line's promises: its start, and JSON Lines by the thousand, of one formula and of many. */
@@ -23,21 +25,26 @@ export function runCliBench(): Row[] {
       startOf('schema', ['schema', 'formula']),
       startOf('check of one formula', ['check', one]),
       throughput('one body wash, again and again', (count) => Array.from({ length: count }, () => wash), { folder, counts: [1000, 10_000] }),
-      throughput('1,000 different formulas', (count) => mix.slice(0, count), { folder, counts: [200, 1000] }),
+      throughput('1,000 different formulas', (count) => mix.slice(0, count), { folder, counts: [100, 500] }),
     ];
   } finally {
     rmSync(folder, { recursive: true, force: true });
   }
 }
 
+/** The command line's own start, and beside it the same with npm in front, whose start is not ours. */
 function startOf(name: string, words: readonly string[]): Row {
-  const times = Array.from({ length: 9 }, () => {
+  const own = median(timesOf(process.execPath, [CLI, ...words]));
+  const withNpm = median(timesOf('npm', ['run', '--silent', 'colophon', '--', ...words]));
+  return { name: `command line: ${name}`, measured: `${Math.round(own)} ms; ${Math.round(withNpm)} ms with npm's own start`, promise: 'under 400 ms without npm', isKept: own < 400 };
+}
+
+function timesOf(program: string, words: readonly string[]): number[] {
+  return Array.from({ length: 7 }, () => {
     const from = performance.now();
-    spawnSync('npm', ['run', '--silent', 'colophon', '--', ...words], { cwd: ROOT });
+    spawnSync(program, words, { cwd: ROOT });
     return performance.now() - from;
   }).slice(1);
-  const typical = median(times);
-  return { name: `command line: ${name}, npm included`, measured: `${Math.round(typical)} ms`, promise: 'under 400 ms', isKept: typical < 400 };
 }
 
 interface Runs {
@@ -58,7 +65,7 @@ function throughput(name: string, lines: (count: number) => readonly string[], {
   return {
     name: `check of JSON Lines, ${name}`,
     measured: `${Math.round(perSecond)} formulas/s; ${Math.round(small.megabytes)} MB at ${counts[0]} lines, ${Math.round(large.megabytes)} MB at ${counts[1]}`,
-    promise: 'at least 1,000 formulas/s, memory flat',
-    isKept: perSecond >= 1000 && small.megabytes > 0 && large.megabytes < small.megabytes * 1.5,
+    promise: 'at least 1,000 formulas/s, memory within 15 %',
+    isKept: perSecond >= 1000 && small.megabytes > 0 && large.megabytes < small.megabytes * FLAT,
   };
 }
