@@ -7,7 +7,9 @@ describe('duties that nothing entered decides', () => {
   test('are told for their own market alone', () => {
     expect(told({ market: 'CA' })).toContain('ca/duty/notification');
     expect(told({ market: 'UK' })).toContain('uk/duty/notification');
-    for (const market of ['EU', 'US'] as const) expect(told({ market }).filter((rule) => rule.includes('/duty/'))).toEqual([]);
+    expect(told({ market: 'US' })).toContain('us/duty/registration');
+    for (const market of ['UK', 'US', 'CA'] as const) expect(told({ market }).filter((rule) => rule.includes('/duty/') && !rule.startsWith(`${market.toLowerCase()}/`)), market).toEqual([]);
+    expect(told({ market: 'EU' }).filter((rule) => rule.includes('/duty/'))).toEqual([]);
   });
 
   test('keep to the kind of product', () => {
